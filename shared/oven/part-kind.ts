@@ -1,0 +1,41 @@
+import type { Element, NodeName } from '../engine/circuit/circuit.ts';
+import type { AppliedFault, FaultKind } from './fault.ts';
+import type { PartKindName } from './oven.ts';
+
+export interface TerminalKind {
+  id: string;
+  /** in words: "line out", "heater terminal" */ name: string;
+  /** metal under varnish: an ohmmeter sees nothing until a spot is cleaned */ isVarnished?: boolean;
+  /** the part's body, bolted to the chassis */ isBody?: boolean;
+}
+
+export interface ValueKind {
+  name: string;
+  unit: string;
+  nominal: number;
+  /** relative, uniform: 0.05 draws nominal x (0.95 to 1.05) */ tolerance: number;
+  source: string;
+}
+
+/** What a part's circuit is made from. */
+export interface PartContext {
+  ref: string;
+  variant: string | undefined;
+  /** drawn values, before faults */ values: Readonly<Record<string, number>>;
+  /** faults on this part only */ faults: readonly AppliedFault[];
+  node: (terminal: string) => NodeName;
+  /** an element or inner node name unique to this part: `C1:bleeder` */ inner: (name: string) => string;
+  isActuated: boolean;
+  isOpened: boolean;
+  isEnergised: boolean;
+}
+
+/** One kind of part: its terminals, values, faults and circuit. One file each in `parts/`. */
+export interface PartKind {
+  kind: PartKindName;
+  name: string;
+  terminals: (variant: string | undefined) => readonly TerminalKind[];
+  values: Readonly<Record<string, ValueKind>>;
+  faults: readonly FaultKind[];
+  circuit: (part: PartContext) => Element[];
+}
