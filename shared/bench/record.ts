@@ -1,0 +1,71 @@
+import { z } from 'zod';
+import { leadRef, partRef } from '../oven/oven.ts';
+
+/** `C1.1`, `W12/a`, `BAT.pos`: all that a probe, a clip or a tip can touch. */
+export const target = z
+  .string()
+  .regex(/^([A-Z]{1,3}[0-9]{0,2}\.[A-Za-z0-9]{1,6}|W[0-9]{1,3}\/[ab])$/, 'a terminal or lead end');
+
+/** What the display showed. Judged once, kept for ever: later engines never rewrite it. */
+export const shownReading = z.strictObject({
+  red: target,
+  black: target,
+  setting: z.string().max(24),
+  /** as on the display: "94.8", "OL" */ display: z.string().max(12),
+  unit: z.string().max(4),
+  /** SI; null when over range */ value: z.number().nullable(),
+  isSettled: z.boolean(),
+  isBeeping: z.boolean(),
+  isRelative: z.boolean(),
+});
+export type ShownReading = z.infer<typeof shownReading>;
+
+export interface CapturedReading extends ShownReading {
+  benchMs: number;
+  /** lead ends that were lifted */ lifted: readonly string[];
+}
+
+export const verdict = z.enum(['good', 'faulty', 'not tested']);
+export type Verdict = z.infer<typeof verdict>;
+
+/** A cause the trainee states: a part or lead, and what is wrong with it. */
+export const cause = z.strictObject({
+  on: z.union([partRef, leadRef]),
+  fault: z.string().regex(/^[a-z0-9-]+$/),
+});
+export type Cause = z.infer<typeof cause>;
+
+export const hazardKind = z.enum([
+  'shock',
+  'mains-exposed',
+  'live-probing',
+  'capacitor-shorted',
+  'ohms-on-live',
+  'meter-destroyed',
+]);
+
+export const hazard = z.strictObject({
+  kind: hazardKind,
+  at: target.nullable(),
+  /** V between the thing touched and chassis */ volts: z.number(),
+  /** C */ charge: z.number(),
+  /** J */ energy: z.number(),
+});
+export type Hazard = z.infer<typeof hazard> & { benchMs: number };
+
+/** What one powered run did, as a person in front of the oven sees and hears it. */
+export const runOutcome = z.strictObject({
+  seconds: z.number(),
+  isDisplayLit: z.boolean(),
+  isLampLit: z.boolean(),
+  isFanTurning: z.boolean(),
+  isTurntableTurning: z.boolean(),
+  /** against a healthy oven of this definition */ hum: z.enum(['none', 'quiet', 'normal', 'loud']),
+  /** A rms at the plug */ current: z.number(),
+  /** W into the water */ microwavePower: z.number(),
+  /** K, of the water */ waterRise: z.number(),
+  /** fuses blown and cut-outs opened by the run */ opened: z.array(partRef),
+  /** V left on capacitors when power went, by element name */
+  charge: z.record(z.string(), z.number()),
+});
+export type RunOutcome = z.infer<typeof runOutcome>;
