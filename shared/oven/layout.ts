@@ -11,7 +11,12 @@ export const ovenLayout = z.strictObject({
   chassis: z.strictObject({ at: point, size: point }),
   parts: z.record(
     partRef,
-    z.strictObject({ at: point, size: point, angle: z.number().optional(), label: point.optional() }),
+    z.strictObject({
+      at: point,
+      size: point,
+      angle: z.number().optional(),
+      label: point.optional(),
+    }),
   ),
   terminals: z.record(terminalRef, z.strictObject({ at: point, label: point.optional() })),
   /** points a lead passes on its way from end a to end b, and where a lifted end hangs, relative to its terminal */

@@ -18,6 +18,7 @@ export interface OvenState {
   /** fuses blown and cut-outs open */ opened: readonly PartRef[];
   /** relays whose contact the control holds closed */ energised: readonly PartRef[];
   /** varnished spots cleaned to bare metal */ cleaned: readonly TerminalRef[];
+  /** magnetrons whose heater is hot enough to emit: in a powered run only */ hot?: readonly PartRef[];
 }
 
 /** Something of the bench connected between two targets: meter, discharge lead, battery, a hand. */

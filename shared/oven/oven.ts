@@ -46,9 +46,8 @@ export const ovenPart = z.strictObject({
   /** values that differ from the kind's own nominal, SI units */ values: z
     .record(z.string(), finite)
     .optional(),
-  /** the kind's variant: for a door switch which contacts it has, for a motor what it turns */ variant: z
-    .string()
-    .optional(),
+  /** the kind's variant: for a door switch which contacts it has, for a motor what it turns */ variant:
+    z.string().optional(),
   /** reached without taking the cover off */ isOutside: z.boolean().optional(),
 });
 
@@ -57,7 +56,17 @@ export const ovenLead = z.strictObject({
   name: z.string().min(1).max(60),
   ends: z.tuple([terminalRef, terminalRef]),
   /** Ohm, of the wire alone; each connector adds its contact */ resistance: finite.positive(),
-  insulation: z.enum(['black', 'white', 'blue', 'brown', 'red', 'green', 'yellow', 'grey', 'orange']),
+  insulation: z.enum([
+    'black',
+    'white',
+    'blue',
+    'brown',
+    'red',
+    'green',
+    'yellow',
+    'grey',
+    'orange',
+  ]),
   isHighVoltage: z.boolean().optional(),
 });
 
@@ -84,7 +93,11 @@ export const ovenDefinition = z.strictObject({
   model: z.string().min(1),
   type: z.enum(['countertop', 'over-the-range']),
   control: z.enum(['electronic', 'mechanical timer']),
-  supply: z.strictObject({ volts: finite.positive(), hertz: finite.positive(), amps: finite.positive() }),
+  supply: z.strictObject({
+    volts: finite.positive(),
+    hertz: finite.positive(),
+    amps: finite.positive(),
+  }),
   parts: z.array(ovenPart).min(1),
   leads: z.array(ovenLead).min(1),
   serviceData: z.array(serviceMeasurement),

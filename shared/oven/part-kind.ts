@@ -22,18 +22,24 @@ export interface PartContext {
   ref: string;
   variant: string | undefined;
   /** drawn values, before faults */ values: Readonly<Record<string, number>>;
+  /** one drawn value by name; asking for a value the kind does not declare is a bug and throws */
+  value: (name: string) => number;
   /** faults on this part only */ faults: readonly AppliedFault[];
   node: (terminal: string) => NodeName;
-  /** an element or inner node name unique to this part: `C1:bleeder` */ inner: (name: string) => string;
+  /** an element or inner node name unique to this part: `C1:bleeder` */ inner: (
+    name: string,
+  ) => string;
   isActuated: boolean;
   isOpened: boolean;
   isEnergised: boolean;
+  /** a magnetron whose heater has run long enough to emit; cold on the bench */ isHeaterHot: boolean;
 }
 
 /** One kind of part: its terminals, values, faults and circuit. One file each in `parts/`. */
 export interface PartKind {
   kind: PartKindName;
   name: string;
+  /** variants a definition may name; absent: the kind has none */ variants?: readonly string[];
   terminals: (variant: string | undefined) => readonly TerminalKind[];
   values: Readonly<Record<string, ValueKind>>;
   faults: readonly FaultKind[];

@@ -1,0 +1,36 @@
+import type { PartKindName } from '../oven.ts';
+import type { PartKind } from '../part-kind.ts';
+import { boardTransformer } from './board-transformer.ts';
+import { chassis } from './chassis.ts';
+import { controlBoard } from './control-board.ts';
+import { cutOut } from './cut-out.ts';
+import { doorSwitch } from './door-switch.ts';
+import { filterBoard } from './filter-board.ts';
+import { fuse } from './fuse.ts';
+import { hvCapacitor } from './hv-capacitor.ts';
+import { hvDiode } from './hv-diode.ts';
+import { hvTransformer } from './hv-transformer.ts';
+import { lamp } from './lamp.ts';
+import { magnetron } from './magnetron.ts';
+import { motor } from './motor.ts';
+import { plug } from './plug.ts';
+import { relay } from './relay.ts';
+
+/** Every kind of part: a new kind is one file and one line here. */
+export const partKinds: Readonly<Record<PartKindName, PartKind>> = {
+  plug,
+  chassis,
+  fuse,
+  'filter-board': filterBoard,
+  'cut-out': cutOut,
+  'door-switch': doorSwitch,
+  relay,
+  'board-transformer': boardTransformer,
+  'control-board': controlBoard,
+  lamp,
+  motor,
+  'hv-transformer': hvTransformer,
+  'hv-capacitor': hvCapacitor,
+  'hv-diode': hvDiode,
+  magnetron,
+};

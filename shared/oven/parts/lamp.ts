@@ -1,0 +1,59 @@
+/**
+ * Cavity lamp: a tungsten filament. R(cold) = 48 Ohm; alight about ten times that.
+ * Source: ENGINE section 3; ratio x10 from textbook problems in FACTS section 7.
+ */
+import type { FaultKind } from '../fault.ts';
+import type { PartKind } from '../part-kind.ts';
+import { readFaults } from '../pieces/read-faults.ts';
+import { BROKEN, FUSED, resistance } from '../pieces/resistance.ts';
+
+const faults: FaultKind[] = [
+  {
+    id: 'open',
+    name: 'filament open',
+    description: 'The filament is broken.',
+    weight: 8,
+    look: 'The filament hangs loose and the glass is grey inside.',
+  },
+  {
+    id: 'shorted',
+    name: 'holder shorted',
+    description: 'The contacts of the lamp holder touch.',
+    weight: 1,
+    look: 'The holder has melted on one side.',
+  },
+];
+
+export const lamp: PartKind = {
+  kind: 'lamp',
+  name: 'lamp',
+  terminals: () => [
+    { id: '1', name: 'supply side' },
+    { id: '2', name: 'neutral side' },
+  ],
+  values: {
+    cold: {
+      name: 'cold filament',
+      unit: 'Ω',
+      nominal: 48,
+      tolerance: 0.08,
+      source: 'ENGINE 3; hot V²/P divided by 10, FACTS 8',
+    },
+    hotRatio: {
+      name: 'hot to cold',
+      unit: '',
+      nominal: 10,
+      tolerance: 0.05,
+      source: 'FACTS 7, textbook problems',
+    },
+  },
+  faults,
+  circuit: ({ node, inner, value, faults: applied }) => {
+    const fault = readFaults(faults, applied);
+    const filament = fault.has('open') ? BROKEN : value('cold');
+    const elements = [resistance(inner('filament'), node('1'), node('2'), filament)];
+    if (fault.has('shorted'))
+      elements.push(resistance(inner('short'), node('1'), node('2'), FUSED));
+    return elements;
+  },
+};
