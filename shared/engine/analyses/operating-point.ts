@@ -1,0 +1,132 @@
+import type { Circuit, EngineFailure, OperatingPoint, Result } from '../circuit/circuit.ts';
+import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
+import { linearise } from '../devices/diode-law.ts';
+import { stampSwitch, switchOverdrive } from '../devices/switch.ts';
+import { restart } from '../linear/factors.ts';
+import { setGroundConductance } from '../stamping/system.ts';
+import { createMachine, singular, type EngineOptions, type Machine } from './machine.ts';
+import { newton, notConverged, type NewtonOutcome } from './newton.ts';
+import { readPoint } from './read-point.ts';
+import { setSources } from './set-sources.ts';
+import { stampAtRest } from './stamp-at-rest.ts';
+
+/**
+ * The circuit with nothing changing: capacitors open, inductors their series resistance, sources at
+ * their direct value. Voltages in V, currents in A of every element but couplings and current sources.
+ *
+ * Fails with bad-element, voltage-loop, floating-node (a current driven where there is no way back)
+ * or not-converged. A node with no path to ground is legal: 1e-12 S holds it.
+ */
+export function operatingPoint(
+  circuit: Circuit,
+  options: EngineOptions = {},
+): Result<OperatingPoint> {
+  const fault = voltageLoop(circuit, 'steady') ?? floatingNode(circuit, 'steady');
+  const made = createMachine(circuit, options);
+  if (!made.ok) return made;
+  if (fault !== undefined) return { ok: false, failure: fault };
+  const failure = solveAtRest(made.value, 'rest');
+  return failure === undefined
+    ? { ok: true, value: readPoint(made.value) }
+    : { ok: false, failure };
+}
+
+/** Solves from nothing, sources at rest or as at a time (s); leaves the solution in the machine. */
+export function solveAtRest(machine: Machine, time: number | 'rest'): EngineFailure | undefined {
+  forget(machine);
+  stampAtRest(machine.system, machine);
+  return solveWithSwitches(machine, time);
+}
+
+/** Back to a state that no earlier solution has touched. */
+export function forget(machine: Machine): void {
+  restart(machine.factors);
+  machine.system.x.fill(0);
+  for (const junction of machine.junctions) linearise(junction, 0);
+  for (const state of machine.switches) {
+    const element = machine.netlist.branches[state.branch]!;
+    state.isOn = element.kind === 'switch' && (element.isInitiallyOn ?? false);
+  }
+}
+
+const MOST_TURNS = 50;
+
+/** Solves from the present state, turning switches until each agrees with its control. */
+export function solveWithSwitches(
+  machine: Machine,
+  time: number | 'rest',
+): EngineFailure | undefined {
+  const { system, switches, netlist } = machine;
+  for (let turn = 0; turn < MOST_TURNS; turn += 1) {
+    const failure = solveRobustly(machine, time);
+    if (failure !== undefined) return failure;
+    const turning = switches.filter((state) => switchOverdrive(system, state) > 0);
+    if (turning.length === 0) return undefined;
+    for (const state of turning) {
+      state.isOn = !state.isOn;
+      stampSwitch(system, state);
+    }
+  }
+  const restless = switches.find((state) => switchOverdrive(system, state) > 0)!;
+  const node = netlist.nodeNames[restless.controlFrom] ?? '0';
+  const message = `${netlist.branches[restless.branch]!.name} has no state that its control agrees with`;
+  const residual = switchOverdrive(system, restless);
+  return { code: 'not-converged', node, iteration: MOST_TURNS, residual, message };
+}
+
+/** Newton's method, then conductance to ground taken off by decades, then sources put up by steps. */
+function solveRobustly(machine: Machine, time: number | 'rest'): EngineFailure | undefined {
+  setSources(machine.system, time);
+  let outcome = newton(machine);
+  if (outcome.isSolved) return undefined;
+  outcome = steppingConductance(machine);
+  if (outcome.isSolved) return undefined;
+  outcome = steppingSources(machine, time);
+  if (outcome.isSolved) return undefined;
+  return outcome.singularColumn >= 0
+    ? singular(machine.netlist, outcome.singularColumn)
+    : notConverged(machine, outcome.iterations);
+}
+
+function fromNothing(machine: Machine): void {
+  machine.system.x.fill(0);
+  for (const junction of machine.junctions) linearise(junction, 0);
+}
+
+function steppingConductance(machine: Machine): NewtonOutcome {
+  const { system, baseConductance } = machine;
+  fromNothing(machine);
+  let outcome: NewtonOutcome = { isSolved: false, iterations: 0, singularColumn: -1 };
+  for (let extra = 1e-2; extra > baseConductance; extra /= 10) {
+    setGroundConductance(system, baseConductance + extra);
+    outcome = newton(machine);
+    if (!outcome.isSolved) break;
+  }
+  setGroundConductance(system, baseConductance);
+  return outcome.isSolved ? newton(machine) : outcome;
+}
+
+function steppingSources(machine: Machine, time: number | 'rest'): NewtonOutcome {
+  const { system } = machine;
+  fromNothing(machine);
+  let outcome: NewtonOutcome = { isSolved: false, iterations: 0, singularColumn: -1 };
+  let reached = 0;
+  let stride = 0.1;
+  while (reached < 1 && stride > 1e-4) {
+    const next = Math.min(1, reached + stride);
+    const voltages = machine.junctions.map((junction) => junction.voltage);
+    const kept = system.x.slice();
+    setSources(system, time, next);
+    outcome = newton(machine);
+    if (outcome.isSolved) {
+      reached = next;
+      stride *= 2;
+    } else {
+      stride /= 4;
+      system.x.set(kept);
+      machine.junctions.forEach((junction, j) => linearise(junction, voltages[j]!));
+    }
+  }
+  setSources(system, time);
+  return outcome;
+}
