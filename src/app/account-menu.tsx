@@ -1,0 +1,67 @@
+import { Link, useNavigate } from 'react-router-dom';
+import type { SignedIn } from '../../shared/contracts/accounts.ts';
+import { Disclosure } from '../components/disclosure.tsx';
+import { menuItemClasses } from '../components/menu-item-classes.ts';
+import { useSignOut } from '../features/account/api/use-sign-out.ts';
+import { useWorkIn } from '../features/account/api/use-work-in.ts';
+import { homeOf, placesOf } from './navigation.ts';
+
+const Others = ({ signedIn }: { signedIn: SignedIn }) => {
+  const workIn = useWorkIn();
+  const navigate = useNavigate();
+  const others = signedIn.memberships.filter(
+    ({ organisation }) => organisation.id !== signedIn.organisation.id,
+  );
+  if (others.length === 0) return null;
+  return (
+    <div className="border-t border-line pt-1.5">
+      {others.map(({ organisation, role }) => (
+        <button
+          key={organisation.id}
+          type="button"
+          className={menuItemClasses}
+          onClick={() =>
+            workIn.mutate(organisation.id, {
+              onSuccess: (answer) => void navigate(homeOf(answer.signedIn.role)),
+            })
+          }
+        >
+          Work in {organisation.name} as {role}
+        </button>
+      ))}
+    </div>
+  );
+};
+
+/** Who is signed in and where; the pages as well, where the header has no room for them. */
+export const AccountMenu = ({ signedIn }: { signedIn: SignedIn }) => {
+  const signOut = useSignOut();
+  const navigate = useNavigate();
+  return (
+    <Disclosure label={signedIn.person.name}>
+      <p className="px-3 pt-1 pb-1.5 text-sm text-ink-2">
+        {signedIn.role} in {signedIn.organisation.name}
+      </p>
+      <div className="border-t border-line pt-1.5 md:hidden">
+        {placesOf[signedIn.role].map(({ to, name }) => (
+          <Link key={to} to={to} className={menuItemClasses}>
+            {name}
+          </Link>
+        ))}
+      </div>
+      <Others signedIn={signedIn} />
+      <div className="border-t border-line pt-1.5">
+        <Link to="/account" className={menuItemClasses}>
+          Account
+        </Link>
+        <button
+          type="button"
+          className={menuItemClasses}
+          onClick={() => signOut.mutate(undefined, { onSuccess: () => void navigate('/') })}
+        >
+          Sign out
+        </button>
+      </div>
+    </Disclosure>
+  );
+};
