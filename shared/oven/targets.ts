@@ -9,11 +9,6 @@ export interface Terminal {
   kind: TerminalKind;
 }
 
-export interface Target {
-  ref: TargetRef;
-  kind: 'terminal' | 'lead-end';
-}
-
 /** The clips of the bench battery. */
 export const batteryTargets = {
   'BAT.pos': 'battery, positive pole',
@@ -37,11 +32,12 @@ export function liftedEnds(state: OvenState): LeadEndRef[] {
     .map(([end]) => end);
 }
 
-/** All of the oven that a probe can touch now: terminals and lifted lead ends. */
-export function targetsOf(definition: OvenDefinition, state: OvenState): Target[] {
+/** All that a probe can touch now: terminals, lifted lead ends, the clips of the bench battery. */
+export function targetsOf(definition: OvenDefinition, state: OvenState): TargetRef[] {
   return [
-    ...terminalsOf(definition).map(({ ref }): Target => ({ ref, kind: 'terminal' })),
-    ...liftedEnds(state).map((ref): Target => ({ ref, kind: 'lead-end' })),
+    ...terminalsOf(definition).map(({ ref }) => ref),
+    ...liftedEnds(state),
+    ...Object.keys(batteryTargets),
   ];
 }
 
