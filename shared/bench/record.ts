@@ -47,6 +47,7 @@ export const hazardKind = z.enum([
 export const hazard = z.strictObject({
   kind: hazardKind,
   at: target.nullable(),
+  /** the other side of what was bridged */ to: target.nullable(),
   /** V between the thing touched and chassis */ volts: z.number(),
   /** C */ charge: z.number(),
   /** J */ energy: z.number(),

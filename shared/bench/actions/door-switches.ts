@@ -1,0 +1,44 @@
+import { z } from 'zod';
+import { partRef } from '../../oven/oven.ts';
+import { accept, action, refuse } from '../action.ts';
+import { insideRefusal } from '../reach.ts';
+
+const onPart = z.strictObject({ part: partRef });
+
+export const pressSwitch = action({
+  command: 'PressSwitch',
+  event: 'SwitchPressed',
+  input: onPart,
+  data: onPart,
+  decide: (bench, { part }) => {
+    const definition = bench.setup.oven.definition.parts.find((one) => one.ref === part);
+    if (definition?.kind !== 'door-switch') {
+      return refuse('no-actuator', `${part} has no actuator to press.`);
+    }
+    if (bench.state.oven.pressed.includes(part)) {
+      return refuse('pressed-already', `${part} is held pressed already.`);
+    }
+    return insideRefusal(bench) ?? accept({ part });
+  },
+  evolve: (state, { part }) => ({
+    ...state,
+    oven: { ...state.oven, pressed: [...state.oven.pressed, part] },
+  }),
+  describe: ({ part }) => `${part} actuator pressed by hand`,
+});
+
+export const releaseSwitch = action({
+  command: 'ReleaseSwitch',
+  event: 'SwitchReleased',
+  input: onPart,
+  data: onPart,
+  decide: ({ state }, { part }) =>
+    state.oven.pressed.includes(part)
+      ? accept({ part })
+      : refuse('not-pressed', `${part} is not held pressed.`),
+  evolve: (state, { part }) => ({
+    ...state,
+    oven: { ...state.oven, pressed: state.oven.pressed.filter((one) => one !== part) },
+  }),
+  describe: ({ part }) => `${part} actuator released`,
+});

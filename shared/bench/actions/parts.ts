@@ -1,0 +1,100 @@
+import { z } from 'zod';
+import { partRef, terminalRef } from '../../oven/oven.ts';
+import { terminalsOf } from '../../oven/targets.ts';
+import { accept, action, refuse } from '../action.ts';
+import type { Bench } from '../action.ts';
+import { touch } from '../hazards.ts';
+import { insideRefusal } from '../reach.ts';
+
+const onPart = z.strictObject({ part: partRef });
+const onTerminal = z.strictObject({ terminal: terminalRef });
+
+export const inspectPart = action({
+  command: 'InspectPart',
+  event: 'PartInspected',
+  input: onPart,
+  data: onPart,
+  decide: (bench, data) => {
+    const part = partOf(bench, data.part);
+    if (!part) return refuse('no-such-part', `There is no part ${data.part}.`);
+    return part.isOutside ? accept(data) : (insideRefusal(bench) ?? accept(data));
+  },
+  evolve: (state, { part }) => ({
+    ...state,
+    inspected: state.inspected.includes(part) ? state.inspected : [...state.inspected, part],
+  }),
+  describe: ({ part }) => `${part} inspected`,
+});
+
+export const cleanSpot = action({
+  command: 'CleanSpot',
+  event: 'SpotCleaned',
+  input: onTerminal,
+  data: onTerminal,
+  decide: (bench, data) => {
+    const { setup, state } = bench;
+    const terminal = terminalsOf(setup.oven.definition).find((one) => one.ref === data.terminal);
+    if (!terminal?.kind.isVarnished) {
+      return refuse('not-varnished', `${data.terminal} has no varnish to clean off.`);
+    }
+    if (state.oven.cleaned.includes(data.terminal)) {
+      return refuse('clean-already', `${data.terminal} is bare metal already.`);
+    }
+    return insideRefusal(bench) ?? accept(data);
+  },
+  evolve: (state, { terminal }) => ({
+    ...state,
+    oven: { ...state.oven, cleaned: [...state.oven.cleaned, terminal] },
+  }),
+  describe: ({ terminal }) => `${terminal} cleaned to bare metal`,
+});
+
+/** A new part of the same rating. Its connectors must be off first; a fuse only snaps into its holder. */
+export const replacePart = action({
+  command: 'ReplacePart',
+  event: 'PartReplaced',
+  input: onPart,
+  data: onPart,
+  decide: (bench, data) => {
+    const { setup, state } = bench;
+    const part = partOf(bench, data.part);
+    if (!part || part.kind === 'chassis') {
+      return refuse('no-such-part', `There is no spare for ${data.part}.`);
+    }
+    const inside = part.isOutside ? null : insideRefusal(bench);
+    if (inside) return inside;
+    if (state.isCordIn) return refuse('cord-is-in', 'The cord is in. Pull it first.');
+    const seated = Object.entries(state.oven.leadEnds).filter(
+      ([, seat]) => seat?.split('.')[0] === data.part,
+    );
+    if (part.kind !== 'fuse' && seated.length > 0) {
+      const ends = seated.map(([end]) => end).join(', ');
+      return refuse('leads-on', `Lift the leads of ${data.part} first: ${ends}.`);
+    }
+    const terminals = terminalsOf(setup.oven.definition)
+      .filter((one) => one.part === data.part && !one.kind.isVarnished)
+      .map((one) => one.ref);
+    return accept(data, touch(setup, state, terminals));
+  },
+  evolve: (state, { part }) => ({
+    ...state,
+    replaced: state.replaced.includes(part) ? state.replaced : [...state.replaced, part],
+    storage: {
+      voltages: withoutPart(state.storage.voltages, part),
+      currents: withoutPart(state.storage.currents, part),
+    },
+    oven: {
+      ...state.oven,
+      faults: state.oven.faults.filter((fault) => fault.on !== part),
+      opened: state.oven.opened.filter((one) => one !== part),
+      cleaned: state.oven.cleaned.filter((terminal) => terminal.split('.')[0] !== part),
+    },
+  }),
+  describe: ({ part }) => `${part} replaced`,
+});
+
+const partOf = (bench: Bench, ref: string) =>
+  bench.setup.oven.definition.parts.find((one) => one.ref === ref);
+
+const withoutPart = (held: Readonly<Record<string, number>>, part: string) =>
+  Object.fromEntries(Object.entries(held).filter(([name]) => name.split(':')[0] !== part));
