@@ -1,5 +1,5 @@
 import { badElement } from '../circuit/check.ts';
-import type { Circuit, EngineFailure, Result } from '../circuit/circuit.ts';
+import type { Circuit, Element, EngineFailure, Result } from '../circuit/circuit.ts';
 import { buildNetlist, type Netlist } from '../circuit/netlist.ts';
 import { mutualInductance } from '../devices/coupling.ts';
 import { createJunction } from '../devices/diode.ts';
@@ -28,6 +28,15 @@ export interface InductorValues extends Valued {
   resistance: number;
 }
 
+/** A source; `fixed` (V or A), once set, stands in for its wave in every analysis. */
+export interface SourceState {
+  readonly element: Source;
+  /** of a voltage source; -1 for a current source */ readonly branch: number;
+  fixed?: number;
+}
+
+export type Source = Extract<Element, { kind: 'voltage-source' | 'current-source' }>;
+
 /** A circuit made ready for solving: its system, the parts that move, and the factors. */
 export interface Machine {
   readonly circuit: Circuit;
@@ -35,6 +44,7 @@ export interface Machine {
   readonly system: System;
   readonly factors: Factors;
   readonly baseConductance: number;
+  readonly sources: readonly SourceState[];
   readonly resistors: readonly Valued[];
   readonly capacitors: readonly Valued[];
   readonly inductors: readonly InductorValues[];
@@ -75,12 +85,20 @@ export function singular(netlist: Netlist, column: number): EngineFailure {
 
 type Parts = Pick<
   Machine,
-  'resistors' | 'capacitors' | 'inductors' | 'mutuals' | 'junctions' | 'switches' | 'windings'
+  | 'sources'
+  | 'resistors'
+  | 'capacitors'
+  | 'inductors'
+  | 'mutuals'
+  | 'junctions'
+  | 'switches'
+  | 'windings'
 >;
 
 function collectParts(netlist: Netlist, options: EngineOptions): Parts {
   const thermal = options.thermalVoltage ?? thermalVoltage();
   const law = options.junctionLaw ?? 'shockley';
+  const sources: SourceState[] = netlist.currentSources.map((element) => ({ element, branch: -1 }));
   const resistors: Valued[] = [];
   const capacitors: Valued[] = [];
   const inductors: InductorValues[] = [];
@@ -114,6 +132,7 @@ function collectParts(netlist: Netlist, options: EngineOptions): Parts {
         break;
       }
       case 'voltage-source':
+        sources.push({ element, branch });
         break;
     }
   });
@@ -124,6 +143,7 @@ function collectParts(netlist: Netlist, options: EngineOptions): Parts {
     return mutualInductance(coefficient, first.value, second.value);
   });
   return {
+    sources,
     resistors,
     capacitors,
     inductors,

@@ -7,7 +7,7 @@ import { setGroundConductance } from '../stamping/system.ts';
 import { createMachine, singular, type EngineOptions, type Machine } from './machine.ts';
 import { newton, notConverged, type NewtonOutcome } from './newton.ts';
 import { readPoint } from './read-point.ts';
-import { setSources } from './set-sources.ts';
+import { setSources, type Moment } from './set-sources.ts';
 import { stampAtRest } from './stamp-at-rest.ts';
 
 /**
@@ -31,11 +31,11 @@ export function operatingPoint(
     : { ok: false, failure };
 }
 
-/** Solves from nothing, sources at rest or as at a time (s); leaves the solution in the machine. */
-export function solveAtRest(machine: Machine, time: number | 'rest'): EngineFailure | undefined {
+/** Solves from nothing, sources as at `moment`; leaves the solution in the machine. */
+export function solveAtRest(machine: Machine, moment: Moment): EngineFailure | undefined {
   forget(machine);
   stampAtRest(machine.system, machine);
-  return solveWithSwitches(machine, time);
+  return solveWithSwitches(machine, moment);
 }
 
 /** Back to a state that no earlier solution has touched. */
@@ -52,13 +52,10 @@ export function forget(machine: Machine): void {
 const MOST_TURNS = 50;
 
 /** Solves from the present state, turning switches until each agrees with its control. */
-export function solveWithSwitches(
-  machine: Machine,
-  time: number | 'rest',
-): EngineFailure | undefined {
+export function solveWithSwitches(machine: Machine, moment: Moment): EngineFailure | undefined {
   const { system, switches, netlist } = machine;
   for (let turn = 0; turn < MOST_TURNS; turn += 1) {
-    const failure = solveRobustly(machine, time);
+    const failure = solveRobustly(machine, moment);
     if (failure !== undefined) return failure;
     const turning = switches.filter((state) => switchOverdrive(system, state) > 0);
     if (turning.length === 0) return undefined;
@@ -75,13 +72,13 @@ export function solveWithSwitches(
 }
 
 /** Newton's method, then conductance to ground taken off by decades, then sources put up by steps. */
-function solveRobustly(machine: Machine, time: number | 'rest'): EngineFailure | undefined {
-  setSources(machine.system, time);
+function solveRobustly(machine: Machine, moment: Moment): EngineFailure | undefined {
+  setSources(machine, moment);
   let outcome = newton(machine);
   if (outcome.isSolved) return undefined;
   outcome = steppingConductance(machine);
   if (outcome.isSolved) return undefined;
-  outcome = steppingSources(machine, time);
+  outcome = steppingSources(machine, moment);
   if (outcome.isSolved) return undefined;
   return outcome.singularColumn >= 0
     ? singular(machine.netlist, outcome.singularColumn)
@@ -106,7 +103,7 @@ function steppingConductance(machine: Machine): NewtonOutcome {
   return outcome.isSolved ? newton(machine) : outcome;
 }
 
-function steppingSources(machine: Machine, time: number | 'rest'): NewtonOutcome {
+function steppingSources(machine: Machine, moment: Moment): NewtonOutcome {
   const { system } = machine;
   fromNothing(machine);
   let outcome: NewtonOutcome = { isSolved: false, iterations: 0, singularColumn: -1 };
@@ -116,7 +113,7 @@ function steppingSources(machine: Machine, time: number | 'rest'): NewtonOutcome
     const next = Math.min(1, reached + stride);
     const voltages = machine.junctions.map((junction) => junction.voltage);
     const kept = system.x.slice();
-    setSources(system, time, next);
+    setSources(machine, moment, next);
     outcome = newton(machine);
     if (outcome.isSolved) {
       reached = next;
@@ -127,6 +124,6 @@ function steppingSources(machine: Machine, time: number | 'rest'): NewtonOutcome
       machine.junctions.forEach((junction, j) => linearise(junction, voltages[j]!));
     }
   }
-  setSources(system, time);
+  setSources(machine, moment);
   return outcome;
 }

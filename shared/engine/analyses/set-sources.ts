@@ -1,27 +1,34 @@
-import { restingValue } from '../circuit/loops-and-islands.ts';
 import { waveValue } from '../circuit/wave-value.ts';
 import { addCurrentSource } from '../devices/current-source.ts';
-import type { System } from '../stamping/system.ts';
+import type { Machine, SourceState } from './machine.ts';
 
-/** Sets every source to its value at a time (s), times `factor`; 'rest' takes the direct value. */
+/**
+ * A moment to take the sources at: `rest` takes each source's own direct value, a number its wave
+ * at that time (s), from the side given where the wave jumps.
+ */
+export type Moment = number | 'rest';
+
+/** Sets every source to its value at a moment, times `factor`. */
 export function setSources(
-  system: System,
-  time: number | 'rest',
-  factor = 1,
+  machine: Machine,
+  moment: Moment,
+  factor: number = 1,
   side: -1 | 1 = 1,
 ): void {
-  const { netlist, rho, injected } = system;
-  const { branches, currentSources } = netlist;
-  for (let k = 0; k < branches.length; k += 1) {
-    const element = branches[k]!;
-    if (element.kind !== 'voltage-source') continue;
-    rho[k] =
-      factor * (time === 'rest' ? restingValue(element) : waveValue(element.wave, time, side));
+  const { system, sources } = machine;
+  system.injected.fill(0);
+  for (let at = 0; at < sources.length; at += 1) {
+    const source = sources[at]!;
+    const value = factor * valueAt(source, moment, side);
+    if (source.branch >= 0) system.rho[source.branch] = value;
+    else if (source.element.kind === 'current-source') {
+      addCurrentSource(system, source.element, value);
+    }
   }
-  if (currentSources.length === 0) return;
-  injected.fill(0);
-  for (const source of currentSources) {
-    const value = time === 'rest' ? restingValue(source) : waveValue(source.wave, time, side);
-    addCurrentSource(system, source, factor * value);
-  }
+}
+
+function valueAt({ element, fixed }: SourceState, moment: Moment, side: -1 | 1): number {
+  if (fixed !== undefined) return fixed;
+  if (moment !== 'rest') return waveValue(element.wave, moment, side);
+  return element.dc ?? waveValue(element.wave, 0);
 }

@@ -9,6 +9,7 @@ import { stampVoltageSource } from '../devices/voltage-source.ts';
 import type { System } from '../stamping/system.ts';
 
 interface Parts {
+  readonly sources: readonly { readonly branch: number }[];
   readonly resistors: readonly { readonly branch: number; readonly value: number }[];
   readonly capacitors: readonly { readonly branch: number }[];
   readonly inductors: readonly { readonly branch: number; readonly resistance: number }[];
@@ -29,12 +30,12 @@ export function stampAtRest(system: System, parts: Parts): void {
 /** Writes what is the same at rest and in motion: resistors, sources' rows, switches, junctions. */
 export function stampFixed(
   system: System,
-  parts: Pick<Parts, 'resistors' | 'switches' | 'junctions'>,
+  parts: Pick<Parts, 'sources' | 'resistors' | 'switches' | 'junctions'>,
 ): void {
   for (const { branch, value } of parts.resistors) stampResistor(system, branch, value);
   for (const state of parts.switches) stampSwitch(system, state);
   for (const junction of parts.junctions) stampDiode(system, junction);
-  system.netlist.branches.forEach((element, k) => {
-    if (element.kind === 'voltage-source') stampVoltageSource(system, k, system.rho[k]!);
-  });
+  for (const { branch } of parts.sources) {
+    if (branch >= 0) stampVoltageSource(system, branch, system.rho[branch]!);
+  }
 }

@@ -142,7 +142,7 @@ function badCoupling(
 /** Unit diagonal and k off it: semidefinite exactly when the inductance matrix is. */
 function coefficientMatrix(couplings: readonly Coupling[]): number[][] {
   const names = [...new Set(couplings.flatMap((coupling) => coupling.inductors))];
-  const matrix = names.map((row) => names.map((column) => (row === column ? 1 : 0)));
+  const matrix: number[][] = names.map((row) => names.map((column) => Number(row === column)));
   for (const { inductors, coefficient } of couplings) {
     const first = names.indexOf(inductors[0]);
     const second = names.indexOf(inductors[1]);

@@ -1,6 +1,5 @@
 import { nodeSets } from './node-sets.ts';
 import type { Circuit, Element, EngineFailure } from './circuit.ts';
-import { waveValue } from './wave-value.ts';
 
 /** What a capacitor and an inductor are to direct current, or to a step in time. */
 export type Regime = 'steady' | 'moving';
@@ -55,11 +54,4 @@ export function floatingNode(circuit: Circuit, regime: Regime): EngineFailure | 
 
 function isIdle(source: Extract<Element, { kind: 'current-source' }>): boolean {
   return source.wave.shape === 'dc' && source.wave.value === 0 && !source.dc;
-}
-
-/** V or A of a source with everything at rest: its own direct value, or its wave's at t = 0. */
-export function restingValue(
-  source: Extract<Element, { kind: 'voltage-source' | 'current-source' }>,
-): number {
-  return source.dc ?? waveValue(source.wave, 0);
 }
