@@ -2,9 +2,10 @@ import type { z } from 'zod';
 import type { AnyEndpoint } from '../../shared/contracts/endpoint.ts';
 import { problemFrom, unreachable, unreadable } from './problem.ts';
 
-type Part<K extends string, S extends z.ZodType> = Record<string, never> extends z.input<S>
-  ? { [key in K]?: z.input<S> }
-  : { [key in K]: z.input<S> };
+type Part<K extends string, S extends z.ZodType> =
+  Record<string, never> extends z.input<S>
+    ? { [key in K]?: z.input<S> }
+    : { [key in K]: z.input<S> };
 
 /** What a call must be given; a part that the contract leaves empty may be left out. */
 export type CallInput<E extends AnyEndpoint> = Part<'params', E['params']> &

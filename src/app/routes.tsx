@@ -24,6 +24,9 @@ const instructor: RouteObject[] = [
   { path: 'scenarios', lazy: () => import('../features/scenarios/scenarios-page.tsx') },
   { path: 'scenarios/new', lazy: () => import('../features/scenarios/new-scenario-page.tsx') },
   { path: 'scenarios/:scenario', lazy: () => import('../features/scenarios/scenario-page.tsx') },
+];
+
+const reviewer: RouteObject[] = [
   { path: 'review', lazy: () => import('../features/review/review-page.tsx') },
 ];
 
@@ -43,6 +46,7 @@ export const routes: RouteObject[] = [
         children: everyRole,
       },
       { element: <RoleGate roles={['instructor']} />, children: instructor },
+      { element: <RoleGate roles={['instructor', 'administrator']} />, children: reviewer },
       { element: <RoleGate roles={['administrator']} />, children: administrator },
       { path: '*', element: <NotFoundPage /> },
     ],

@@ -29,11 +29,7 @@ export const ConfirmDialog = (props: Props) => {
           </AlertDialog.Description>
           <div className="flex flex-wrap justify-end gap-3">
             <Button onClick={onCancel}>{cancel}</Button>
-            <Button
-              look={isDangerous ? 'danger' : 'main'}
-              busy={busy ?? false}
-              onClick={onConfirm}
-            >
+            <Button look={isDangerous ? 'danger' : 'main'} busy={busy ?? false} onClick={onConfirm}>
               {confirm}
             </Button>
           </div>

@@ -12,7 +12,10 @@ interface Props {
 
 /** The job ticket: a yellow workshop tag with an eyelet. It is the same in both themes, as paper is. */
 export const JobTag = ({ complaint, rows }: Props) => (
-  <section aria-label="Job ticket" className="tag-paper relative bg-tag px-4 pt-11 pb-4 text-tag-ink">
+  <section
+    aria-label="Job ticket"
+    className="tag-paper relative bg-tag px-4 pt-11 pb-4 text-tag-ink"
+  >
     <span
       aria-hidden
       className="absolute top-3 left-1/2 size-6 -translate-x-1/2 rounded-full border-4 border-eyelet bg-paper"

@@ -27,7 +27,11 @@ export const Component = () => {
   );
   return (
     <Page title="Sign in" isNarrow>
-      <form noValidate onSubmit={(event) => void submit(event)} className="grid max-w-[420px] gap-4">
+      <form
+        noValidate
+        onSubmit={(event) => void submit(event)}
+        className="grid max-w-[420px] gap-4"
+      >
         <TextField
           label="E-mail"
           type="email"

@@ -30,7 +30,11 @@ export const Component = () => {
       lead="If you worked a practice job in this browser, it comes with you."
       isNarrow
     >
-      <form noValidate onSubmit={(event) => void submit(event)} className="grid max-w-[420px] gap-4">
+      <form
+        noValidate
+        onSubmit={(event) => void submit(event)}
+        className="grid max-w-[420px] gap-4"
+      >
         <TextField
           label="Name"
           hint="As your instructor knows you."

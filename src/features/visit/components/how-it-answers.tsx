@@ -10,8 +10,8 @@ export const HowItAnswers = () => (
       connected and your cover on or off. Two trainees never measure the same ohms.
     </p>
     <p>
-      The bench cannot teach your hands: the feel of a tight connector, the smell of a burnt winding,
-      the weight of a transformer. It is for practice before a real oven and beside one.
+      The bench cannot teach your hands: the feel of a tight connector, the smell of a burnt
+      winding, the weight of a transformer. It is for practice before a real oven and beside one.
     </p>
   </section>
 );

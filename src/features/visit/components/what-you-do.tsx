@@ -2,7 +2,10 @@ const steps = [
   ['Make safe', 'Cord out, cover off, capacitor discharged through a resistor and proved dead.'],
   ['Look', 'Burnt tabs, a swollen can, carbon, a lead off, a fuse of the wrong rating.'],
   ['Isolate', 'Lift the leads of the part under test, or its neighbours answer for it.'],
-  ['Measure', 'Pick a function and range, put the probes on two terminals, let the reading settle.'],
+  [
+    'Measure',
+    'Pick a function and range, put the probes on two terminals, let the reading settle.',
+  ],
   ['Reason', 'What still fits all the readings? A blown fuse is a result: what blew it?'],
   ['Repair and verify', 'Replace the part, refit every lead, cover on, water test.'],
   ['Hand in', 'Cause, evidence and report go on the job sheet. The debrief marks six skills.'],

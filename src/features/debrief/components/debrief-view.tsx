@@ -1,0 +1,48 @@
+import { useQuery } from '@tanstack/react-query';
+import type { Attempt } from '../../../../shared/contracts/attempts.ts';
+import { Failed } from '../../../components/failed.tsx';
+import { Loading } from '../../../components/loading.tsx';
+import { useOven } from '../../ovens/api/use-oven.ts';
+import { debriefQuery } from '../api/debrief-query.ts';
+import { useEvents } from '../api/use-events.ts';
+import { useMoment } from '../hooks/use-moment.ts';
+import { Outcome } from './outcome.tsx';
+import { ReadingsTable } from './readings-table.tsx';
+import { Skills } from './skills.tsx';
+import { Timeline } from './timeline.tsx';
+import { TrueFaults } from './true-faults.tsx';
+
+/** The debrief of an attempt that was handed in. */
+export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
+  const debrief = useQuery(debriefQuery(attempt.id));
+  const events = useEvents(attempt.id);
+  const oven = useOven(attempt.content.oven);
+  const [moment, goTo] = useMoment();
+  if (debrief.isPending) return <Loading what="the debrief" />;
+  if (debrief.isError)
+    return (
+      <Failed what="The debrief" problem={debrief.error} retry={() => void debrief.refetch()} />
+    );
+  const marks = debrief.data.skills.flatMap((skill) => skill.marks);
+  return (
+    <>
+      <Outcome debrief={debrief.data} />
+      <Skills skills={debrief.data.skills} moment={moment} goTo={goTo} />
+      <TrueFaults faults={debrief.data.faults} definition={oven.data?.definition} />
+      {events.isPending ? (
+        <Loading what="the timeline" />
+      ) : events.isError ? (
+        <Failed what="The timeline" problem={events.error} retry={() => void events.refetch()} />
+      ) : (
+        <>
+          <Timeline events={events.data} marks={marks} moment={moment} goTo={goTo} />
+          <ReadingsTable
+            events={events.data}
+            serviceData={oven.data?.definition.serviceData ?? []}
+            goTo={goTo}
+          />
+        </>
+      )}
+    </>
+  );
+};
