@@ -36,8 +36,11 @@ export function newton(
   for (;;) {
     iterations += 1;
     for (let j = 0; j < junctions.length; j += 1) stampDiode(system, junctions[j]!);
-    const singularColumn = factor(factors, system.values);
-    if (singularColumn >= 0) return { isSolved: false, iterations, singularColumn };
+    if (system.isStale) {
+      const singularColumn = factor(factors, system.values);
+      if (singularColumn >= 0) return { isSolved: false, iterations, singularColumn };
+      system.isStale = false;
+    }
     computeResidual(system);
     advanceSolution(machine);
     const moved = moveJunctions(machine);

@@ -41,8 +41,8 @@ export function solveAtRest(machine: Machine, moment: Moment): EngineFailure | u
 /** Back to a state that no earlier solution has touched. */
 export function forget(machine: Machine): void {
   restart(machine.factors);
-  machine.system.x.fill(0);
-  for (const junction of machine.junctions) linearise(junction, 0);
+  machine.system.isStale = true;
+  fromNothing(machine);
   for (const state of machine.switches) {
     const element = machine.netlist.branches[state.branch]!;
     state.isOn = element.kind === 'switch' && (element.isInitiallyOn ?? false);

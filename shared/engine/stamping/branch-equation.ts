@@ -39,7 +39,9 @@ export function setConductiveBranch(
 
 /** The coefficients alone; the right-hand side is left as it is. */
 export function setBranch(system: System, k: number, alpha: number, beta: number): void {
+  if (system.alpha[k] === alpha && system.beta[k] === beta) return;
   const { values } = system;
+  system.isStale = true;
   system.alpha[k] = alpha;
   system.beta[k] = beta;
   values[system.fromSlot[k]!] = alpha;
@@ -49,6 +51,8 @@ export function setBranch(system: System, k: number, alpha: number, beta: number
 
 /** mu of coupling c in its first (side 0) or second (side 1) inductor's row, already scaled. */
 export function setMutual(system: System, c: number, side: 0 | 1, mu: number): void {
+  if (system.mu[2 * c + side] === mu) return;
+  system.isStale = true;
   system.mu[2 * c + side] = mu;
   system.values[system.mutualSlot[2 * c + side]!] = -mu;
 }

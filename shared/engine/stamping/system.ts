@@ -33,6 +33,7 @@ export interface System {
   readonly rho: Float64Array;
   /** current sources into each node, scaled */ readonly injected: Float64Array;
   /** conductance of every node to ground, S */ groundConductance: number;
+  /** a coefficient changed since the matrix was last factored */ isStale: boolean;
   /** unknowns; index `size` is ground */ readonly x: Float64Array;
   readonly residual: Float64Array;
   readonly step: Float64Array;
@@ -89,6 +90,7 @@ export function createSystem(netlist: Netlist, groundConductance: number): Syste
     mutualSlot: slotsOf(mutual),
     ...vectors(netlist),
     groundConductance,
+    isStale: true,
   };
   setGroundConductance(system, groundConductance);
   return system;
@@ -111,6 +113,7 @@ function vectors(netlist: Netlist) {
 /** Puts `conductance` (S) from every node to ground. */
 export function setGroundConductance(system: System, conductance: number): void {
   system.groundConductance = conductance;
+  system.isStale = true;
   const { values, nodeSlot } = system;
   for (let at = 0; at < nodeSlot.length; at += 1) values[nodeSlot[at]!] = conductance * REFERENCE;
 }

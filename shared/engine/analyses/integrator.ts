@@ -1,0 +1,213 @@
+import type { EngineFailure } from '../circuit/circuit.ts';
+import { capacitorRate, setCapacitorHistory } from '../devices/capacitor.ts';
+import { linearise } from '../devices/diode-law.ts';
+import { inductorRate, setInductorHistory } from '../devices/inductor.ts';
+import type { Tableau } from '../integration/tableau.ts';
+import { solveFactored } from '../linear/factors.ts';
+import { REFERENCE } from '../stamping/system.ts';
+import type { Machine } from './machine.ts';
+import { newton } from './newton.ts';
+import { solveWithSwitches } from './operating-point.ts';
+import { setSources } from './set-sources.ts';
+import { stampFixed } from './stamp-at-rest.ts';
+import { stampStage } from './stamp-stage.ts';
+
+/**
+ * A circuit in motion. The state is the voltage of each capacitor, then the flux of each inductor
+ * (V, V s), in the machine's order; a step solves the stages of the tableau one after another.
+ */
+export interface Integrator {
+  readonly machine: Machine;
+  readonly tableau: Tableau;
+  readonly state: Float64Array;
+  readonly nextState: Float64Array;
+  /** dy/dt by stage; the first is that of the state itself */ readonly rates: Float64Array[];
+  /** the solution at the start of the step, to fall back to */ readonly startX: Float64Array;
+  readonly startJunctions: Float64Array;
+  /** A of each inductor at the start of the step */ readonly startCurrents: Float64Array;
+  readonly history: Float64Array;
+  /** called after each stage but the first, with its number, while its solution stands */
+  onStage?: (stage: number) => void;
+}
+
+/**
+ * s. The stage that finds the moment after a break: long enough to be exact in doubles, far shorter
+ * than anything a circuit of picofarads behind milliohms does. What it moves is the charge of
+ * capacitors joined without resistance.
+ */
+export const INSTANT = 1e-15;
+
+/** Junctions within a stage: half its square is the current's relative error. */
+const STAGE_TOLERANCE = 1e-4;
+const STAGE_ITERATIONS = 40;
+
+export function createIntegrator(machine: Machine, tableau: Tableau): Integrator {
+  const count = machine.capacitors.length + machine.inductors.length;
+  return {
+    machine,
+    tableau,
+    state: new Float64Array(count),
+    nextState: new Float64Array(count),
+    rates: Array.from({ length: tableau.stages }, () => new Float64Array(count)),
+    startX: machine.system.x.slice(),
+    startJunctions: new Float64Array(machine.junctions.length),
+    startCurrents: new Float64Array(machine.inductors.length),
+    history: new Float64Array(count),
+  };
+}
+
+/** Finds the moment just after `time`: switches agree, rates are known, nothing else has moved. */
+export function settle(integrator: Integrator, time: number): EngineFailure | undefined {
+  const { machine, state, history, rates } = integrator;
+  stampFixed(machine.system, machine);
+  stampStage(machine.system, machine, INSTANT);
+  history.set(state);
+  setHistory(integrator, INSTANT);
+  const failure = solveWithSwitches(machine, time);
+  if (failure !== undefined) return failure;
+  readRates(integrator, rates[0]!, INSTANT);
+  for (let j = 0; j < state.length; j += 1) state[j]! += INSTANT * rates[0]![j]!;
+  keepStart(integrator);
+  return undefined;
+}
+
+/** Tries a step of `length` s; false when a stage has no solution. Leaves the end's solution in the machine. */
+export function tryStep(integrator: Integrator, time: number, length: number): boolean {
+  const { machine, tableau, state, nextState, history, rates } = integrator;
+  const { stages, gamma, a, c } = tableau;
+  stampStage(machine.system, machine, length * gamma);
+  for (let stage = 1; stage < stages; stage += 1) {
+    history.set(state);
+    const weights = a[stage]!;
+    for (let earlier = 0; earlier < stage; earlier += 1) {
+      const weight = length * weights[earlier]!;
+      const rate = rates[earlier]!;
+      for (let j = 0; j < history.length; j += 1) history[j]! += weight * rate[j]!;
+    }
+    setHistory(integrator, length * gamma);
+    setSources(machine, time + c[stage]! * length, 1, -1);
+    if (!newton(machine, STAGE_TOLERANCE, STAGE_ITERATIONS).isSolved) return false;
+    readRates(integrator, rates[stage]!, length * gamma);
+    integrator.onStage?.(stage);
+  }
+  const last = rates[stages - 1]!;
+  for (let j = 0; j < state.length; j += 1) {
+    nextState[j] = history[j]! + length * gamma * last[j]!;
+  }
+  return true;
+}
+
+/** Makes the end of the step just tried the start of the next. */
+export function acceptStep(integrator: Integrator): void {
+  const { state, nextState, rates, tableau } = integrator;
+  state.set(nextState);
+  rates[0]!.set(rates[tableau.stages - 1]!);
+  keepStart(integrator);
+}
+
+/** Goes back to the start of the step just tried. */
+export function refuseStep({ machine, startX, startJunctions }: Integrator): void {
+  machine.system.x.set(startX);
+  for (let j = 0; j < startJunctions.length; j += 1) {
+    linearise(machine.junctions[j]!, startJunctions[j]!);
+  }
+}
+
+function keepStart({ machine, startX, startJunctions, startCurrents }: Integrator): void {
+  startX.set(machine.system.x);
+  for (let j = 0; j < startJunctions.length; j += 1) {
+    startJunctions[j] = machine.junctions[j]!.voltage;
+  }
+  for (let j = 0; j < startCurrents.length; j += 1) startCurrents[j] = inductorCurrent(machine, j);
+}
+
+/** A through an inductor in the machine's present solution. */
+export function inductorCurrent({ system, netlist, inductors }: Machine, j: number): number {
+  return system.x[netlist.nodeCount + inductors[j]!.branch]! / REFERENCE;
+}
+
+function setHistory({ machine, history }: Integrator, length: number): void {
+  const { system, capacitors, inductors } = machine;
+  for (let j = 0; j < capacitors.length; j += 1) {
+    setCapacitorHistory(system, capacitors[j]!.branch, history[j]!);
+  }
+  for (let j = 0; j < inductors.length; j += 1) {
+    const flux = history[capacitors.length + j]!;
+    setInductorHistory(system, inductors[j]!.branch, flux, length);
+  }
+}
+
+function readRates(integrator: Integrator, rate: Float64Array, length: number): void {
+  const { machine, history } = integrator;
+  const { system, netlist, capacitors, inductors, mutuals, windings } = machine;
+  const base = capacitors.length;
+  for (let j = 0; j < base; j += 1) {
+    rate[j] = capacitorRate(system, capacitors[j]!.branch, capacitors[j]!.value);
+  }
+  for (let j = 0; j < inductors.length; j += 1) {
+    rate[base + j] = inductors[j]!.value * inductorCurrent(machine, j);
+  }
+  for (let c = 0; c < mutuals.length; c += 1) {
+    const first = windings[2 * c]!;
+    const second = windings[2 * c + 1]!;
+    rate[base + first]! += mutuals[c]! * inductorCurrent(machine, second);
+    rate[base + second]! += mutuals[c]! * inductorCurrent(machine, first);
+  }
+  // d(flux)/dt two ways: by the flux where that is well known, by the voltages where the stage is
+  // so short that the flux has no digits left for its change
+  for (let j = 0; j < inductors.length; j += 1) {
+    const { branch, resistance } = inductors[j]!;
+    const flux = rate[base + j]!;
+    const a = system.x[netlist.from[branch]!]!;
+    const b = system.x[netlist.to[branch]!]!;
+    const isFluxSure = Math.abs(flux) < length * (Math.abs(a) + Math.abs(b));
+    rate[base + j] = isFluxSure
+      ? (flux - history[base + j]!) / length
+      : inductorRate(system, branch, resistance);
+  }
+}
+
+/**
+ * The largest estimated error of the step just tried, as a share of what is allowed. The estimate
+ * e = h sum (b - bHat) k is taken through (1 - h gamma J)^-1, one more solve with the stages' own
+ * factors, so that a stiff part that has settled does not hold the step down.
+ * Source: L. F. Shampine, in Hosea and Shampine (1996), as TR-BDF2's estimate.
+ */
+export function stepError(integrator: Integrator, length: number, relative: number): number {
+  const { machine, tableau, rates, history, state, nextState, startCurrents } = integrator;
+  const { system, netlist, factors, capacitors, inductors } = machine;
+  const { residual, step, alpha } = system;
+  history.fill(0);
+  for (let stage = 0; stage < tableau.stages; stage += 1) {
+    const weight = length * tableau.errorWeights[stage]!;
+    for (let j = 0; j < history.length; j += 1) history[j]! += weight * rates[stage]![j]!;
+  }
+  residual.fill(0);
+  capacitors.forEach(({ branch }, j) => {
+    residual[netlist.nodeCount + branch] = alpha[branch]! * history[j]!;
+  });
+  inductors.forEach(({ branch }, j) => {
+    const flux = history[capacitors.length + j]!;
+    residual[netlist.nodeCount + branch] = (-alpha[branch]! * flux) / (length * tableau.gamma);
+  });
+  solveFactored(factors, residual, step);
+  step[netlist.size] = 0;
+  let worst = 0;
+  for (let j = 0; j < capacitors.length; j += 1) {
+    const { branch } = capacitors[j]!;
+    const error = Math.abs(step[netlist.from[branch]!]! - step[netlist.to[branch]!]!);
+    const size = Math.max(Math.abs(state[j]!), Math.abs(nextState[j]!));
+    worst = Math.max(worst, error / (ABSOLUTE_VOLTS + relative * size));
+  }
+  for (let j = 0; j < inductors.length; j += 1) {
+    const error = Math.abs(step[netlist.nodeCount + inductors[j]!.branch]!) / REFERENCE;
+    const size = Math.max(Math.abs(startCurrents[j]!), Math.abs(inductorCurrent(machine, j)));
+    worst = Math.max(worst, error / (ABSOLUTE_AMPERES + relative * size));
+  }
+  return Number.isNaN(worst) ? Infinity : worst;
+}
+
+/** A thousandth of the last digit of the lowest direct-voltage range of a 2000-count meter. */
+export const ABSOLUTE_VOLTS = 1e-7;
+/** What puts that voltage across 100 kOhm. */
+export const ABSOLUTE_AMPERES = 1e-12;

@@ -1,0 +1,191 @@
+import type { EngineFailure } from '../circuit/circuit.ts';
+import { waveCorners, waveStepLimit } from '../circuit/wave-value.ts';
+import { switchOverdrive } from '../devices/switch.ts';
+import { fitStep, nextStep } from '../integration/step-control.ts';
+import {
+  ABSOLUTE_AMPERES,
+  ABSOLUTE_VOLTS,
+  INSTANT,
+  acceptStep,
+  refuseStep,
+  settle,
+  stepError,
+  tryStep,
+  type Integrator,
+} from './integrator.ts';
+import type { Machine } from './machine.ts';
+import { notConverged } from './newton.ts';
+
+/** Where to go and how carefully. Times in s, on the sources' clock. */
+export interface Plan {
+  readonly from: number;
+  readonly to: number;
+  /** moments at which something jumps that the sources do not know of */
+  readonly breaks: readonly number[];
+  /** every multiple of this is landed on; 0 for none */ readonly grid: number;
+  readonly maxStep: number;
+  /** of each capacitor's voltage and inductor's current, in one step */
+  readonly relativeTolerance: number;
+}
+
+/** Who watches: the machine holds the solution of the moment spoken of. */
+export interface Watch {
+  /** the moment just after a break or the start */ onMoment?(time: number): void;
+  /** a step has ended `offset` s after the break at `base`, and was `length` long */
+  onStep?(base: number, offset: number, length: number): void;
+}
+
+interface Segment {
+  base: number;
+  length: number;
+}
+
+const MOST_STEPS = 3_000_000;
+/** Turns of switches without the clock moving. */
+const MOST_TURNS = 200;
+
+/**
+ * Integrates from break to break. Within a segment time counts from the break, so that a nanosecond
+ * after bench time 1000 s is still a nanosecond. Step control sees nothing but the plan and the state.
+ */
+export function march(integrator: Integrator, plan: Plan, watch: Watch): EngineFailure | undefined {
+  const ends = segmentEnds(integrator.machine, plan);
+  const budget = { steps: MOST_STEPS };
+  let base = plan.from;
+  let turns = 0;
+  for (let at = 0; at < ends.length;) {
+    const failure = settle(integrator, base);
+    if (failure !== undefined) return failure;
+    watch.onMoment?.(base);
+    const segment = { base, length: ends[at]! - base };
+    const reached = marchSegment(integrator, plan, segment, watch, budget);
+    if (typeof reached === 'object') return reached;
+    if (reached >= segment.length) {
+      at += 1;
+      base = segment.base + segment.length;
+      turns = 0;
+      continue;
+    }
+    turns = reached > 0 && base + reached > base ? 0 : turns + 1;
+    base += reached;
+    if (turns > MOST_TURNS) return notConverged(integrator.machine, turns, base);
+  }
+  return undefined;
+}
+
+function segmentEnds({ sources }: Machine, plan: Plan): number[] {
+  const { from, to } = plan;
+  const inside = plan.breaks.filter((time) => time > from && time < to);
+  for (const { element, fixed } of sources) {
+    if (fixed === undefined) inside.push(...waveCorners(element.wave, from, to));
+  }
+  inside.sort((p, q) => p - q);
+  const ends: number[] = [];
+  let last = from;
+  for (const time of [...inside, to]) {
+    // corners that rounding alone keeps apart are one
+    if (time - last <= 1e-12 * Math.abs(time)) {
+      if (ends.length > 0) ends[ends.length - 1] = last = time;
+      continue;
+    }
+    ends.push(time);
+    last = time;
+  }
+  return ends;
+}
+
+/** Offset reached: the segment's length, or less when a switch must turn there. */
+function marchSegment(
+  integrator: Integrator,
+  plan: Plan,
+  segment: Segment,
+  watch: Watch,
+  budget: { steps: number },
+): number | EngineFailure {
+  const { machine, tableau } = integrator;
+  const longest = longestStep(machine, plan);
+  let offset = 0;
+  let wanted = Math.min(longest, firstStep(integrator));
+  let overdrive = overdrives(machine);
+  while (offset < segment.length) {
+    const length = fitStep(wanted, landing(plan, segment, offset) - offset);
+    const shortest = Math.max(INSTANT, 4 * Number.EPSILON * offset);
+    budget.steps -= 1;
+    const isSolved = tryStep(integrator, segment.base + offset, length);
+    if (!isSolved) {
+      if (length <= shortest || budget.steps < 0) {
+        return notConverged(machine, MOST_STEPS - budget.steps, segment.base + offset);
+      }
+      refuseStep(integrator);
+      wanted = length / 8;
+      continue;
+    }
+    const error = stepError(integrator, length, plan.relativeTolerance);
+    if (error > 1 && length > shortest) {
+      refuseStep(integrator);
+      wanted = nextStep(length, error, tableau.errorPower);
+      continue;
+    }
+    const after = overdrives(machine);
+    const turn = turningAt(overdrive, after);
+    if (turn < 1 - TURN_PRECISION && length * turn > shortest) {
+      refuseStep(integrator);
+      wanted = length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2));
+      continue;
+    }
+    acceptStep(integrator);
+    const left = segment.length - offset - length;
+    offset = left <= shortest ? segment.length : offset + length;
+    watch.onStep?.(segment.base, offset, length);
+    if (turn <= 1) return offset;
+    overdrive = after;
+    wanted = Math.min(
+      longest,
+      nextStep(Math.max(length, Math.min(wanted, length * 2)), error, tableau.errorPower),
+    );
+  }
+  return segment.length;
+}
+
+/** A switch turns within this share of the step in which its control crosses. */
+const TURN_PRECISION = 1e-4;
+
+const overdrives = ({ system, switches }: Machine): number[] =>
+  switches.map((state) => switchOverdrive(system, state));
+
+/** Share of the step at which the first control crosses; Infinity when none does. */
+function turningAt(before: readonly number[], after: readonly number[]): number {
+  let first = Infinity;
+  after.forEach((late, at) => {
+    const early = Math.min(0, before[at]!);
+    if (late > 0) first = Math.min(first, early / (early - late));
+  });
+  return first;
+}
+
+function landing(plan: Plan, segment: Segment, offset: number): number {
+  if (plan.grid <= 0) return segment.length;
+  const next = Math.floor((segment.base + offset) / plan.grid + 1 + 1e-6) * plan.grid;
+  return Math.min(segment.length, next - segment.base);
+}
+
+function longestStep({ sources }: Machine, plan: Plan): number {
+  let longest = plan.maxStep;
+  for (const { element, fixed } of sources) {
+    if (fixed === undefined) longest = Math.min(longest, waveStepLimit(element.wave));
+  }
+  return longest;
+}
+
+/** A step in which no state moves by more than a twentieth of itself, at the rates of the start. */
+function firstStep({ machine, state, rates }: Integrator): number {
+  const { capacitors, inductors } = machine;
+  let length = Infinity;
+  state.forEach((value, j) => {
+    const inductor = inductors[j - capacitors.length];
+    const least = inductor === undefined ? ABSOLUTE_VOLTS : ABSOLUTE_AMPERES * inductor.value;
+    const rate = Math.abs(rates[0]![j]!);
+    if (rate > 0) length = Math.min(length, (0.05 * (Math.abs(value) + 1e6 * least)) / rate);
+  });
+  return Math.max(10 * INSTANT, length);
+}
