@@ -55,7 +55,7 @@ function partElements(part: OvenPart, oven: DrawnOven, state: OvenState): Elemen
     isActuated: state.isDoorClosed || state.pressed.includes(part.ref),
     isOpened: state.opened.includes(part.ref),
     isEnergised: state.energised.includes(part.ref),
-    isHeaterHot: state.hot?.includes(part.ref) ?? false,
+    isHot: state.hot?.includes(part.ref) ?? false,
   });
 }
 

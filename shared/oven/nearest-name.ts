@@ -12,13 +12,22 @@ function distance(from: string, to: string): number {
   return row[to.length] ?? 0;
 }
 
-/** The known name most like a misspelt one; null when none is near. */
+function sharedStart(one: string, other: string): number {
+  let length = 0;
+  while (length < one.length && one[length] === other[length]) length += 1;
+  return length;
+}
+
+/** The known name most like a misspelt one, among equals the one that starts alike; null when none is near. */
 export function nearestName(wrong: string, known: readonly string[]): string | null {
   const limit = Math.max(2, Math.floor(wrong.length / 3));
-  let best: { name: string; off: number } | null = null;
-  for (const name of known) {
-    const off = distance(wrong.toLowerCase(), name.toLowerCase());
-    if (off <= limit && (best === null || off < best.off)) best = { name, off };
-  }
-  return best?.name ?? null;
+  const near = known
+    .map((name) => ({
+      name,
+      off: distance(wrong.toLowerCase(), name.toLowerCase()),
+      start: sharedStart(wrong, name),
+    }))
+    .filter(({ off }) => off <= limit)
+    .sort((one, other) => one.off - other.off || other.start - one.start);
+  return near[0]?.name ?? null;
 }

@@ -32,7 +32,7 @@ export interface PartContext {
   isActuated: boolean;
   isOpened: boolean;
   isEnergised: boolean;
-  /** a magnetron whose heater has run long enough to emit; cold on the bench */ isHeaterHot: boolean;
+  /** a magnetron whose heater has run long enough to emit; cold on the bench */ isHot: boolean;
 }
 
 /** One kind of part: its terminals, values, faults and circuit. One file each in `parts/`. */

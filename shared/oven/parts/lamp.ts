@@ -48,9 +48,10 @@ export const lamp: PartKind = {
     },
   },
   faults,
-  circuit: ({ node, inner, value, faults: applied }) => {
+  circuit: ({ node, inner, value, faults: applied, isHot }) => {
     const fault = readFaults(faults, applied);
-    const filament = fault.has('open') ? BROKEN : value('cold');
+    const sound = value('cold') * (isHot ? value('hotRatio') : 1);
+    const filament = fault.has('open') ? BROKEN : sound;
     const elements = [resistance(inner('filament'), node('1'), node('2'), filament)];
     if (fault.has('shorted'))
       elements.push(resistance(inner('short'), node('1'), node('2'), FUSED));

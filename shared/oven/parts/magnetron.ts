@@ -93,6 +93,13 @@ export const magnetron: PartKind = {
   ],
   values: {
     heater: { name: 'cold heater', unit: 'Ω', nominal: 0.12, tolerance: 0.4, source },
+    hotHeater: {
+      name: 'hot heater',
+      unit: 'Ω',
+      nominal: 0.314,
+      tolerance: 0.05,
+      source: '3.3 V / 10.5 A, FACTS 7, calculated',
+    },
     feedThrough: { name: 'each to body', unit: 'F', nominal: 500e-12, tolerance: 0.2, source },
     insulation: {
       name: 'heater to body',
@@ -109,7 +116,8 @@ export const magnetron: PartKind = {
     const { node, inner, value } = part;
     const fault = readFaults(faults, part.faults);
     const loose = fault.has('heater-loose') ? fault.value('heater-loose', 'ohms') : 0;
-    const heater = fault.has('heater-open') ? BROKEN : value('heater') + loose;
+    const sound = part.isHot ? Math.max(value('hotHeater'), value('heater')) : value('heater');
+    const heater = fault.has('heater-open') ? BROKEN : sound + loose;
     const elements: Element[] = [
       resistance(inner('heater'), node('1'), node('2'), heater),
       resistance(inner('insulation'), node('1'), node('body'), value('insulation')),
@@ -123,7 +131,7 @@ export const magnetron: PartKind = {
     for (const id of ['heater-shorted-to-body', 'leaky'])
       if (fault.has(id))
         elements.push(resistance(inner(id), node('1'), node('body'), fault.value(id, 'ohms')));
-    if (part.isHeaterHot) elements.push(...conduction(part, fault));
+    if (part.isHot) elements.push(...conduction(part, fault));
     return elements;
   },
 };
