@@ -9,7 +9,7 @@ const step = <T extends BenchCommand['type']>(seconds: number, type: T, data: Da
 ];
 
 export const openUp: Step[] = [
-  step(6, 'RunOven', { seconds: 10 }),
+  step(16, 'RunOven', { ordered: 10 }),
   step(5, 'PullCord', {}),
   step(14, 'RemoveCover', {}),
 ];
@@ -49,7 +49,8 @@ export const lift = (end: string, label: string): Step[] => [
   step(5, 'LiftLead', { end }),
 ];
 
-export const refit = (end: string, terminal: string): Step => step(6, 'RefitLead', { end, terminal });
+export const refit = (end: string, terminal: string): Step =>
+  step(6, 'RefitLead', { end, terminal });
 
 /** Zeroes the test leads on the setting, tips together. */
 export const zero = (setting: string): Step[] => [
@@ -84,6 +85,6 @@ export const probesOff: Step[] = [
 export const closeUp: Step[] = [
   step(12, 'FitCover', {}),
   step(4, 'PlugCord', {}),
-  step(5, 'RunOven', { seconds: 60 }),
+  step(65, 'RunOven', { ordered: 60 }),
 ];
 export const handIn: Step = step(10, 'HandIn', {});

@@ -18,6 +18,7 @@ import {
 } from './actions/meter.ts';
 import { cleanSpot, inspectPart, replacePart } from './actions/parts.ts';
 import { placeProbe, removeProbe } from './actions/probes.ts';
+import { runOven } from './actions/run.ts';
 import { giveVerdict, handIn, stateCause, writeReport } from './actions/sheet.ts';
 import {
   closeDoor,
@@ -62,6 +63,7 @@ const actions = [
   inspectPart,
   cleanSpot,
   replacePart,
+  runOven,
   wait,
   giveVerdict,
   stateCause,

@@ -21,19 +21,24 @@ const touchCharge = 45e-6;
 const touchVoltsAlternating = 30;
 /** Ohm, a screwdriver blade with its two contacts (FACTS 1.2 takes 2 Ohm for the loop) */
 const bladeResistance = 2;
-/** V on an ohms, diode or beep setting: above the first nonsense, above the second the instrument dies */
-const ohmsLiveVolts = 30;
-const ohmsDestroyVolts = 600;
-const anyDestroyVolts = 1000;
 
 export interface Contact {
-  volts: number;
   charge: number;
   energy: number;
   storage: Storage;
 }
 
-/** What flows when `resistance` is held between two targets for `seconds`: V before, C and J through it, and what is left stored. */
+/** V of stored charge between two targets, before anything bridges them. */
+export function standingVolts(
+  setup: Setup,
+  state: BenchState,
+  [a, b]: readonly [TargetRef, TargetRef],
+): number {
+  const result = integrate(circuitOf(setup, state), state.storage, 0, [pairOf(state, a, b)]);
+  return result.samples.values[0]?.at(-1) ?? 0;
+}
+
+/** What flows when `resistance` is held between two targets for `seconds`: C and J through it, and what is left stored. */
 export function contact(
   setup: Setup,
   state: BenchState,
@@ -41,21 +46,20 @@ export function contact(
   resistance: number,
   seconds: number,
 ): Contact {
-  const before = integrate(circuitOf(setup, state), state.storage, 0, [pairOf(state, from, to)]);
   const held = integrate(
     circuitOf(setup, state, [resistor('contact', from, to, resistance)]),
     state.storage,
     seconds,
     [pairOf(state, from, to)],
   );
+  const { time } = held.samples;
   const volts = held.samples.values[0] ?? [];
   const sum = (f: (v: number) => number): number =>
-    held.samples.time.reduce((total, time, i) => {
-      const step = time - (held.samples.time[i - 1] ?? time);
-      return total + (step * (f(volts[i] ?? 0) + f(volts[i - 1] ?? volts[i] ?? 0))) / 2;
+    time.reduce((total, at, i) => {
+      const width = at - (time[i - 1] ?? at);
+      return total + (width * (f(volts[i] ?? 0) + f(volts[i - 1] ?? volts[i] ?? 0))) / 2;
     }, 0);
   return {
-    volts: before.samples.values[0]?.at(-1) ?? 0,
     charge: sum((v) => Math.abs(v)) / resistance,
     energy: sum((v) => v * v) / resistance,
     storage: held.storage,
@@ -86,8 +90,10 @@ export function touch(
         continue;
       }
     }
-    const { volts, charge, energy } = bodyContact(setup, state, at);
-    if (Math.abs(volts) > touchVolts && charge > touchCharge) {
+    const volts = standingVolts(setup, state, [at, 'CH.1']);
+    if (Math.abs(volts) <= touchVolts) continue;
+    const { charge, energy } = bodyContact(setup, state, at);
+    if (charge > touchCharge) {
       found.push({ kind: 'shock', at, to: null, volts, charge, energy });
     }
   }
@@ -101,8 +107,9 @@ export function short(
   state: BenchState,
   pair: readonly [TargetRef, TargetRef],
 ): HazardFound[] {
-  const { volts, charge, energy } = bladeContact(setup, state, pair);
+  const volts = standingVolts(setup, state, pair);
   if (Math.abs(volts) <= touchVolts) return [];
+  const { charge, energy } = bladeContact(setup, state, pair);
   return [{ kind: 'capacitor-shorted', at: pair[0], to: pair[1], volts, charge, energy }];
 }
 
@@ -110,19 +117,24 @@ export function short(
 export function meterHazards(setup: Setup, state: BenchState): HazardFound[] {
   const { red, black } = state.probes;
   const setting = settingOf(setup.meter, state.meter.setting);
-  if (!red || !black || red === black || state.meter.isDestroyed || !setting) return [];
-  const standing = integrate(circuitOf(setup, state), state.storage, 0, [
-    pairOf(state, red, black),
-  ]);
-  const stored = Math.abs(standing.samples.values[0]?.at(-1) ?? 0);
+  if (
+    !red ||
+    !black ||
+    red === black ||
+    state.meter.isDestroyed ||
+    !setting ||
+    setting.function === 'off'
+  )
+    return [];
+  const stored = Math.abs(standingVolts(setup, state, [red, black]));
   const live = state.isCordIn ? liveVolts(setup, state, [red, black]) : 0;
   const volts = Math.max(stored, live);
   const hazard = (kind: HazardFound['kind']): HazardFound[] => [
     { kind, at: red, to: black, volts, charge: 0, energy: 0 },
   ];
-  const isPassive =
-    setting.function !== 'ohms' && setting.function !== 'beep' && setting.function !== 'diode';
-  if (volts > (isPassive ? anyDestroyVolts : ohmsDestroyVolts)) return hazard('meter-destroyed');
-  if (!isPassive && volts > ohmsLiveVolts) return hazard('ohms-on-live');
+  const isDriving = setting.function !== 'dc-volts' && setting.function !== 'ac-volts';
+  const { limits } = setup.meter;
+  if (volts > (isDriving ? limits.passive : limits.any)) return hazard('meter-destroyed');
+  if (isDriving && volts > limits.warning) return hazard('ohms-on-live');
   return live > touchVoltsAlternating ? hazard('live-probing') : [];
 }

@@ -24,8 +24,19 @@ export const circuitOf = (
   extra: readonly BenchBranch[] = [],
 ): Circuit => assemble(setup.oven, state.oven, [...branches(setup, state), ...extra]);
 
+/** The last answer for a state: deciding and then recording ask for the same moment. */
+const remembered = new WeakMap<BenchState, { setup: Setup; untilMs: number; passed: Passed }>();
+
 /** Lets bench time run to `untilMs` with nothing touched: the circuit is integrated from event to event. */
 export function passTime(setup: Setup, state: BenchState, untilMs: number): Passed {
+  const known = remembered.get(state);
+  if (known?.setup === setup && known.untilMs === untilMs) return known.passed;
+  const passed = integrateTo(setup, state, untilMs);
+  remembered.set(state, { setup, untilMs, passed });
+  return passed;
+}
+
+function integrateTo(setup: Setup, state: BenchState, untilMs: number): Passed {
   const duration = (untilMs - state.benchMs) / 1000;
   const connected = branches(setup, state);
   const { red, black } = state.probes;

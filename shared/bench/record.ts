@@ -56,7 +56,8 @@ export type Hazard = z.infer<typeof hazard> & { benchMs: number };
 
 /** What one powered run did, as a person in front of the oven sees and hears it. */
 export const runOutcome = z.strictObject({
-  seconds: z.number(),
+  /** s asked for at the panel */ ordered: z.number().min(1).max(300),
+  /** s until it ended: less when something opened */ seconds: z.number(),
   isDisplayLit: z.boolean(),
   isLampLit: z.boolean(),
   isFanTurning: z.boolean(),

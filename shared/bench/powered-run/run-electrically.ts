@@ -1,0 +1,54 @@
+import { transient } from '../../engine/analyses/transient.ts';
+import type { Gathered } from '../../engine/analyses/summarise.ts';
+import type { Storage } from '../../engine/circuit/circuit.ts';
+import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
+import type { PartKindName } from '../../oven/oven.ts';
+import { energisedCircuit } from './energised-circuit.ts';
+
+/** s until the high-voltage side repeats itself, and of mains averaged at its end */
+const settling = 0.3;
+const averaged = 0.1;
+
+export interface Electrical {
+  /** A rms */ current: (element: string) => number;
+  /** W */ power: (element: string) => number;
+  storage: Storage;
+}
+
+export const refsOf = (oven: DrawnOven, kind: PartKindName): string[] =>
+  oven.definition.parts.filter((part) => part.kind === kind).map((part) => part.ref);
+
+/** 0.3 s of mains through the oven in this state, and what flowed in the last tenth of a second. */
+export function runElectrically(oven: DrawnOven, state: OvenState): Electrical {
+  const named = (kind: PartKindName, inner: string): string[] =>
+    refsOf(oven, kind).map((ref) => `${ref}:${inner}`);
+  const currents = [
+    'mains:loop',
+    ...named('fuse', 'element'),
+    ...named('hv-transformer', 'primary'),
+    ...named('motor', 'winding'),
+    ...named('magnetron', 'heater'),
+  ];
+  const powers = [
+    ...named('control-board', 'load'),
+    ...named('control-board', 'filament'),
+    ...named('lamp', 'filament'),
+    ...named('magnetron', 'heater'),
+    ...named('magnetron', 'beam'),
+    ...named('magnetron', 'threshold'),
+  ];
+  const ran = transient(energisedCircuit(oven, state), {
+    stop: settling,
+    storage: { voltages: {}, currents: {} },
+    observe: { from: settling - averaged, currents, powers },
+  });
+  if (!ran.ok) throw new Error(`powered run: ${ran.failure.message}`);
+  const { summary, storage } = ran.value;
+  const of = (all: Record<string, Gathered> | undefined, element: string): Gathered | undefined =>
+    all?.[element];
+  return {
+    current: (element) => of(summary?.currents, element)?.rms ?? 0,
+    power: (element) => of(summary?.powers, element)?.mean ?? 0,
+    storage,
+  };
+}
