@@ -22,7 +22,6 @@ const everyRole: RouteObject[] = [
 
 const instructor: RouteObject[] = [
   { path: 'scenarios', lazy: () => import('../features/scenarios/scenarios-page.tsx') },
-  { path: 'scenarios/new', lazy: () => import('../features/scenarios/new-scenario-page.tsx') },
   { path: 'scenarios/:scenario', lazy: () => import('../features/scenarios/scenario-page.tsx') },
 ];
 

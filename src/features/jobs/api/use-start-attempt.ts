@@ -2,7 +2,7 @@ import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { call } from '../../../api/call.ts';
 import { startAttempt } from '../../../../shared/contracts/attempts.ts';
 
-interface Start {
+export interface Start {
   scenario: string;
   /** an instructor tries the draft */ isTrial?: boolean;
 }

@@ -1,12 +1,4 @@
 import { useQuery } from '@tanstack/react-query';
-import { call } from '../../../api/call.ts';
-import { getOven } from '../../../../shared/contracts/ovens.ts';
+import { ovenQuery } from './oven-query.ts';
 
-/** An oven's definition and layout: data of the release, the same for as long as the page stands. */
-export const useOven = (oven: string | undefined) =>
-  useQuery({
-    queryKey: ['ovens', oven],
-    queryFn: ({ signal }) => call(getOven, { params: { oven: oven ?? '' }, signal }),
-    enabled: oven !== undefined && oven !== '',
-    staleTime: Infinity,
-  });
+export const useOven = (oven: string) => useQuery(ovenQuery(oven));
