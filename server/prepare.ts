@@ -31,12 +31,12 @@ export async function prepare(options: PrepareOptions): Promise<OvenLibrary> {
   const practice = await stores.organisations.practice(practiceOrganisation, clock());
   await publishJobs(stores.scenarios, practice, jobs, clock());
   if (options.isSeeded) {
-    const isFilled = await seedDemo(
+    const organisation = await seedDemo(
       { ...stores, passwords, clock },
       await readDemoAccounts(root),
       jobs,
     );
-    if (isFilled) log.info('the demonstration organisation was set up');
+    if (organisation !== null) log.info('the demonstration organisation was set up');
   }
   log.info({ ovens: ovens.list().length, jobs: jobs.length }, 'ovens and practice jobs are ready');
   return ovens;

@@ -14,18 +14,19 @@ export interface DemoDeps {
 
 /**
  * Fills a database without people with the demonstration organisation: its accounts, and its own
- * copies of the practice jobs, for its instructor to change. Answers whether it did.
+ * copies of the practice jobs, for its instructor to change. Answers the organisation's id; null when
+ * there are people already.
  */
 export async function seedDemo(
   deps: DemoDeps,
   { organisation, password, accounts }: DemoAccounts,
   jobs: readonly PracticeJob[],
-): Promise<boolean> {
+): Promise<string | null> {
   const { organisations, scenarios, passwords, clock } = deps;
-  if (!(await organisations.isEmpty())) return false;
+  if (!(await organisations.isEmpty())) return null;
   const passwordHash = await passwords.hash(password);
   const people = accounts.map((account) => ({ ...account, passwordHash }));
   const id = await organisations.found(organisation, people, clock());
   await publishJobs(scenarios, id, jobs, clock());
-  return true;
+  return id;
 }
