@@ -17,6 +17,8 @@ const byFunction = (share: (name: MeterFunction) => number) =>
 /** Share of the spec a new meter uses up: the rest is left for age and rounding. Judgement. */
 const GAIN_SHARE = 0.7;
 const OFFSET_SHARE = 0.3;
+/** Counts: a last digit that stands between two values moves now and then. Judgement. */
+const NOISE = 0.3;
 
 /** The meter handed out in one attempt: its own gain and offset error by function, inside its spec. */
 export function drawMeter(meter: MeterDefinition, seed: number): MeterUnit {
@@ -26,10 +28,11 @@ export function drawMeter(meter: MeterDefinition, seed: number): MeterUnit {
     seed,
     gain: byFunction((name) => GAIN_SHARE * spread('gain', name)),
     offset: byFunction((name) => OFFSET_SHARE * spread('offset', name)),
+    noise: NOISE,
   };
 }
 
-/** A meter without error of its own: for worked numbers. */
+/** A meter without error or noise of its own: for worked numbers. */
 export function exactMeter(seed = 0): MeterUnit {
-  return { seed, gain: byFunction(() => 0), offset: byFunction(() => 0) };
+  return { seed, gain: byFunction(() => 0), offset: byFunction(() => 0), noise: 0 };
 }

@@ -83,6 +83,7 @@ export interface MeterUnit {
   seed: number;
   /** -1 to 1, of the percent */ gain: Readonly<Record<MeterFunction, number>>;
   /** -1 to 1, of the digits */ offset: Readonly<Record<MeterFunction, number>>;
+  /** counts, of its converter: moves the last digit by one at most */ noise: number;
 }
 
 export interface Reading {

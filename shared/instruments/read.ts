@@ -23,9 +23,6 @@ export interface ReadOutput {
   lagState: number | null;
 }
 
-/** Counts: noise of the converter. At most one count of the display either way. */
-const NOISE = 0.3;
-
 const blank = { isBeeping: false, isOverRange: false, isWarning: false, isDestroyed: false };
 const nothing: Reading = {
   ...blank,
@@ -62,7 +59,7 @@ function measured(setting: ActiveSetting, input: ReadInput): Reading {
   const gain = (unit.gain[setting.function] * spec.percent) / 100;
   const offset = unit.offset[setting.function] * (spec.digits - 1) * step;
   const value = found * (1 + gain) + offset;
-  const noise = NOISE * (2 * seededUniform(unit.seed, `${setting.id}.${readingNumber}`) - 1);
+  const noise = unit.noise * (2 * seededUniform(unit.seed, `${setting.id}.${readingNumber}`) - 1);
   const raw = Math.round(value / step + noise);
   if (Math.abs(raw) > scale.maxCounts) return overRange(setting);
   // `+ 0` turns a negative zero into zero.

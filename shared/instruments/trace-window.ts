@@ -1,12 +1,9 @@
 import type { Trace } from './meter.ts';
 
-/** V at a time, straight lines between samples; the first or last sample outside. */
-function voltsAt({ time, volts }: Trace, at: number): number {
-  const after = time.findIndex((sample) => sample >= at);
-  if (after === -1) return volts.at(-1) ?? 0;
-  const [t1, v1] = [time[after] ?? 0, volts[after] ?? 0];
-  if (after === 0) return v1;
-  const [t0, v0] = [time[after - 1] ?? 0, volts[after - 1] ?? 0];
+/** V at a time between the samples `after - 1` and `after`, on the straight line that joins them. */
+function voltsAt({ time, volts }: Trace, at: number, after: number): number {
+  const [t0, v0] = [time[after - 1] ?? at, volts[after - 1] ?? 0];
+  const [t1, v1] = [time[after] ?? at, volts[after] ?? v0];
   return t1 === t0 ? v1 : v0 + ((v1 - v0) * (at - t0)) / (t1 - t0);
 }
 
@@ -15,7 +12,7 @@ export function splitLast(trace: Trace, seconds: number): { before: Trace; last:
   const start = (trace.time.at(-1) ?? 0) - seconds;
   const kept = trace.time.findIndex((time) => time > start);
   if (kept <= 0) return { before: { time: [], volts: [] }, last: trace };
-  const between = voltsAt(trace, start);
+  const between = voltsAt(trace, start, kept);
   return {
     before: {
       time: [...trace.time.slice(0, kept), start],
