@@ -21,13 +21,13 @@ export const batteryTargets: Readonly<Record<string, BenchPoint>> = {
 
 /** Where tools lie while nobody uses them. */
 export const rest = {
-  probe: { red: [676, 712], black: [676, 738] },
-  discharge: { clip: [340, 738], tip: [560, 726] },
-  battery: { neg: [104, 640], oneK: [66, 640] },
+  probe: { red: [772, 714], black: [772, 738] },
+  discharge: { clip: [838, 714], tip: [976, 736] },
+  battery: { neg: [44, 660], oneK: [100, 660] },
 } as const satisfies Record<string, Record<string, BenchPoint>>;
 
 /** Where the test leads leave towards the meter, on the bench's lower edge. */
 export const meterJacks: Readonly<Record<'red' | 'black', BenchPoint>> = {
-  red: [214, 768],
-  black: [186, 768],
+  red: [528, 772],
+  black: [504, 772],
 };

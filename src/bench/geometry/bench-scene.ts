@@ -27,7 +27,7 @@ export interface ScenePart {
   /** what is printed on the part, line by line */ stamp: readonly string[];
   /** what a look from close shows: 'burnt', 'swollen', 'cracked', 'blown' … */
   looks: readonly string[];
-  /** a switch with its actuator in, a relay pulled in */ isActuated: boolean;
+  /** a switch with its actuator in, a relay pulled in, a plug in the outlet */ isActuated: boolean;
   isLit: boolean;
   isTurning: boolean;
   isReplaced: boolean;

@@ -1,3 +1,4 @@
+import type { OvenPart, PartKindName } from '../../../shared/oven/oven.ts';
 import type { OvenState } from '../../../shared/oven/oven-state.ts';
 import type { BenchHand } from './bench-hand.ts';
 import type { BenchPoint } from './bench-point.ts';
@@ -5,14 +6,17 @@ import type { ScenePart } from './bench-scene.ts';
 import type { BenchDrawing } from './draw-bench.ts';
 import { plugShift } from './target-places.ts';
 
-/** Every part that has a place on the bench, as it looks now. */
+/** Boards and the chassis carry other parts, so they are drawn first. */
+const carries: readonly PartKindName[] = ['chassis', 'filter-board', 'control-board'];
+
+/** Every part that has a place on the bench, as it looks now, in the order of drawing. */
 export const sceneParts = (
   drawing: BenchDrawing,
   places: ReadonlyMap<string, BenchPoint>,
   oven: OvenState,
   hand: BenchHand,
 ): ScenePart[] =>
-  drawing.definition.parts.flatMap((part): ScenePart[] => {
+  [...drawing.definition.parts].sort(byHeight).flatMap((part): ScenePart[] => {
     const place = drawing.layout.parts[part.ref];
     if (place === undefined) return [];
     const shift = part.kind === 'plug' ? plugShift(drawing, hand.isCordIn) : [0, 0];
@@ -28,12 +32,15 @@ export const sceneParts = (
         size: place.size,
         angle: place.angle ?? 0,
         name: part.name,
-        label: drawing.partLabels.get(part.ref) ?? null,
+        label:
+          part.kind === 'plug' && hand.isCordIn ? null : (drawing.partLabels.get(part.ref) ?? null),
         terminals: terminalsOf(part.ref, at, places),
         stamp: hand.stamps[part.ref] ?? [],
         looks: hand.looks[part.ref] ?? [],
         isActuated:
-          (isSwitch && (oven.isDoorClosed || isPressed)) || oven.energised.includes(part.ref),
+          (isSwitch && (oven.isDoorClosed || isPressed)) ||
+          (part.kind === 'plug' && hand.isCordIn) ||
+          oven.energised.includes(part.ref),
         isLit: hand.lit.includes(part.ref),
         isTurning: hand.turning.includes(part.ref),
         isReplaced: hand.replaced.includes(part.ref),
@@ -41,6 +48,9 @@ export const sceneParts = (
       },
     ];
   });
+
+const byHeight = (a: OvenPart, b: OvenPart): number =>
+  Number(carries.includes(b.kind)) - Number(carries.includes(a.kind));
 
 const terminalsOf = (
   part: string,

@@ -1,0 +1,34 @@
+import { memo, useCallback } from 'react';
+import type { Camera } from '../camera/camera.ts';
+import type { BenchScene } from '../geometry/bench-scene.ts';
+import { paintClosedOven } from '../glyphs/closed-oven/paint-closed-oven.ts';
+import { Painted } from '../glyphs/paint/painted.tsx';
+import type { Pen } from '../glyphs/paint/pen.ts';
+import { BenchLayer } from './bench-layer.tsx';
+import { useSameValue } from './use-same-value.ts';
+
+/** The oven as the customer knows it: cover on, seen from the front, its door closed or open. */
+export const ClosedOvenLayer = memo(function ClosedOvenLayer({
+  scene,
+  camera,
+}: {
+  scene: BenchScene;
+  camera: Camera;
+}) {
+  const oven = useSameValue({
+    at: scene.chassis.at,
+    size: scene.chassis.size,
+    isDoorOpen: scene.isDoorOpen,
+    isLampLit: scene.parts.some(({ kind, isLit }) => kind === 'lamp' && isLit),
+    isTurning: scene.parts.some(({ variant, isTurning }) => variant === 'turntable' && isTurning),
+    display:
+      scene.parts.find(({ kind, isLit }) => kind === 'control-board' && isLit)?.stamp[0] ?? null,
+    isDisplayLit: scene.parts.some(({ kind, isLit }) => kind === 'control-board' && isLit),
+  });
+  const paint = useCallback((pen: Pen) => paintClosedOven(pen, oven), [oven]);
+  return (
+    <BenchLayer camera={camera}>
+      <Painted paint={paint} />
+    </BenchLayer>
+  );
+});

@@ -1,0 +1,83 @@
+import { memo, useCallback } from 'react';
+import type { Camera } from '../camera/camera.ts';
+import { benchSize, meterJacks, rest } from '../geometry/bench-furniture.ts';
+import type { BenchPoint } from '../geometry/bench-point.ts';
+import type { BenchScene, SceneProbe } from '../geometry/bench-scene.ts';
+import { probeAngle } from '../geometry/probe-pose.ts';
+import { paintBatteryLeads } from '../glyphs/battery/paint-battery-leads.ts';
+import { paintDischargeLead } from '../glyphs/discharge-lead/paint-discharge-lead.ts';
+import { paintHover } from '../glyphs/lead/paint-hover.ts';
+import { Painted } from '../glyphs/paint/painted.tsx';
+import type { Pen } from '../glyphs/paint/pen.ts';
+import { paintProbe } from '../glyphs/probe/paint-probe.ts';
+import { paintRing } from '../glyphs/terminal/paint-terminal.ts';
+import { BenchLayer } from './bench-layer.tsx';
+import { HazardFlash } from './hazard-flash.tsx';
+import { useSameValue } from './use-same-value.ts';
+
+/** What moves: probes, tools, and what is under the hand. */
+export const LiveLayer = memo(function LiveLayer({
+  scene,
+  camera,
+  reducesMotion,
+}: {
+  scene: BenchScene;
+  camera: Camera;
+  reducesMotion: boolean;
+}) {
+  const live = useSameValue({
+    probes: scene.probes,
+    discharge: scene.discharge,
+    battery: scene.battery,
+    handAt: scene.handAt,
+    isCoverOn: scene.isCoverOn,
+    rings: scene.terminals
+      .filter(({ isHovered, isFocused, isReachable }) => isReachable && (isHovered || isFocused))
+      .map(({ at, isFocused }) => ({ at, isFocused })),
+    outlined: outlined(scene),
+  });
+  const paint = useCallback(
+    (pen: Pen) => {
+      for (const { lead, part, isFocused } of live.outlined) paintHover(pen, lead, part, isFocused);
+      for (const { at, isFocused } of live.rings) paintRing(pen, at, isFocused ? 'focus' : 'hover');
+      paintBatteryLeads(pen, live.battery, live.handAt);
+      paintDischargeLead(pen, live.discharge, live.handAt);
+      for (const probe of live.probes) {
+        const other = live.probes.find(({ colour }) => colour !== probe.colour);
+        paintOneProbe(pen, probe, other?.at ?? null, live.handAt);
+      }
+    },
+    [live],
+  );
+  const flashAt = scene.terminals.find(({ target }) => target === scene.hazardFlash)?.at ?? null;
+  return (
+    <BenchLayer camera={camera}>
+      <Painted paint={paint} />
+      {flashAt === null ? null : <HazardFlash at={flashAt} reducesMotion={reducesMotion} />}
+    </BenchLayer>
+  );
+});
+
+const outlined = (scene: BenchScene) =>
+  scene.isCoverOn
+    ? []
+    : [...new Set([scene.hovered, scene.focused])].flatMap((ref) => {
+        if (ref === null) return [];
+        const lead = scene.leads.find((each) => each.ref === ref) ?? null;
+        const part =
+          scene.parts.find((each) => each.ref === ref && each.kind !== 'chassis') ?? null;
+        return lead === null && part === null
+          ? []
+          : [{ lead, part, isFocused: ref === scene.focused }];
+      });
+
+const paintOneProbe = (
+  pen: Pen,
+  { colour, at, isInHand }: SceneProbe,
+  other: BenchPoint | null,
+  handAt: BenchPoint | null,
+): void => {
+  const tip = isInHand ? (handAt ?? at) : at;
+  if (tip === null) return paintProbe(pen, colour, rest.probe[colour], Math.PI, meterJacks[colour]);
+  paintProbe(pen, colour, tip, probeAngle(colour, tip, other, benchSize), meterJacks[colour]);
+};
