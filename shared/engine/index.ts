@@ -4,4 +4,7 @@ export { kclResidual } from './analyses/kcl-residual.ts';
 export type { EngineOptions } from './analyses/machine.ts';
 export { advance, type Advanced, type AdvanceOptions } from './analyses/advance.ts';
 export { operatingPoint } from './analyses/operating-point.ts';
+export { phasor, type Complex, type Phasors } from './analyses/phasor.ts';
+export { transient, type Transient, type TransientOptions } from './analyses/transient.ts';
+export type { Gathered, Observe, Summary } from './analyses/summarise.ts';
 export * from './quantities/physical-constants.ts';

@@ -8,12 +8,13 @@ import type {
 } from '../circuit/circuit.ts';
 import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { esdirk4 } from '../integration/esdirk-4.ts';
-import { createIntegrator, inductorCurrent, type Integrator } from './integrator.ts';
-import { createMachine, type EngineOptions, type Machine } from './machine.ts';
+import { createIntegrator } from './integrator.ts';
+import { createMachine, type EngineOptions } from './machine.ts';
 import { march } from './march.ts';
 import { forget } from './operating-point.ts';
 import { readPoint } from './read-point.ts';
 import { recordPairs, type Trace } from './record-pairs.ts';
+import { loadStorage, readStorage } from './storage.ts';
 
 export interface AdvanceOptions extends EngineOptions {
   /** s on the clock of the sources' waves at which this begins; 0 unless told */
@@ -90,44 +91,4 @@ function badDuration(duration: number): EngineFailure | undefined {
   if (duration >= 0 && Number.isFinite(duration)) return undefined;
   const message = `a duration of ${duration} s cannot pass`;
   return { code: 'bad-element', element: 'duration', message };
-}
-
-/** Sets the state of every capacitor and inductor from what it held, its own start, or nothing. */
-export function loadStorage({ machine, state }: Integrator, storage: Storage): void {
-  const { netlist, capacitors, inductors } = machine;
-  capacitors.forEach(({ branch }, j) => {
-    const element = netlist.branches[branch]!;
-    const own = element.kind === 'capacitor' ? element.initialVoltage : undefined;
-    state[j] = storage.voltages[element.name] ?? own ?? 0;
-  });
-  const currents = inductors.map(({ branch }) => {
-    const element = netlist.branches[branch]!;
-    const own = element.kind === 'inductor' ? element.initialCurrent : undefined;
-    return storage.currents[element.name] ?? own ?? 0;
-  });
-  setFluxes(machine, state, currents);
-}
-
-/** flux = L I + sum of M I, V s, of each inductor, after the capacitors in `state`. */
-function setFluxes(machine: Machine, state: Float64Array, currents: readonly number[]): void {
-  const { capacitors, inductors, mutuals, windings } = machine;
-  const base = capacitors.length;
-  inductors.forEach(({ value }, j) => (state[base + j] = value * currents[j]!));
-  mutuals.forEach((mutual, c) => {
-    const [first, second] = [windings[2 * c]!, windings[2 * c + 1]!];
-    state[base + first]! += mutual * currents[second]!;
-    state[base + second]! += mutual * currents[first]!;
-  });
-}
-
-/** What every capacitor and inductor of this circuit holds now. */
-export function readStorage({ machine, state }: Integrator): Storage {
-  const { netlist, capacitors, inductors } = machine;
-  const voltages: Record<string, number> = {};
-  const currents: Record<string, number> = {};
-  capacitors.forEach(({ branch }, j) => (voltages[netlist.branches[branch]!.name] = state[j]!));
-  inductors.forEach(({ branch }, j) => {
-    currents[netlist.branches[branch]!.name] = inductorCurrent(machine, j);
-  });
-  return { voltages, currents };
 }

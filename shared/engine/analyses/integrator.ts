@@ -26,16 +26,17 @@ export interface Integrator {
   readonly startJunctions: Float64Array;
   /** A of each inductor at the start of the step */ readonly startCurrents: Float64Array;
   readonly history: Float64Array;
+  /** largest size each voltage (V) and current (A) has had so far */ readonly sizes: Float64Array;
   /** called after each stage but the first, with its number, while its solution stands */
   onStage?: (stage: number) => void;
 }
 
 /**
- * s. The stage that finds the moment after a break: long enough to be exact in doubles, far shorter
- * than anything a circuit of picofarads behind milliohms does. What it moves is the charge of
- * capacitors joined without resistance.
+ * s. The stage that finds the moment after a break, and the shortest step: what is quicker (picofarads
+ * behind milliohms) is damped and not followed. Shorter, and the change of a flux would have no
+ * digits left beside the flux. What it moves is the charge of capacitors joined without resistance.
  */
-export const INSTANT = 1e-15;
+export const INSTANT = 1e-12;
 
 /** Junctions within a stage: half its square is the current's relative error. */
 const STAGE_TOLERANCE = 1e-4;
@@ -53,6 +54,7 @@ export function createIntegrator(machine: Machine, tableau: Tableau): Integrator
     startJunctions: new Float64Array(machine.junctions.length),
     startCurrents: new Float64Array(machine.inductors.length),
     history: new Float64Array(count),
+    sizes: new Float64Array(count),
   };
 }
 
@@ -113,12 +115,18 @@ export function refuseStep({ machine, startX, startJunctions }: Integrator): voi
   }
 }
 
-function keepStart({ machine, startX, startJunctions, startCurrents }: Integrator): void {
+function keepStart(integrator: Integrator): void {
+  const { machine, state, sizes, startX, startJunctions, startCurrents } = integrator;
+  const base = machine.capacitors.length;
   startX.set(machine.system.x);
   for (let j = 0; j < startJunctions.length; j += 1) {
     startJunctions[j] = machine.junctions[j]!.voltage;
   }
-  for (let j = 0; j < startCurrents.length; j += 1) startCurrents[j] = inductorCurrent(machine, j);
+  for (let j = 0; j < startCurrents.length; j += 1) {
+    startCurrents[j] = inductorCurrent(machine, j);
+    sizes[base + j] = Math.max(sizes[base + j]!, Math.abs(startCurrents[j]!));
+  }
+  for (let j = 0; j < base; j += 1) sizes[j] = Math.max(sizes[j]!, Math.abs(state[j]!));
 }
 
 /** A through an inductor in the machine's present solution. */
@@ -131,10 +139,13 @@ function setHistory({ machine, history }: Integrator, length: number): void {
   for (let j = 0; j < capacitors.length; j += 1) {
     setCapacitorHistory(system, capacitors[j]!.branch, history[j]!);
   }
+  let largest = 0;
   for (let j = 0; j < inductors.length; j += 1) {
     const flux = history[capacitors.length + j]!;
     setInductorHistory(system, inductors[j]!.branch, flux, length);
+    largest = Math.max(largest, Math.abs(flux));
   }
+  machine.voltageNoise = (8 * Number.EPSILON * largest) / length;
 }
 
 function readRates(integrator: Integrator, rate: Float64Array, length: number): void {
@@ -174,7 +185,7 @@ function readRates(integrator: Integrator, rate: Float64Array, length: number): 
  * Source: L. F. Shampine, in Hosea and Shampine (1996), as TR-BDF2's estimate.
  */
 export function stepError(integrator: Integrator, length: number, relative: number): number {
-  const { machine, tableau, rates, history, state, nextState, startCurrents } = integrator;
+  const { machine, tableau, rates, history, state, nextState, startCurrents, sizes } = integrator;
   const { system, netlist, factors, capacitors, inductors } = machine;
   const { residual, step, alpha } = system;
   history.fill(0);
@@ -196,17 +207,20 @@ export function stepError(integrator: Integrator, length: number, relative: numb
   for (let j = 0; j < capacitors.length; j += 1) {
     const { branch } = capacitors[j]!;
     const error = Math.abs(step[netlist.from[branch]!]! - step[netlist.to[branch]!]!);
-    const size = Math.max(Math.abs(state[j]!), Math.abs(nextState[j]!));
+    const size = Math.max(Math.abs(state[j]!), Math.abs(nextState[j]!), MEMORY * sizes[j]!);
     worst = Math.max(worst, error / (ABSOLUTE_VOLTS + relative * size));
   }
   for (let j = 0; j < inductors.length; j += 1) {
     const error = Math.abs(step[netlist.nodeCount + inductors[j]!.branch]!) / REFERENCE;
-    const size = Math.max(Math.abs(startCurrents[j]!), Math.abs(inductorCurrent(machine, j)));
+    const now = Math.abs(inductorCurrent(machine, j));
+    const size = Math.max(Math.abs(startCurrents[j]!), now, MEMORY * sizes[capacitors.length + j]!);
     worst = Math.max(worst, error / (ABSOLUTE_AMPERES + relative * size));
   }
   return Number.isNaN(worst) ? Infinity : worst;
 }
 
+/** A current that has fallen to a ten-thousandth of what it was need not keep all its digits. */
+const MEMORY = 1e-4;
 /** A thousandth of the last digit of the lowest direct-voltage range of a 2000-count meter. */
 export const ABSOLUTE_VOLTS = 1e-7;
 /** What puts that voltage across 100 kOhm. */

@@ -44,6 +44,8 @@ export interface Machine {
   readonly system: System;
   readonly factors: Factors;
   readonly baseConductance: number;
+  /** V below which a change is rounding: a flux of large size over a short stage has no more digits */
+  voltageNoise: number;
   readonly sources: readonly SourceState[];
   readonly resistors: readonly Valued[];
   readonly capacitors: readonly Valued[];
@@ -70,7 +72,10 @@ export function createMachine(circuit: Circuit, options: EngineOptions = {}): Re
     return { ok: false, failure: singular(netlist, found.singularColumn) };
   }
   const factors = createFactors(system.pattern, found.symbolic);
-  return { ok: true, value: { circuit, netlist, system, factors, baseConductance, ...parts } };
+  return {
+    ok: true,
+    value: { circuit, netlist, system, factors, baseConductance, voltageNoise: 0, ...parts },
+  };
 }
 
 /** The failure of a matrix that has no inverse, naming the unknown it broke at. */

@@ -94,6 +94,17 @@ function segmentEnds({ sources }: Machine, plan: Plan): number[] {
   return ends;
 }
 
+/** Where a segment stands. Offsets and lengths in s. */
+interface Walk {
+  readonly base: number;
+  readonly end: number;
+  readonly longest: number;
+  offset: number;
+  wanted: number;
+  overdrive: number[];
+  refusals: number;
+}
+
 /** Offset reached: the segment's length, or less when a switch must turn there. */
 function marchSegment(
   integrator: Integrator,
@@ -102,50 +113,82 @@ function marchSegment(
   watch: Watch,
   budget: { steps: number },
 ): number | EngineFailure {
-  const { machine, tableau } = integrator;
+  const { machine } = integrator;
   const longest = longestStep(machine, plan);
-  let offset = 0;
-  let wanted = Math.min(longest, firstStep(integrator));
-  let overdrive = overdrives(machine);
-  while (offset < segment.length) {
-    const length = fitStep(wanted, landing(plan, segment, offset) - offset);
-    const shortest = Math.max(INSTANT, 4 * Number.EPSILON * offset);
+  const walk: Walk = {
+    base: segment.base,
+    end: segment.length,
+    longest,
+    offset: 0,
+    wanted: Math.min(longest, firstStep(integrator)),
+    overdrive: overdrives(machine),
+    refusals: 0,
+  };
+  while (walk.offset < walk.end) {
+    const length = fitStep(walk.wanted, landing(plan, segment, walk.offset) - walk.offset);
     budget.steps -= 1;
-    const isSolved = tryStep(integrator, segment.base + offset, length);
-    if (!isSolved) {
-      if (length <= shortest || budget.steps < 0) {
-        return notConverged(machine, MOST_STEPS - budget.steps, segment.base + offset);
-      }
-      refuseStep(integrator);
-      wanted = length / 8;
-      continue;
+    const outcome = walkStep(integrator, plan, walk, length);
+    if (outcome === 'unsolved' || budget.steps < 0) {
+      return notConverged(machine, MOST_STEPS - budget.steps, walk.base + walk.offset);
     }
-    const error = stepError(integrator, length, plan.relativeTolerance);
-    if (error > 1 && length > shortest) {
-      refuseStep(integrator);
-      wanted = nextStep(length, error, tableau.errorPower);
-      continue;
-    }
-    const after = overdrives(machine);
-    const turn = turningAt(overdrive, after);
-    if (turn < 1 - TURN_PRECISION && length * turn > shortest) {
-      refuseStep(integrator);
-      wanted = length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2));
-      continue;
-    }
-    acceptStep(integrator);
-    const left = segment.length - offset - length;
-    offset = left <= shortest ? segment.length : offset + length;
-    watch.onStep?.(segment.base, offset, length);
-    if (turn <= 1) return offset;
-    overdrive = after;
-    wanted = Math.min(
-      longest,
-      nextStep(Math.max(length, Math.min(wanted, length * 2)), error, tableau.errorPower),
-    );
+    if (typeof outcome === 'object') return outcome;
+    if (outcome === 'refused') continue;
+    watch.onStep?.(walk.base, walk.offset, length);
+    if (outcome === 'turning') return walk.offset;
   }
-  return segment.length;
+  return walk.end;
 }
+
+type StepOutcome = 'accepted' | 'turning' | 'refused' | 'unsolved' | EngineFailure;
+
+/** Tries one step and moves the walk on, or shortens what it wants next. */
+function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number): StepOutcome {
+  const { machine, tableau } = integrator;
+  if (walk.refusals === KINK) return startAfresh(integrator, walk, length) ?? 'refused';
+  const shortest = Math.max(INSTANT, 4 * Number.EPSILON * walk.offset);
+  const refuse = (wanted: number): 'refused' => {
+    refuseStep(integrator);
+    walk.refusals += 1;
+    walk.wanted = wanted;
+    return 'refused';
+  };
+  if (!tryStep(integrator, walk.base + walk.offset, length)) {
+    return length <= shortest ? 'unsolved' : refuse(length / 8);
+  }
+  const error = stepError(integrator, length, plan.relativeTolerance);
+  if (error > 1 && length > shortest) return refuse(nextStep(length, error, tableau.errorPower));
+  const overdrive = overdrives(machine);
+  const turn = turningAt(walk.overdrive, overdrive);
+  if (turn < 1 - TURN_PRECISION && length * turn > shortest) {
+    walk.refusals = 0;
+    return refuse(length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2)));
+  }
+  acceptStep(integrator);
+  walk.refusals = 0;
+  walk.overdrive = overdrive;
+  const left = walk.end - walk.offset - length;
+  walk.offset = left <= shortest ? walk.end : walk.offset + length;
+  // a step cut short by a landing says little against the one that was wanted
+  const basis = Math.max(length, Math.min(walk.wanted, 2 * length));
+  walk.wanted = Math.min(walk.longest, nextStep(basis, error, tableau.errorPower));
+  return turn <= 1 ? 'turning' : 'accepted';
+}
+
+/** The rates at the start were those of a circuit that had just turned a corner: finds them anew. */
+function startAfresh(
+  integrator: Integrator,
+  walk: Walk,
+  length: number,
+): EngineFailure | undefined {
+  const failure = settle(integrator, walk.base + walk.offset);
+  walk.overdrive = overdrives(integrator.machine);
+  walk.wanted = Math.min(length, firstStep(integrator));
+  walk.refusals += 1;
+  return failure;
+}
+
+/** So many refusals at one place are no longer a matter of the step's length. */
+const KINK = 4;
 
 /** A switch turns within this share of the step in which its control crosses. */
 const TURN_PRECISION = 1e-4;

@@ -61,17 +61,24 @@ function advanceSolution({ system, factors }: Machine): void {
   for (let at = 0; at < netlist.size; at += 1) x[at]! += step[at]!;
 }
 
-/** Makes every junction linear about its new voltage; the largest move, in thermal slopes. */
-function moveJunctions({ system, junctions }: Machine): number {
+/**
+ * Makes every junction linear about its new voltage; the largest move, in thermal slopes. A move
+ * counts by what it does to the current, g dv / (|i| + IS): that is dv / slope in a junction that
+ * conducts, and nothing in one that is cut off, however far its voltage goes.
+ */
+function moveJunctions({ system, junctions, voltageNoise }: Machine): number {
   let largest = 0;
   for (let j = 0; j < junctions.length; j += 1) {
     const junction = junctions[j]!;
+    const before = junction.conductance;
     const wanted = junctionVoltage(system, junction);
     const next = limitJunction(junction, wanted);
-    const moved = Math.max(Math.abs(next - junction.voltage), Math.abs(wanted - next));
-    largest = Math.max(largest, moved / junction.slope);
+    const moved = Math.max(0, Math.abs(next - junction.voltage) - voltageNoise);
     if (Number.isNaN(moved)) return NaN;
     linearise(junction, next);
+    const conductance = Math.max(before, junction.conductance);
+    const share = conductance / (Math.abs(junction.current) + junction.saturation);
+    largest = Math.max(largest, moved * share, Math.abs(wanted - next) / junction.slope);
   }
   return largest;
 }

@@ -42,6 +42,7 @@ export function solveAtRest(machine: Machine, moment: Moment): EngineFailure | u
 export function forget(machine: Machine): void {
   restart(machine.factors);
   machine.system.isStale = true;
+  machine.voltageNoise = 0;
   fromNothing(machine);
   for (const state of machine.switches) {
     const element = machine.netlist.branches[state.branch]!;

@@ -3,10 +3,10 @@ import { addCurrentSource } from '../devices/current-source.ts';
 import type { Machine, SourceState } from './machine.ts';
 
 /**
- * A moment to take the sources at: `rest` takes each source's own direct value, a number its wave
- * at that time (s), from the side given where the wave jumps.
+ * A moment to take the sources at: `rest` takes each source's own direct value, `start` its wave as it
+ * stands before t = 0, a number its wave at that time (s), from the side given where it jumps.
  */
-export type Moment = number | 'rest';
+export type Moment = number | 'rest' | 'start';
 
 /** Sets every source to its value at a moment, times `factor`. */
 export function setSources(
@@ -29,6 +29,7 @@ export function setSources(
 
 function valueAt({ element, fixed }: SourceState, moment: Moment, side: -1 | 1): number {
   if (fixed !== undefined) return fixed;
-  if (moment !== 'rest') return waveValue(element.wave, moment, side);
-  return element.dc ?? waveValue(element.wave, 0);
+  if (typeof moment === 'number') return waveValue(element.wave, moment, side);
+  const before = waveValue(element.wave, 0, -1);
+  return moment === 'rest' ? (element.dc ?? before) : before;
 }
