@@ -45,14 +45,25 @@ async function dev(launched) {
     vite.ended.then(() => 'Vite ended.'),
     lost,
   ]);
-  const state = await awaitHealth(`${address}/api/health`, readyWithin, ended);
-  if (state === 'late') say('The API does not answer yet; it is tried again at every change.');
+  const state = await awaitBoth(settings, ended);
+  if (state === 'late') say('Not ready yet: the API is tried again at every change.');
   if (state === 'ready') {
     const demo = settings.isSeeded ? readDemoAccounts() : null;
     const isOwnDatabase = settings.database !== null;
     welcome({ address, time: since(begin), demo, isOwnDatabase }).forEach(say);
   }
   throw new Failure(await ended);
+}
+
+/**
+ * @param {import('./lib/settings.mjs').Settings} settings
+ * @param {Promise<unknown>} ended
+ */
+async function awaitBoth({ port, apiPort }, ended) {
+  const api = `http://${loopback}:${apiPort}/api/health`;
+  const state = await awaitHealth(api, readyWithin, ended);
+  if (state !== 'ready') return state;
+  return awaitHealth(`http://${loopback}:${port}/`, readyWithin, ended);
 }
 
 await launch(dev, { signalCode: 0 });

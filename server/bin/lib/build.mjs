@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { inPackages } from './dependencies.mjs';
 import { Failure } from './failure.mjs';
@@ -18,47 +18,35 @@ const products = [
 ];
 
 /**
- * A digest of the names and contents of all files below these paths. Contents, not times: a fresh
- * clone and a changed branch set the times anew.
- * @param {string} root
- * @param {readonly string[]} paths from root; one that is missing counts as empty
+ * A digest of names and contents. Contents, not times: a fresh clone and a changed branch set the
+ * times anew.
+ * @param {Iterable<readonly [name: string, content: Uint8Array]>} files in a lasting order
  * @returns {string} hexadecimal SHA-256
  */
-export function digestOf(root, paths) {
+export function digestOf(files) {
   const hash = createHash('sha256');
-  for (const path of paths) {
-    for (const file of filesBelow(root, path)) {
-      const content = readFileSync(join(root, file));
-      hash.update(`${file}\0${content.length}\0`).update(content);
-    }
+  for (const [name, content] of files) {
+    // The length keeps the end of one file apart from the beginning of the next.
+    hash.update(`${name}\0${content.length}\0`).update(content);
   }
   return hash.digest('hex');
 }
 
-/**
- * @param {string} root
- * @param {string} path
- * @returns {string[]} in an order of their own names alone
- */
-function filesBelow(root, path) {
-  const full = join(root, path);
-  if (!existsSync(full)) return [];
-  const entries = readEntries(full);
-  if (entries === null) return [path];
-  return entries.sort().flatMap((name) => filesBelow(root, join(path, name)));
+/** @returns {Generator<[string, Uint8Array]>} */
+function* readSources() {
+  for (const path of sources.flatMap(filesBelow)) yield [path, readFileSync(inProject(path))];
 }
 
 /**
- * @param {string} folder
- * @returns {string[] | null} null when it is a file
+ * @param {string} path from the project's folder; one that is missing counts as empty
+ * @returns {string[]} ordered by name
  */
-function readEntries(folder) {
-  try {
-    return readdirSync(folder);
-  } catch (error) {
-    if (error instanceof Error && 'code' in error && error.code === 'ENOTDIR') return null;
-    throw error;
-  }
+function filesBelow(path) {
+  const found = statSync(inProject(path), { throwIfNoEntry: false });
+  if (found === undefined) return [];
+  if (!found.isDirectory()) return [path];
+  const names = readdirSync(inProject(path)).sort();
+  return names.flatMap((name) => filesBelow(join(path, name)));
 }
 
 /**
@@ -67,7 +55,7 @@ function readEntries(folder) {
  * @throws {Failure} when the build fails; its own lines come first
  */
 export async function requireBuild(children) {
-  const digest = digestOf(projectFolder, sources);
+  const digest = digestOf(readSources());
   const last = existsSync(record) ? readFileSync(record, 'utf8') : '';
   if (last === digest && products.every((file) => existsSync(file))) return;
   const start = performance.now();

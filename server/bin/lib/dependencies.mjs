@@ -44,6 +44,8 @@ export async function requireDependencies(children) {
   const { command, args } = npmCommand();
   const { code } = await children.run(command, [...args, 'ci', '--include=dev'], {
     cwd: projectFolder,
+    // npm would roll back for a while first; half an installation is seen and made whole next time.
+    stopBy: 'SIGKILL',
   });
   if (code !== 0) throw new Failure(`npm ci failed (exit code ${code}).`);
   say(`Packages installed in ${since(start)}.`);

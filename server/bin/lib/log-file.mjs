@@ -11,24 +11,21 @@ export function openLog(file) {
 }
 
 /**
- * The line of a program's log that says best why it ended: the last error, or else the last line.
- * Lines of JSON are read for their message.
+ * The line of a program's log that says best why it ended: the last that begins with an error's
+ * name, or else the last. Stack traces and what Node prints of an error's fields are indented and
+ * do not count; lines of JSON are read for their message.
  * @param {string} text
  * @returns {string} '' when there is no line
  */
 export function lastWords(text) {
   const lines = text
     .split('\n')
-    .filter((line) => !/^\s*(at .*|[{}^]*|Node\.js v.*)$/.test(line))
+    .filter((line) => !/^(\s.*|[{}^]*|Node\.js v.*)$/.test(line))
     .map(messageOf);
-  const words =
-    lines.findLast((line) => /error|fail|cannot|refused|must/i.test(line)) ?? lines.at(-1);
-  return (words ?? '').trim();
+  return (lines.findLast((line) => /^\w*error\b/i.test(line)) ?? lines.at(-1) ?? '').trim();
 }
 
-/**
- * @param {string} file
- */
+/** @param {string} file */
 export function lastWordsIn(file) {
   return lastWords(readFileSync(file, 'utf8'));
 }
@@ -38,7 +35,7 @@ function messageOf(line) {
   if (!line.startsWith('{')) return line;
   try {
     const { msg, err } = JSON.parse(line);
-    return [msg, err?.message].filter((part) => typeof part === 'string').join(': ');
+    return [msg, err?.message || err?.code].filter((part) => typeof part === 'string').join(': ');
   } catch {
     return line;
   }
