@@ -4,7 +4,7 @@ import { createFactors, factor, solveFactored, type Factors } from '../linear/fa
 import { cachedSymbolicLu } from '../linear/symbolic-cache.ts';
 import { createPhasorSystem, type PhasorSystem } from '../stamping/phasor-system.ts';
 import { REFERENCE } from '../stamping/system.ts';
-import { createMachine, singular, type EngineOptions, type Machine } from './machine.ts';
+import { createMachine, singular, type EngineOptions } from './machine.ts';
 import { solveAtRest } from './operating-point.ts';
 import { setPhasorSources, stampPhasor } from './stamp-phasor.ts';
 
