@@ -1,5 +1,6 @@
 import type { RouteObject } from 'react-router-dom';
 import { ErrorPage } from './error-page.tsx';
+import { FirstLoad } from './first-load.tsx';
 import { NotFoundPage } from './not-found-page.tsx';
 import { RoleGate } from './role-gate.tsx';
 import { Shell } from './shell.tsx';
@@ -37,7 +38,7 @@ export const routes: RouteObject[] = [
   {
     element: <Shell />,
     ErrorBoundary: ErrorPage,
-    HydrateFallback: () => null,
+    HydrateFallback: FirstLoad,
     children: [
       ...anyone,
       {

@@ -70,7 +70,12 @@ export const fontSize = {
 
 export const fontFamily = {
   mono: ['JetBrains Mono', 'monospace'],
-  sans: ['Atkinson Hyperlegible Next Variable', 'system-ui', 'sans-serif'],
+  /** it has no Greek: the mono gives Ω and µ */ sans: [
+    'Atkinson Hyperlegible Next Variable',
+    'JetBrains Mono',
+    'system-ui',
+    'sans-serif',
+  ],
 } as const;
 
 export const metric = { header: 52, left: 292, right: 312, dock: 196, meter: 470 } as const;

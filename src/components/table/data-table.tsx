@@ -29,7 +29,7 @@ const TableRow = <Row,>({ columns, row }: { columns: readonly Column<Row>[]; row
           role={index === 0 ? 'rowheader' : 'cell'}
           scope={index === 0 ? 'row' : undefined}
           className={[
-            'grid grid-cols-[112px_1fr] gap-2 py-1 text-left align-top font-normal md:table-cell md:px-3 md:py-2.5',
+            'grid grid-cols-[112px_1fr] gap-2 py-1 text-left font-normal md:table-cell md:align-middle md:px-3 md:py-2.5',
             column.isNumber ? 'md:text-right md:font-mono md:text-sm' : '',
           ].join(' ')}
         >

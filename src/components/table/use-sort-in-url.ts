@@ -21,7 +21,7 @@ export const useSortInUrl = (usual: string) => {
         next.set('sort', `${isDescending ? '-' : ''}${column}`);
         return next;
       },
-      { replace: true },
+      { replace: true, preventScrollReset: true },
     );
   return [sort, setSort] as const;
 };

@@ -16,17 +16,32 @@ const scaleOf = (unit: string): number => (unit.length > 1 ? (scales[unit.charAt
 
 const functionOf = (setting: string): string => setting.split('-')[0] ?? setting;
 
-/** The line of the service data that asks for this reading: same two terminals, same function. */
+/** Those that fit the rule, or all when none does. */
+const preferring = <T>(all: readonly T[], rule: (one: T) => boolean): readonly T[] => {
+  const fitting = all.filter(rule);
+  return fitting.length > 0 ? fitting : all;
+};
+
+/**
+ * The line of the service data that asks for this reading: same terminals and function, and where several
+ * do, the same range and the same way round. None when it stays unclear, and none for an over-range on
+ * another range than the line's: that says nothing about its limits.
+ */
 export const serviceLineOf = (
   reading: ShownReading,
   lines: readonly ServiceMeasurement[],
-): ServiceMeasurement | undefined =>
-  lines.find(
+): ServiceMeasurement | undefined => {
+  const asking = lines.filter(
     ({ between, setting }) =>
       functionOf(setting) === functionOf(reading.setting) &&
       between.includes(reading.red) &&
       between.includes(reading.black),
   );
+  const sameRange = preferring(asking, ({ setting }) => setting === reading.setting);
+  const [line, ...others] = preferring(sameRange, ({ between }) => between[0] === reading.red);
+  if (!line || others.length > 0) return undefined;
+  return reading.value === null && line.setting !== reading.setting ? undefined : line;
+};
 
 export const isWithin = (reading: ShownReading, line: ServiceMeasurement): boolean => {
   const scale = scaleOf(line.unit);

@@ -18,7 +18,9 @@ const Conditions = ({ job }: { job: Job }) => (
     </h2>
     <dl className="grid grid-cols-[92px_1fr] gap-x-4 gap-y-2">
       <dt className="text-ink-2">Condition</dt>
-      <dd>{conditionText(job.condition)}</dd>
+      <dd>
+        <span className="font-semibold">{job.condition}</span>. {conditionText(job.condition)}
+      </dd>
       <dt className="text-ink-2">Level</dt>
       <dd>{levelName(job.level)}</dd>
       <dt className="text-ink-2">Symptom</dt>

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { useNavigate, useParams } from 'react-router-dom';
+import { Link, useNavigate, useParams } from 'react-router-dom';
 import { EmptyState } from '../../components/empty-state.tsx';
 import { Failed } from '../../components/failed.tsx';
 import { Loading } from '../../components/loading.tsx';
@@ -62,7 +62,18 @@ export const Component = () => {
     void navigate(`/scenarios/${made}`, { replace: true });
   };
   return (
-    <Page title={id === 'new' ? 'New scenario' : 'Scenario'} isNarrow>
+    <Page
+      title={id === 'new' ? 'New scenario' : 'Scenario'}
+      lead={
+        <Link
+          to="/scenarios"
+          className="text-base font-semibold text-act underline underline-offset-2"
+        >
+          All scenarios
+        </Link>
+      }
+      isNarrow
+    >
       {ovens.isPending ? (
         <Loading what="the ovens" />
       ) : ovens.isError ? (

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import type { Attempt } from '../../../../shared/contracts/attempts.ts';
+import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
 import { Failed } from '../../../components/failed.tsx';
 import { Loading } from '../../../components/loading.tsx';
 import { useOven } from '../../ovens/api/use-oven.ts';
@@ -11,6 +12,8 @@ import { ReadingsTable } from './readings-table.tsx';
 import { Skills } from './skills.tsx';
 import { Timeline } from './timeline.tsx';
 import { TrueFaults } from './true-faults.tsx';
+
+const noServiceData: readonly ServiceMeasurement[] = [];
 
 /** The debrief of an attempt that was handed in. */
 export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
@@ -38,7 +41,7 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
           <Timeline events={events.data} marks={marks} moment={moment} goTo={goTo} />
           <ReadingsTable
             events={events.data}
-            serviceData={oven.data?.definition.serviceData ?? []}
+            serviceData={oven.data?.definition.serviceData ?? noServiceData}
             goTo={goTo}
           />
         </>

@@ -7,14 +7,16 @@ interface MarkProps {
   goTo: (sequence: number) => void;
 }
 
-const markClasses = 'grid w-full grid-cols-[44px_1fr] gap-x-2 rounded px-2 py-1 text-left';
+const markClasses = 'grid w-full grid-cols-[36px_1fr] gap-x-2 rounded px-2 py-1 text-left';
 
 const MarkLine = ({ mark, moment, goTo }: MarkProps) => {
   const { sequence } = mark;
   const content = (
     <>
       <span className="text-right font-mono text-sm font-semibold">{pointsText(mark.points)}</span>
-      <span>{mark.why}</span>
+      <span className={mark.sequence === null ? '' : 'underline decoration-1 underline-offset-2'}>
+        {mark.why}
+      </span>
     </>
   );
   if (sequence === null) return <div className={markClasses}>{content}</div>;
@@ -23,7 +25,7 @@ const MarkLine = ({ mark, moment, goTo }: MarkProps) => {
       type="button"
       onClick={() => goTo(sequence)}
       aria-current={moment === sequence || undefined}
-      className={`${markClasses} min-h-8 text-act underline decoration-1 underline-offset-2 hover:bg-act-tint aria-[current=true]:bg-act-tint`}
+      className={`${markClasses} min-h-8 text-act hover:bg-act-tint aria-[current=true]:bg-act-tint`}
     >
       {content}
     </button>

@@ -31,7 +31,7 @@ export const useJobFilters = () => {
         }
         return next;
       },
-      { replace: true },
+      { replace: true, preventScrollReset: true },
     );
 
   const matches = (job: Job): boolean =>
