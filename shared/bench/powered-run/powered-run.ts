@@ -1,4 +1,5 @@
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
+import type { PartKindName } from '../../oven/oven.ts';
 import { asFitted } from '../../oven/initial-state.ts';
 import type { RunOutcome } from '../record.ts';
 import { meltingTime } from './fuse-melting.ts';
@@ -76,14 +77,17 @@ function start(oven: DrawnOven, state: OvenState, healthy: Electrical): Started 
   const isAlive = boardIsAlive(oven, state, standby);
   if (!isAlive || !state.isDoorClosed) return { ran: standby, isAlive };
   const running = inFullRun(oven, state);
-  const ran = runElectrically(oven, running);
+  const ran = runElectrically(oven, running, boards);
   const cold = refsOf(oven, 'magnetron').filter(
     (ref) => ran.power(`${ref}:heater`) < emitting * healthy.power(`${ref}:heater`),
   );
   if (cold.length === 0) return { ran, isAlive };
   const hot = (running.hot ?? []).filter((ref) => !cold.includes(ref));
-  return { ran: runElectrically(oven, { ...running, hot }), isAlive };
+  return { ran: runElectrically(oven, { ...running, hot }, boards), isAlive };
 }
+
+/** Judged in standby, and of no weight beside what the relays switch. */
+const boards: readonly PartKindName[] = ['control-board', 'board-transformer'];
 
 const inFullRun = (oven: DrawnOven, state: OvenState): OvenState => ({
   ...state,
@@ -105,7 +109,7 @@ const healthyRuns = new WeakMap<DrawnOven, Electrical>();
 function healthyRun(oven: DrawnOven): Electrical {
   const known = healthyRuns.get(oven);
   if (known) return known;
-  const ran = runElectrically(oven, inFullRun(oven, asFitted(oven.definition, [])));
+  const ran = runElectrically(oven, inFullRun(oven, asFitted(oven.definition, [])), boards);
   healthyRuns.set(oven, ran);
   return ran;
 }

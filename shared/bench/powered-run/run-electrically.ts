@@ -1,13 +1,17 @@
 import { transient } from '../../engine/analyses/transient.ts';
 import type { Gathered } from '../../engine/analyses/summarise.ts';
-import type { Storage } from '../../engine/circuit/circuit.ts';
+import type { Circuit, Storage } from '../../engine/circuit/circuit.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
 import type { PartKindName } from '../../oven/oven.ts';
 import { energisedCircuit } from './energised-circuit.ts';
+import { withoutParasitics } from './without-parasitics.ts';
 
 /** s until the high-voltage side repeats itself, and of mains averaged at its end */
 const settling = 0.3;
 const averaged = 0.1;
+
+/** of one step; means over six cycles come out to a thousandth */
+const relativeTolerance = 1e-3;
 
 export interface Electrical {
   /** A rms */ current: (element: string) => number;
@@ -18,8 +22,12 @@ export interface Electrical {
 export const refsOf = (oven: DrawnOven, kind: PartKindName): string[] =>
   oven.definition.parts.filter((part) => part.kind === kind).map((part) => part.ref);
 
-/** 0.3 s of mains through the oven in this state, and what flowed in the last tenth of a second. */
-export function runElectrically(oven: DrawnOven, state: OvenState): Electrical {
+/** 0.3 s of mains through the oven in this state, less the parts of some kinds, and what flowed in the last tenth of a second. */
+export function runElectrically(
+  oven: DrawnOven,
+  state: OvenState,
+  leftOut: readonly PartKindName[] = [],
+): Electrical {
   const named = (kind: PartKindName, inner: string): string[] =>
     refsOf(oven, kind).map((ref) => `${ref}:${inner}`);
   const currents = [
@@ -37,7 +45,10 @@ export function runElectrically(oven: DrawnOven, state: OvenState): Electrical {
     ...named('magnetron', 'beam'),
     ...named('magnetron', 'threshold'),
   ];
-  const ran = transient(energisedCircuit(oven, state), {
+  const absent = leftOut.flatMap((kind) => refsOf(oven, kind));
+  const circuit = without(withoutParasitics(energisedCircuit(oven, state)), absent);
+  const ran = transient(circuit, {
+    relativeTolerance,
     stop: settling,
     storage: { voltages: {}, currents: {} },
     observe: { from: settling - averaged, currents, powers },
@@ -52,3 +63,8 @@ export function runElectrically(oven: DrawnOven, state: OvenState): Electrical {
     storage,
   };
 }
+
+/** The circuit without the elements of these parts. */
+const without = ({ elements }: Circuit, refs: readonly string[]): Circuit => ({
+  elements: elements.filter(({ name }) => !refs.includes(name.split(/[:.]/)[0] ?? '')),
+});
