@@ -13,4 +13,5 @@ export {
 } from './analyses/port-reduction.ts';
 export { transient, type Transient, type TransientOptions } from './analyses/transient.ts';
 export type { Gathered, Observe, Summary } from './analyses/summarise.ts';
+export { formatQuantity } from './quantities/format-quantity.ts';
 export * from './quantities/physical-constants.ts';

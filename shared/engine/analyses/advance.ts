@@ -6,7 +6,6 @@ import type {
   Result,
   Storage,
 } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { esdirk4 } from '../integration/esdirk-4.ts';
 import { createIntegrator } from './integrator.ts';
 import { createMachine, type EngineOptions } from './machine.ts';
@@ -55,11 +54,10 @@ export function advance(
   duration: number,
   options: AdvanceOptions = {},
 ): Result<Advanced> {
-  const made = createMachine(circuit, options);
+  const made = createMachine(circuit, 'moving', options);
   if (!made.ok) return made;
   const machine = made.value;
-  const fault =
-    voltageLoop(circuit, 'moving') ?? floatingNode(circuit, 'moving') ?? badDuration(duration);
+  const fault = badDuration(duration);
   if (fault !== undefined) return { ok: false, failure: fault };
   forget(machine);
   const integrator = createIntegrator(machine, esdirk4);

@@ -1,5 +1,4 @@
 import type { Circuit, EngineFailure, OperatingPoint, Result } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { mutualInductance } from '../devices/coupling.ts';
 import { stampResistor } from '../devices/resistor.ts';
 import { REFERENCE } from '../stamping/system.ts';
@@ -33,11 +32,8 @@ export interface CompiledCircuit {
 
 /** Compiles a circuit. Fails with bad-element, voltage-loop or floating-node. */
 export function compile(circuit: Circuit, options: EngineOptions = {}): Result<CompiledCircuit> {
-  const made = createMachine(circuit, options);
-  if (!made.ok) return made;
-  const fault = voltageLoop(circuit, 'steady') ?? floatingNode(circuit, 'steady');
-  if (fault !== undefined) return { ok: false, failure: fault };
-  return { ok: true, value: compiled(made.value) };
+  const made = createMachine(circuit, 'steady', options);
+  return made.ok ? { ok: true, value: compiled(made.value) } : made;
 }
 
 function compiled(machine: Machine): CompiledCircuit {

@@ -1,5 +1,6 @@
 import { badElement } from '../circuit/check.ts';
 import type { Circuit, Element, EngineFailure, Result } from '../circuit/circuit.ts';
+import { floatingNode, voltageLoop, type Regime } from '../circuit/loops-and-islands.ts';
 import { buildNetlist, type Netlist } from '../circuit/netlist.ts';
 import { mutualInductance } from '../devices/coupling.ts';
 import { createJunction } from '../devices/diode.ts';
@@ -10,6 +11,7 @@ import { cachedSymbolicLu } from '../linear/symbolic-cache.ts';
 import { thermalVoltage } from '../quantities/physical-constants.ts';
 import { createSystem, type System } from '../stamping/system.ts';
 import { stampAtRest } from './stamp-at-rest.ts';
+import { stampStage } from './stamp-stage.ts';
 
 /** What the engine is told beside the circuit. */
 export interface EngineOptions {
@@ -58,15 +60,27 @@ export interface Machine {
 
 export const GROUND_CONDUCTANCE = 1e-12;
 
-/** Checks the circuit's elements and makes it ready. Fails with bad-element. */
-export function createMachine(circuit: Circuit, options: EngineOptions = {}): Result<Machine> {
-  const fault = badElement(circuit);
+/** s; a middling stage, from which a circuit in motion takes its first order of pivots */
+const TYPICAL_STAGE = 1e-6;
+
+/**
+ * Checks the circuit and makes it ready for analyses at rest or in motion. Fails with bad-element,
+ * voltage-loop or floating-node.
+ */
+export function createMachine(
+  circuit: Circuit,
+  regime: Regime,
+  options: EngineOptions = {},
+): Result<Machine> {
+  const fault =
+    badElement(circuit) ?? voltageLoop(circuit, regime) ?? floatingNode(circuit, regime);
   if (fault !== undefined) return { ok: false, failure: fault };
   const netlist = buildNetlist(circuit);
   const baseConductance = options.groundConductance ?? GROUND_CONDUCTANCE;
   const system = createSystem(netlist, baseConductance);
   const parts = collectParts(netlist, options);
   stampAtRest(system, parts);
+  if (regime === 'moving') stampStage(system, { netlist, ...parts }, TYPICAL_STAGE);
   const found = cachedSymbolicLu(system.pattern, system.values);
   if ('singularColumn' in found) {
     return { ok: false, failure: singular(netlist, found.singularColumn) };

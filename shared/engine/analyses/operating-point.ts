@@ -1,5 +1,4 @@
 import type { Circuit, EngineFailure, OperatingPoint, Result } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { linearise } from '../devices/diode-law.ts';
 import { stampSwitch, switchOverdrive } from '../devices/switch.ts';
 import { restart } from '../linear/factors.ts';
@@ -21,10 +20,8 @@ export function operatingPoint(
   circuit: Circuit,
   options: EngineOptions = {},
 ): Result<OperatingPoint> {
-  const fault = voltageLoop(circuit, 'steady') ?? floatingNode(circuit, 'steady');
-  const made = createMachine(circuit, options);
+  const made = createMachine(circuit, 'steady', options);
   if (!made.ok) return made;
-  if (fault !== undefined) return { ok: false, failure: fault };
   const failure = solveAtRest(made.value, 'rest');
   return failure === undefined
     ? { ok: true, value: readPoint(made.value) }
@@ -95,7 +92,7 @@ function steppingConductance(machine: Machine): NewtonOutcome {
   const { system, baseConductance } = machine;
   fromNothing(machine);
   let outcome: NewtonOutcome = { isSolved: false, iterations: 0, singularColumn: -1 };
-  for (let extra = 1e-2; extra > baseConductance; extra /= 10) {
+  for (let extra = 1e-2; extra > Math.max(baseConductance, 1e-13); extra /= 10) {
     setGroundConductance(system, baseConductance + extra);
     outcome = newton(machine);
     if (!outcome.isSolved) break;

@@ -1,5 +1,4 @@
 import type { Circuit, EngineFailure, NodeName, Result } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { createFactors, factor, solveFactored, type Factors } from '../linear/factors.ts';
 import { cachedSymbolicLu } from '../linear/symbolic-cache.ts';
 import { createPhasorSystem, type PhasorSystem } from '../stamping/phasor-system.ts';
@@ -28,12 +27,10 @@ export function phasor(
   frequencies: readonly number[],
   options: EngineOptions = {},
 ): Result<Phasors> {
-  const made = createMachine(circuit, options);
+  const made = createMachine(circuit, 'steady', options);
   if (!made.ok) return made;
   const machine = made.value;
-  const fault =
-    badFrequency(frequencies) ?? voltageLoop(circuit, 'steady') ?? floatingNode(circuit, 'steady');
-  const failure = fault ?? solveAtRest(machine, 'rest');
+  const failure = badFrequency(frequencies) ?? solveAtRest(machine, 'rest');
   if (failure !== undefined) return { ok: false, failure };
   const { netlist } = machine;
   const phasors: Phasors = { frequency: [], voltages: { '0': [] }, currents: {} };

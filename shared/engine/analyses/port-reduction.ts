@@ -1,5 +1,4 @@
 import type { Circuit, Element, NodeName, Result } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { stampDiode } from '../devices/diode.ts';
 import { factor, solveFactored } from '../linear/factors.ts';
 import { REFERENCE } from '../stamping/system.ts';
@@ -66,9 +65,7 @@ export function reduce(
 
 function machineOf(circuit: Circuit | CompiledCircuit, options: EngineOptions): Result<Machine> {
   if ('machine' in circuit) return { ok: true, value: circuit.machine };
-  const made = createMachine(circuit, options);
-  const fault = voltageLoop(circuit, 'steady') ?? floatingNode(circuit, 'steady');
-  return made.ok && fault !== undefined ? { ok: false, failure: fault } : made;
+  return createMachine(circuit, 'steady', options);
 }
 
 function probeReduced(

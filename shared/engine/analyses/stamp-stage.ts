@@ -1,12 +1,23 @@
 import { stampCapacitorStage } from '../devices/capacitor.ts';
 import { stampCouplingStage } from '../devices/coupling.ts';
 import { stampInductorStage } from '../devices/inductor.ts';
+import type { Coupled } from '../circuit/netlist.ts';
 import type { System } from '../stamping/system.ts';
-import type { Machine } from './machine.ts';
+
+interface Parts {
+  readonly netlist: { readonly coupled: readonly Coupled[] };
+  readonly capacitors: readonly { readonly branch: number; readonly value: number }[];
+  readonly inductors: readonly {
+    readonly branch: number;
+    readonly value: number;
+    readonly resistance: number;
+  }[];
+  readonly mutuals: Float64Array;
+}
 
 /** Writes capacitors, inductors and couplings for an implicit stage of `length` (h gamma, s). */
-export function stampStage(system: System, machine: Machine, length: number): void {
-  const { capacitors, inductors, mutuals, netlist } = machine;
+export function stampStage(system: System, parts: Parts, length: number): void {
+  const { capacitors, inductors, mutuals, netlist } = parts;
   for (let at = 0; at < capacitors.length; at += 1) {
     const { branch, value } = capacitors[at]!;
     stampCapacitorStage(system, branch, value, length);

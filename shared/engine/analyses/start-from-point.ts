@@ -1,5 +1,4 @@
 import type { Circuit, Element, EngineFailure, NodeName } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import type { Integrator } from './integrator.ts';
 import { createMachine, type EngineOptions } from './machine.ts';
 import { solveAtRest } from './operating-point.ts';
@@ -19,9 +18,7 @@ export function startFromPoint(
   options: EngineOptions & { initialVoltages?: Readonly<Record<NodeName, number>> },
 ): EngineFailure | undefined {
   const held = withHeldNodes(circuit, options.initialVoltages ?? {});
-  const fault = voltageLoop(held, 'steady') ?? floatingNode(held, 'steady');
-  if (fault !== undefined) return fault;
-  const made = createMachine(held, options);
+  const made = createMachine(held, 'steady', options);
   if (!made.ok) return made.failure;
   const failure = solveAtRest(made.value, 'start');
   if (failure !== undefined) return failure;

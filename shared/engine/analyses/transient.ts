@@ -6,7 +6,6 @@ import type {
   Result,
   Storage,
 } from '../circuit/circuit.ts';
-import { floatingNode, voltageLoop } from '../circuit/loops-and-islands.ts';
 import { trBdf2 } from '../integration/tr-bdf2.ts';
 import { createIntegrator, type Integrator } from './integrator.ts';
 import { createMachine, type EngineOptions, type Machine } from './machine.ts';
@@ -52,10 +51,9 @@ const SUMMARY_TOLERANCE = 1e-4;
  * Fails with bad-element, voltage-loop, floating-node, or not-converged with the time.
  */
 export function transient(circuit: Circuit, options: TransientOptions): Result<Transient> {
-  const made = createMachine(circuit, options);
+  const made = createMachine(circuit, 'moving', options);
   if (!made.ok) return made;
-  const fault =
-    badOptions(options) ?? voltageLoop(circuit, 'moving') ?? floatingNode(circuit, 'moving');
+  const fault = badOptions(options);
   if (fault !== undefined) return { ok: false, failure: fault };
   const machine = made.value;
   forget(machine);
