@@ -1,4 +1,5 @@
 import type { Wave } from './circuit.ts';
+import { cornerWidth } from './wave-value.ts';
 
 /** d/dt of a source's wave (V/s or A/s) at a time (s); at a corner, of the side asked for. */
 export function waveSlope(wave: Wave, time: number, side: -1 | 1): number {
@@ -21,7 +22,7 @@ export function waveSlope(wave: Wave, time: number, side: -1 | 1): number {
 function pulseSlope(wave: Extract<Wave, { shape: 'pulse' }>, time: number, side: -1 | 1): number {
   const { low, high, rise, fall, width, period } = wave;
   // the same nudge off a corner as the wave's value takes
-  let at = time - wave.delay + side * 1e-12 * (Math.abs(time) + rise + width + fall);
+  let at = time - wave.delay + side * cornerWidth(time);
   if (at < 0) return 0;
   if (period > 0) at -= period * Math.floor(at / period);
   if (at < rise) return (high - low) / rise;

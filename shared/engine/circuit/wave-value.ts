@@ -27,10 +27,14 @@ export function waveValue(wave: Wave, time: number, side: -1 | 1 = 1): number {
   }
 }
 
+/** s within which a time is taken to be at a corner, and on the side of it that is asked for. */
+export function cornerWidth(time: number): number {
+  return 1e-12 * Math.abs(time) + 1e-18;
+}
+
 function pulseValue(wave: Extract<Wave, { shape: 'pulse' }>, time: number, side: -1 | 1): number {
   const { low, high, rise, fall, width, period } = wave;
-  // a corner is met exactly: times within a rounding of it take the side asked for
-  const nudge = side * 1e-12 * (Math.abs(time) + rise + width + fall);
+  const nudge = side * cornerWidth(time);
   let since = time - wave.delay;
   if (since + nudge < 0) return low;
   if (period > 0) since -= period * Math.floor((since + nudge) / period);
