@@ -35,6 +35,13 @@ const administrator: RouteObject[] = [
 ];
 
 export const routes: RouteObject[] = [
+  // The bench fills the window and has a header of its own.
+  {
+    path: 'bench/:attempt',
+    ErrorBoundary: ErrorPage,
+    HydrateFallback: FirstLoad,
+    lazy: () => import('../bench/bench-page.tsx'),
+  },
   {
     element: <Shell />,
     ErrorBoundary: ErrorPage,

@@ -3,62 +3,76 @@ import type { StoreApi } from 'zustand/vanilla';
 import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { BenchCommand } from '../../shared/bench/catalogue.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
+import type { MeterView } from '../../shared/bench/reading.ts';
 import { runCommand } from '../../shared/bench/run-command.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
+import type { Condition } from '../../shared/scenario/scenario.ts';
 import { tapWith } from '../bench/tools/catalogue.ts';
+import { takenOff } from '../bench/tools/taken-off.ts';
 import type { Hand } from '../bench/tools/tool.ts';
 import { emptyHand } from '../bench/tools/tool.ts';
 import type { BenchClock } from './bench-clock.ts';
-import type { SaveState } from './outbox.ts';
+import { isClosedTo, type SaveState } from './save-state.ts';
 
 /** What is picked out on the bench: the panel beside it says what can be done there. */
-export type Selection = { kind: 'target'; ref: string } | { kind: 'part'; ref: string } | null;
+export type Selection =
+  { kind: 'target'; ref: string } | { kind: 'part'; ref: string } | { kind: 'lead'; ref: string };
 
-/** What the bench has to say: a refusal to act on, or a hazard that happened. */
+/** What the bench has to say: a refusal to act on, or a hazard that happened. `id` counts up, so that the same words twice are news twice. */
 export type Notice =
-  | { kind: 'refusal'; text: string }
-  | { kind: 'hazard'; event: WireEvent; stepBack: number }
-  | null;
+  { kind: 'refusal'; id: number; text: string } | { kind: 'hazard'; id: number; event: WireEvent };
 
 export interface BenchStore {
   setup: Setup;
+  condition: Condition;
   state: BenchState;
   /** the whole record so far, sequence 0 first */ events: readonly WireEvent[];
   hand: Hand;
-  selection: Selection;
-  hovered: string | null;
-  focused: string | null;
-  notice: Notice;
+  selection: Selection | null;
+  /** a target, lead or part under the pointer */ hovered: string | null;
+  /** the one with the keyboard's focus */ focused: string | null;
+  notice: Notice | null;
+  /** what the display shows now; null: nothing */ view: MeterView | null;
   save: SaveState;
   clock: BenchClock;
   /** Runs a command now, or at `atMs`; false when the bench refuses. */
   run: (command: BenchCommand, atMs?: number) => boolean;
   /** A tap on bare metal, with what the hand holds. */ tap: (target: string) => void;
-  take: (hand: Hand) => void;
+  /** Into the hand; what is connected somewhere comes off first. */ take: (hand: Hand) => void;
   putDown: () => void;
-  select: (selection: Selection) => void;
-  hover: (target: string | null) => void;
-  focus: (target: string | null) => void;
+  /** What was dragged is let go over a target, or over nothing. */ drop: (
+    target: string | null,
+  ) => void;
+  select: (selection: Selection | null) => void;
+  hover: (ref: string | null) => void;
+  focus: (ref: string | null) => void;
   dismiss: () => void;
+  show: (view: MeterView | null) => void;
   setSave: (save: SaveState) => void;
   /** Passes `ms` of bench time at once. */ wait: (ms: number) => void;
+  /** Start pressed for so many seconds: bench time goes on to the end of the run. */
+  operate: (seconds: number) => void;
 }
 
 export interface BenchStoreOptions {
   setup: Setup;
+  condition: Condition;
   state: BenchState;
   events: readonly WireEvent[];
   clock: BenchClock;
-  /** the reader may not act: another tab writes, or it is a replay */ isReadOnly: boolean;
+  save: SaveState;
   onEvents: (events: readonly WireEvent[]) => void;
 }
 
+type Set = StoreApi<BenchStore>['setState'];
+type Get = StoreApi<BenchStore>['getState'];
+
 /** One bench's own state: what the hand is doing, and the fold of the record so far. */
 export function benchStore(options: BenchStoreOptions): StoreApi<BenchStore> {
-  const { setup, clock, onEvents } = options;
   return createStore<BenchStore>()((set, get) => ({
-    setup,
-    clock,
+    setup: options.setup,
+    condition: options.condition,
+    clock: options.clock,
     state: options.state,
     events: options.events,
     hand: emptyHand,
@@ -66,29 +80,66 @@ export function benchStore(options: BenchStoreOptions): StoreApi<BenchStore> {
     hovered: null,
     focused: null,
     notice: null,
-    save: options.isReadOnly ? { kind: 'read-only', why: 'This bench is only shown.' } : { kind: 'saved' },
-
-    run: (command, atMs) => {
-      const { state, events, save } = get();
-      if (save.kind === 'read-only' || save.kind === 'refused') {
-        set({ notice: { kind: 'refusal', text: save.why } });
-        return false;
-      }
-      const ran = runCommand(setup, state, command, Math.max(atMs ?? clock.now(), state.benchMs));
-      if (!ran.ok) {
-        set({ notice: { kind: 'refusal', text: ran.refusal.message } });
-        return false;
-      }
-      const hazard = ran.events.find((event) => event.type === 'HazardHappened');
-      set({
-        state: ran.state,
-        events: [...events, ...ran.events],
-        notice: hazard ? { kind: 'hazard', event: hazard, stepBack: events.length } : null,
-      });
-      onEvents(ran.events);
-      return true;
+    view: null,
+    save: options.save,
+    ...acting(options, set, get),
+    ...handling(set, get),
+    select: (selection) => set({ selection }),
+    hover: (hovered) => {
+      if (get().hovered !== hovered) set({ hovered });
     },
+    focus: (focused) => {
+      if (get().focused !== focused) set({ focused });
+    },
+    dismiss: () => set({ notice: null }),
+    show: (view) => set({ view }),
+    setSave: (save) => set({ save }),
+  }));
+}
 
+function acting(
+  { setup, clock, onEvents }: BenchStoreOptions,
+  set: Set,
+  get: Get,
+): Pick<BenchStore, 'run' | 'wait' | 'operate'> {
+  const refuse = (text: string): false => {
+    set({ notice: { kind: 'refusal', id: nextId(get().notice), text } });
+    return false;
+  };
+  const run: BenchStore['run'] = (command, atMs) => {
+    const { state, events, save, notice } = get();
+    if (isClosedTo(save)) return refuse(save.why);
+    const ran = runCommand(setup, state, command, Math.max(atMs ?? clock.now(), state.benchMs));
+    if (!ran.ok) return refuse(ran.refusal.message);
+    const hazard = ran.events.find((event) => event.type === 'HazardHappened');
+    const isStillNews = notice?.kind === 'hazard' && command.type === 'TakeReading';
+    set({
+      state: ran.state,
+      events: [...events, ...ran.events],
+      notice: hazard
+        ? { kind: 'hazard', id: nextId(notice), event: hazard }
+        : isStillNews
+          ? notice
+          : null,
+    });
+    onEvents(ran.events);
+    return true;
+  };
+  const pass = (ms: number, command: BenchCommand): void => {
+    clock.skip(ms);
+    if (!run(command)) clock.skip(-ms);
+  };
+  return {
+    run,
+    wait: (ms) => pass(ms, { type: 'Wait', data: { ms } }),
+    operate: (seconds) => pass(seconds * 1000, { type: 'RunOven', data: { ordered: seconds } }),
+  };
+}
+
+const nextId = (notice: Notice | null): number => (notice?.id ?? 0) + 1;
+
+function handling(set: Set, get: Get): Pick<BenchStore, 'tap' | 'take' | 'putDown' | 'drop'> {
+  return {
     tap: (target) => {
       const { hand, state, run } = get();
       const tapped = tapWith(hand, target, state);
@@ -98,25 +149,25 @@ export function benchStore(options: BenchStoreOptions): StoreApi<BenchStore> {
       }
       if (tapped.command === null || run(tapped.command)) set({ hand: tapped.hand });
     },
-
-    take: (hand) => set({ hand, notice: null }),
+    take: (hand) => {
+      const { state, run, putDown } = get();
+      putDown();
+      const off = takenOff(hand, state);
+      if (off === null || run(off)) set({ hand, selection: null });
+    },
+    drop: (target) => {
+      const { hand, tap, putDown } = get();
+      if (target === null) return putDown();
+      tap(target);
+      // The next tool comes to the hand only when tools are carried from place to place by tapping.
+      if (hand.kind !== 'discharge-tip' || get().hand !== hand) set({ hand: emptyHand });
+    },
     putDown: () => {
       const { hand, state, run } = get();
-      if (hand.kind === 'discharge-tip' && state.discharge.tip) {
+      // The tip of the discharge lead is held by hand: let go, it is off.
+      if (hand.kind === 'discharge-tip' && state.discharge.tip)
         run({ type: 'LiftDischargeTip', data: {} });
-      }
-      set({ hand: emptyHand });
+      if (hand.kind !== 'empty') set({ hand: emptyHand });
     },
-    select: (selection) => set({ selection }),
-    hover: (hovered) => get().hovered !== hovered && set({ hovered }),
-    focus: (focused) => set({ focused }),
-    dismiss: () => set({ notice: null }),
-    setSave: (save) => set({ save }),
-
-    wait: (ms) => {
-      const { run } = get();
-      clock.skip(ms);
-      if (!run({ type: 'Wait', data: { ms } })) clock.skip(-ms);
-    },
-  }));
+  };
 }

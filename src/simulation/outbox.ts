@@ -1,121 +1,81 @@
 import type { WireEvent } from '../../shared/bench/event.ts';
 import type { OutboxStore } from './outbox-store.ts';
-
-/** What the trainee is told about their record. */
-export type SaveState =
-  | { kind: 'saved' }
-  | { kind: 'saving' }
-  /** kept on this device, tried again */ | { kind: 'waiting'; steps: number; why: string }
-  /** another tab writes now */ | { kind: 'read-only'; why: string }
-  /** the server refuses a step; nothing is thrown away */
-  | { kind: 'refused'; steps: number; why: string };
-
-/** How one batch fared at the server. */
-export type Sent =
-  | { kind: 'stored'; next: number }
-  | { kind: 'gap'; expected: number }
-  | { kind: 'another-writer'; why: string }
-  | { kind: 'refused'; why: string }
-  | { kind: 'away'; why: string };
+import type { SaveState } from './save-state.ts';
+import { stepQueue, type Sent, type Stop } from './step-queue.ts';
 
 export interface Outbox {
   /** events of whole decisions, in order */ add: (events: readonly WireEvent[]) => void;
-  /** resolves when nothing waits, or when it cannot go on */ flush: () => Promise<SaveState>;
+  /** resolves when nothing waits, or when it cannot go on now */ flush: () => Promise<SaveState>;
   stop: () => void;
 }
 
 export interface OutboxOptions {
   attempt: string;
   /** sequence number the server expects next */ next: number;
-  waiting: readonly (readonly WireEvent[])[];
+  /** whole decisions kept on this device, first `next` */ waiting: readonly (readonly WireEvent[])[];
   store: OutboxStore;
   send: (from: number, events: readonly WireEvent[]) => Promise<Sent>;
   onState: (state: SaveState) => void;
-  /** ms before trying again; grows to ten times */ retryMs?: number;
+  /** ms since 1970 */ now: () => number;
+  /** ms before trying again; doubles up to ten times this */ retryMs?: number;
 }
 
-/**
- * Sends steps in order, one batch at a time. A batch is frozen when first sent, so that a repeat can
- * be recognised, and a step is forgotten only when the server says that it is stored.
- */
+/** Sends steps in order, one batch at a time, and keeps on this device what the server has not confirmed. */
 export function outbox(options: OutboxOptions): Outbox {
-  const retry = options.retryMs ?? 1500;
-  let queue: (readonly WireEvent[])[] = [...options.waiting];
-  let next = options.next;
-  let frozen: readonly WireEvent[] | null = null;
+  const { attempt, store, retryMs: retry = 1500 } = options;
+  const queue = stepQueue(options.next, options.waiting);
   let working: Promise<SaveState> | null = null;
   let wait = retry;
+  let last: SaveState = { kind: 'saved', at: null };
   let isStopped = false;
   let timer: ReturnType<typeof setTimeout> | undefined;
 
-  const steps = (): number =>
-    (frozen?.length ?? 0) + queue.reduce((sum, decision) => sum + decision.length, 0);
   const tell = (state: SaveState): SaveState => {
+    last = state;
     options.onState(state);
     return state;
   };
-
-  const freeze = (): readonly WireEvent[] => {
-    const batch: WireEvent[] = [];
-    while (queue[0] && batch.length + queue[0].length <= 200) batch.push(...(queue.shift() ?? []));
-    return batch;
-  };
-
-  const sendAll = async (): Promise<SaveState> => {
-    while (!isStopped && (frozen || queue.length > 0)) {
-      frozen ??= freeze();
-      tell({ kind: 'saving' });
-      const sent = await options.send(next, frozen);
-      switch (sent.kind) {
-        case 'stored':
-          next = sent.next;
-          frozen = null;
-          wait = retry;
-          await options.store.acknowledge(options.attempt, next);
-          break;
-        case 'gap': {
-          const missing = next - sent.expected;
-          // The server has all or part of the frozen batch already: only the rest is still to go.
-          if (missing > 0 || sent.expected > next + frozen.length) {
-            return tell({
-              kind: 'refused',
-              steps: steps(),
-              why: `The record expects step ${sent.expected}, this device is at ${next}.`,
-            });
-          }
-          frozen = frozen.slice(-missing);
-          next = sent.expected;
-          if (frozen.length === 0) frozen = null;
-          break;
-        }
-        case 'another-writer':
-          isStopped = true;
-          return tell({ kind: 'read-only', why: sent.why });
-        case 'refused':
-          isStopped = true;
-          return tell({ kind: 'refused', steps: steps(), why: sent.why });
-        case 'away':
-          timer = setTimeout(() => void flush(), wait);
-          wait = Math.min(wait * 2, 10 * retry);
-          return tell({ kind: 'waiting', steps: steps(), why: sent.why });
-      }
+  const halt = ({ kind, why }: Stop): SaveState => {
+    const steps = queue.steps();
+    if (kind === 'waiting') {
+      timer = setTimeout(() => void flush(), wait);
+      wait = Math.min(wait * 2, 10 * retry);
+      return tell({ kind, why, steps, isKept: store.isKept });
     }
-    return tell({ kind: 'saved' });
+    isStopped = true;
+    return tell(kind === 'refused' ? { kind, why, steps } : { kind, why });
   };
-
+  const sendAll = async (): Promise<SaveState> => {
+    const isAny = queue.steps() > 0;
+    try {
+      while (!isStopped && queue.steps() > 0) {
+        tell({ kind: 'saving', steps: queue.steps() });
+        const stop = queue.settle(await options.send(queue.next(), queue.batch()));
+        if (stop) return isStopped ? last : halt(stop);
+        wait = retry;
+        // Steps that stay kept although the server has them are compared and dropped at the next opening.
+        await store.acknowledge(attempt, queue.next()).catch(() => undefined);
+      }
+      return isStopped || !isAny ? last : tell({ kind: 'saved', at: options.now() });
+    } finally {
+      // No await after the last look at the queue: a step added from now on starts a new round.
+      working = null;
+    }
+  };
   const flush = (): Promise<SaveState> => {
     clearTimeout(timer);
-    working ??= sendAll().finally(() => {
-      working = null;
-    });
-    return working;
+    if (working) return working;
+    const round = sendAll();
+    // A round that had nothing to wait for is over already.
+    if (queue.steps() > 0 && !isStopped) working = round;
+    return round;
   };
-
   return {
     add: (events) => {
-      const from = next + steps();
-      queue = [...queue, events];
-      void options.store.add(options.attempt, from, events).then(flush, flush);
+      const kept = store.add(attempt, queue.next() + queue.steps(), events);
+      queue.add(events);
+      if (last.kind !== 'waiting') void kept.then(flush, flush);
+      else tell({ ...last, steps: queue.steps() });
     },
     flush,
     stop: () => {

@@ -1,6 +1,7 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import { batteryClip } from './battery-clip.ts';
 import { dischargeClip, dischargeTip } from './discharge-lead.ts';
+import { label } from './label.ts';
 import { lead } from './lead.ts';
 import { pad } from './pad.ts';
 import { probe } from './probe.ts';
@@ -16,6 +17,7 @@ const tools: { [K in Exclude<Hand['kind'], 'empty'>]: ToolOf<K> } = {
   'discharge-tip': dischargeTip,
   'battery-clip': batteryClip,
   lead,
+  label,
   pad,
   screwdriver,
 };

@@ -1,4 +1,4 @@
-import type { Hand, Tool } from './tool.ts';
+import type { Hand, Tapped, Tool } from './tool.ts';
 import { emptyHand } from './tool.ts';
 
 type ClipHand = Extract<Hand, { kind: 'discharge-clip' }>;
@@ -21,7 +21,7 @@ export const dischargeTip: Tool<TipHand> = {
     state.discharge.clip === null
       ? 'The clip is on nothing: the tip alone discharges nothing.'
       : 'Tap a terminal and hold for a few seconds, then the next one.',
-  tap: (hand, target, state) =>
+  tap: (hand, target, state): Tapped =>
     state.discharge.tip === target
       ? { command: { type: 'LiftDischargeTip', data: {} }, hand: emptyHand }
       : { command: { type: 'TouchDischargeTip', data: { target } }, hand },

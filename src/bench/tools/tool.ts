@@ -9,6 +9,7 @@ export type Hand =
   | { kind: 'discharge-tip' }
   | { kind: 'battery-clip'; clip: 'neg' | 'oneK' }
   | { kind: 'lead'; end: string }
+  | { kind: 'label' }
   | { kind: 'pad' }
   | { kind: 'screwdriver'; from: string | null };
 

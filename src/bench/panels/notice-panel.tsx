@@ -1,0 +1,58 @@
+import { OctagonAlert, TriangleAlert } from 'lucide-react';
+import { hazard } from '../../../shared/bench/record.ts';
+import { useBench } from '../../simulation/bench-context.ts';
+import { hazardWords, type HazardData } from './hazard-words.ts';
+import { BenchButton } from './bench-button.tsx';
+import { IconX } from './icon-x.tsx';
+
+const Row = ({ label, text }: { label: string; text: string }) => (
+  <div className="grid grid-cols-[76px_1fr] gap-2">
+    <dt className="font-semibold">{label}</dt>
+    <dd>{text}</dd>
+  </div>
+);
+
+const HazardNotice = ({ data, onClose }: { data: HazardData; onClose: () => void }) => {
+  const isGuided = useBench(({ condition }) => condition === 'guided');
+  const words = hazardWords(data);
+  return (
+    <section
+      aria-label="Hazard"
+      className="pointer-events-auto grid w-[520px] max-w-full gap-2.5 rounded-lg border-2 border-danger-lamp bg-mat-deep p-4 text-bench-ink shadow-xl"
+    >
+      <p className="flex items-center gap-2 text-lg font-bold">
+        <OctagonAlert aria-hidden size={22} className="shrink-0 text-danger-lamp" />
+        {words.title}
+      </p>
+      <p>{words.happened}</p>
+      <dl className="grid gap-1.5 text-sm">
+        <Row label="On you" text={words.person} />
+        <Row label="The meter" text={words.meter} />
+        {isGuided ? <Row label="First" text={words.first} /> : null}
+      </dl>
+      <div className="flex flex-wrap items-center justify-between gap-3">
+        <p className="text-sm text-bench-ink-2">This is in the record.</p>
+        <BenchButton isMain onClick={onClose}>
+          Go on
+        </BenchButton>
+      </div>
+    </section>
+  );
+};
+
+/** What the bench has to say: why not, or what just happened. */
+export const NoticePanel = () => {
+  const notice = useBench((store) => store.notice);
+  const dismiss = useBench((store) => store.dismiss);
+  if (!notice) return null;
+  if (notice.kind === 'refusal')
+    return (
+      <div className="pointer-events-auto flex max-w-[560px] items-center gap-2 rounded-md border border-caution bg-mat-deep py-1 pr-1 pl-3 text-bench-ink shadow-lg">
+        <TriangleAlert aria-hidden size={18} className="shrink-0 text-caution" />
+        <p className="text-sm">{notice.text}</p>
+        <IconX name="Close this note" onPress={dismiss} />
+      </div>
+    );
+  const parsed = hazard.safeParse(notice.event.data);
+  return parsed.success ? <HazardNotice data={parsed.data} onClose={dismiss} /> : null;
+};

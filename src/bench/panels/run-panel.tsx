@@ -1,0 +1,52 @@
+import { useEffect, useRef } from 'react';
+import { useBench } from '../../simulation/bench-context.ts';
+import { BenchButton } from './bench-button.tsx';
+import { IconX } from './icon-x.tsx';
+import { runWords } from './run-words.ts';
+
+const orders = [
+  [10, '10 s'],
+  [30, '30 s'],
+  [60, '1 min'],
+  [120, '2 min'],
+] as const;
+
+/** The control panel's keys, and what the last run looked, sounded and felt like. */
+export const RunPanel = ({ onClose }: { onClose: () => void }) => {
+  const operate = useBench((store) => store.operate);
+  const last = useBench(({ state }) => state.runs.at(-1));
+  const panel = useRef<HTMLElement>(null);
+  useEffect(() => panel.current?.focus(), []);
+  return (
+    <section
+      ref={panel}
+      tabIndex={-1}
+      aria-label="Run the oven"
+      className="absolute bottom-2 left-2 z-[3] grid w-[320px] max-w-[calc(100%-16px)] gap-2.5 rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
+    >
+      <div className="flex items-start justify-between gap-2">
+        <p className="text-sm">
+          A jug of 1000 g of water stands inside. Set a time and press start.
+        </p>
+        <IconX name="Close" onPress={onClose} />
+      </div>
+      <div className="flex flex-wrap gap-2">
+        {orders.map(([seconds, name]) => (
+          <BenchButton key={seconds} onClick={() => operate(seconds)}>
+            Run {name}
+          </BenchButton>
+        ))}
+      </div>
+      {last ? (
+        <dl aria-label="Last run" className="grid gap-1 border-t border-bench-line pt-2 text-sm">
+          {runWords(last).map(({ label, value }) => (
+            <div key={label} className="grid grid-cols-[84px_1fr]">
+              <dt className="text-bench-ink-2">{label}</dt>
+              <dd className="font-semibold">{value}</dd>
+            </div>
+          ))}
+        </dl>
+      ) : null}
+    </section>
+  );
+};

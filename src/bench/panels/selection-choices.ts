@@ -1,0 +1,223 @@
+import type { BenchState } from '../../../shared/bench/bench-state.ts';
+import type { BenchCommand } from '../../../shared/bench/catalogue.ts';
+import type { OvenDefinition } from '../../../shared/oven/oven.ts';
+import { describeTarget, liftedEnds, terminalsOf } from '../../../shared/oven/targets.ts';
+import type { Selection } from '../../simulation/bench-store.ts';
+import type { Hand } from '../tools/tool.ts';
+import { seatedEnds } from './seated-ends.ts';
+
+/** One thing that can be done with what is picked out. */
+export type Choice =
+  | { kind: 'command'; label: string; command: BenchCommand }
+  | { kind: 'take'; label: string; hand: Hand }
+  /** asks for the text of the tag first */
+  | { kind: 'label'; label: string; end: string; text: string }
+  | { kind: 'go'; label: string; to: Selection };
+
+export interface ChoiceGroup {
+  title: string;
+  choices: readonly Choice[];
+}
+
+export interface Choices {
+  /** `C1.2` */ ref: string;
+  /** in words */ name: string;
+  groups: readonly ChoiceGroup[];
+}
+
+/** What can be done with what is picked out, the likeliest first; null when it is no longer there. */
+export function choicesFor(
+  definition: OvenDefinition,
+  state: BenchState,
+  selection: Selection,
+): Choices | null {
+  switch (selection.kind) {
+    case 'target':
+      return targetChoices(definition, state, selection.ref);
+    case 'part':
+      return partChoices(definition, state, selection.ref);
+    case 'lead':
+      return leadChoices(definition, state, selection.ref);
+  }
+}
+
+function targetChoices(definition: OvenDefinition, state: BenchState, ref: string): Choices | null {
+  const name = describeTarget(definition, ref);
+  const isEnd = ref in state.oven.leadEnds;
+  // A connector that was refitted hides its metal.
+  if (name === null || (isEnd && state.oven.leadEnds[ref] !== null)) return null;
+  const terminal = terminalsOf(definition).find((one) => one.ref === ref);
+  const groups: ChoiceGroup[] = [
+    { title: 'Meter', choices: [probeChoice(state, 'red', ref), probeChoice(state, 'black', ref)] },
+    {
+      title: isEnd ? 'This lead end' : 'Leads here',
+      choices: isEnd
+        ? looseEndChoices(definition, state, ref)
+        : [
+            ...seatedEnds(state.oven, ref).flatMap((end) =>
+              seatedEndChoices(definition, state, end),
+            ),
+            ...fitChoices(definition, state, ref),
+          ],
+    },
+    { title: 'Discharge and battery', choices: toolChoices(state, ref) },
+    {
+      title: 'More',
+      choices: [
+        ...(terminal?.kind.isVarnished && !state.oven.cleaned.includes(ref)
+          ? [command('Clean a spot with the pad', { type: 'CleanSpot', data: { terminal: ref } })]
+          : []),
+        { kind: 'take', label: 'Screwdriver blade here', hand: { kind: 'screwdriver', from: ref } },
+        ...(terminal && terminal.part !== 'CH'
+          ? [
+              {
+                kind: 'go' as const,
+                label: `Part ${terminal.part}`,
+                to: { kind: 'part' as const, ref: terminal.part },
+              },
+            ]
+          : []),
+      ],
+    },
+  ];
+  return { ref, name: name.replace(`${ref}, `, ''), groups: groups.filter(hasAny) };
+}
+
+const hasAny = ({ choices }: ChoiceGroup): boolean => choices.length > 0;
+const command = (label: string, it: BenchCommand): Choice => ({
+  kind: 'command',
+  label,
+  command: it,
+});
+
+const probeChoice = (state: BenchState, probe: 'red' | 'black', target: string): Choice =>
+  state.probes[probe] === target
+    ? command(`Take the ${probe} probe off`, { type: 'RemoveProbe', data: { probe } })
+    : command(`${probe === 'red' ? 'Red' : 'Black'} probe here`, {
+        type: 'PlaceProbe',
+        data: { probe, target },
+      });
+
+const labelChoice = (state: BenchState, end: string, text: string): Choice => {
+  const now = state.labels[end];
+  return now === undefined
+    ? { kind: 'label', label: `Label ${end}`, end, text }
+    : { kind: 'label', label: `Change the label of ${end}`, end, text: now };
+};
+
+const leadName = (definition: OvenDefinition, end: string): string =>
+  definition.leads.find(({ ref }) => ref === end.split('/')[0])?.name ?? end;
+
+const seatedEndChoices = (definition: OvenDefinition, state: BenchState, end: string): Choice[] => [
+  command(`Lift ${end}, ${leadName(definition, end)}`, { type: 'LiftLead', data: { end } }),
+  labelChoice(state, end, state.oven.leadEnds[end] ?? end),
+];
+
+const looseEndChoices = (definition: OvenDefinition, state: BenchState, end: string): Choice[] => [
+  ...homeOf(definition, end).map((terminal) =>
+    command(`Refit on ${terminal}`, { type: 'RefitLead', data: { end, terminal } }),
+  ),
+  { kind: 'take', label: 'Take it to another terminal', hand: { kind: 'lead', end } },
+  labelChoice(state, end, homeOf(definition, end)[0] ?? end),
+];
+
+const homeOf = (definition: OvenDefinition, end: string): string[] => {
+  const [ref, side] = end.split('/');
+  const lead = definition.leads.find((one) => one.ref === ref);
+  return lead ? [lead.ends[side === 'a' ? 0 : 1]] : [];
+};
+
+/** Lifted ends could go on any terminal, also a wrong one; those that belong here come first. */
+const fitChoices = (definition: OvenDefinition, state: BenchState, terminal: string): Choice[] =>
+  liftedEnds(state.oven)
+    .toSorted(
+      (a, b) =>
+        Number(homeOf(definition, b)[0] === terminal) -
+        Number(homeOf(definition, a)[0] === terminal),
+    )
+    .map((end) =>
+      command(
+        `Fit ${end} here${state.labels[end] === undefined ? '' : `, labelled ${state.labels[end]}`}`,
+        { type: 'RefitLead', data: { end, terminal } },
+      ),
+    );
+
+function toolChoices({ discharge, battery }: BenchState, target: string): Choice[] {
+  const tools: Choice[] = [
+    discharge.clip === target
+      ? command('Take the discharge clip off', { type: 'RemoveDischargeClip', data: {} })
+      : command('Discharge clip here', { type: 'FitDischargeClip', data: { target } }),
+    discharge.tip === target
+      ? command('Take the discharge tip off', { type: 'LiftDischargeTip', data: {} })
+      : command('Discharge tip here', { type: 'TouchDischargeTip', data: { target } }),
+  ];
+  const clips: Choice[] = (['neg', 'oneK'] as const).map((clip) => {
+    const name = clip === 'neg' ? 'battery negative' : 'battery 1 kΩ';
+    return battery[clip] === target
+      ? command(`Take ${name} off`, { type: 'UnclipBattery', data: { clip } })
+      : command(`${name[0]?.toUpperCase()}${name.slice(1)} here`, {
+          type: 'ClipBattery',
+          data: { clip, target },
+        });
+  });
+  return target.startsWith('BAT.') ? tools : [...tools, ...clips];
+}
+
+function partChoices(definition: OvenDefinition, state: BenchState, ref: string): Choices | null {
+  const part = definition.parts.find((one) => one.ref === ref);
+  if (!part) return null;
+  const isPressed = state.oven.pressed.includes(ref);
+  const press: Choice[] =
+    part.kind !== 'door-switch'
+      ? []
+      : [
+          isPressed
+            ? command('Let the actuator go', { type: 'ReleaseSwitch', data: { part: ref } })
+            : command('Hold the actuator pressed', { type: 'PressSwitch', data: { part: ref } }),
+        ];
+  const groups: ChoiceGroup[] = [
+    {
+      title: 'This part',
+      choices: [
+        command('Look at it from close', { type: 'InspectPart', data: { part: ref } }),
+        ...press,
+        ...(part.kind === 'chassis'
+          ? []
+          : [command('Replace it with a new one', { type: 'ReplacePart', data: { part: ref } })]),
+      ],
+    },
+    {
+      title: 'Its terminals',
+      choices: terminalsOf(definition)
+        .filter((one) => one.part === ref)
+        .map((one) => ({
+          kind: 'go' as const,
+          label: `${one.ref}, ${one.kind.name}`,
+          to: { kind: 'target' as const, ref: one.ref },
+        })),
+    },
+  ];
+  return { ref, name: part.name, groups: groups.filter(hasAny) };
+}
+
+function leadChoices(definition: OvenDefinition, state: BenchState, ref: string): Choices | null {
+  const lead = definition.leads.find((one) => one.ref === ref);
+  if (!lead) return null;
+  const groups = (['a', 'b'] as const).map((side, i): ChoiceGroup => {
+    const end = `${ref}/${side}`;
+    const seat = state.oven.leadEnds[end] ?? null;
+    return seat === null
+      ? {
+          title: `${end}, lifted, end for ${lead.ends[i]}`,
+          choices: looseEndChoices(definition, state, end),
+        }
+      : {
+          title: `${end}, on ${seat}`,
+          choices: [
+            command(`Lift ${end} off ${seat}`, { type: 'LiftLead', data: { end } }),
+            labelChoice(state, end, seat),
+          ],
+        };
+  });
+  return { ref, name: lead.name, groups };
+}

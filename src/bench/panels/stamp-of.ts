@@ -1,0 +1,35 @@
+import type { OvenPart } from '../../../shared/oven/oven.ts';
+import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
+
+/** What is printed on a part: its rating, never its drawn value. */
+export function stampOf(part: OvenPart): string[] {
+  const rating = (name: string): number =>
+    part.values?.[name] ?? partKinds[part.kind].values[name]?.nominal ?? NaN;
+  switch (part.kind) {
+    case 'hv-capacitor': {
+      const farads = rating('capacitance');
+      return [`${Number((farads * 1e6).toPrecision(2))} µF 2100 V~`];
+    }
+    case 'fuse': {
+      const amps = rating('rating');
+      return [Number.isNaN(amps) ? 'T 20 A' : `T ${amps} A`];
+    }
+    case 'cut-out': {
+      const celsius = rating('opensAt');
+      return Number.isNaN(celsius) ? [] : [`${celsius} °C`];
+    }
+    case 'plug':
+    case 'chassis':
+    case 'filter-board':
+    case 'door-switch':
+    case 'relay':
+    case 'board-transformer':
+    case 'control-board':
+    case 'lamp':
+    case 'motor':
+    case 'hv-transformer':
+    case 'hv-diode':
+    case 'magnetron':
+      return [];
+  }
+}

@@ -1,0 +1,136 @@
+import type { ReactNode } from 'react';
+import { useBench } from '../../simulation/bench-context.ts';
+import { ToolButton } from './tool-button.tsx';
+
+const Card = ({ title, more, children }: { title: string; more?: string; children: ReactNode }) => (
+  <div
+    role="group"
+    aria-label={title}
+    className="grid min-w-0 content-start gap-1 rounded-lg border border-bench-line bg-mat p-1.5"
+  >
+    <p
+      aria-hidden
+      className="flex justify-between gap-1 truncate text-xs font-semibold text-bench-ink"
+    >
+      {title}
+      {more ? <span className="font-mono font-normal text-bench-ink-2">{more}</span> : null}
+    </p>
+    {children}
+  </div>
+);
+
+const Dot = ({ probe }: { probe: 'red' | 'black' }) => (
+  <span
+    aria-hidden
+    className={`size-2.5 shrink-0 rounded-full border border-bench-ink-2 ${probe === 'red' ? 'bg-probe-red' : 'bg-probe-black'}`}
+  />
+);
+
+const useConnected = () => {
+  const probes = useBench(({ state }) => state.probes);
+  const discharge = useBench(({ state }) => state.discharge);
+  const battery = useBench(({ state }) => state.battery);
+  return { probes, discharge, battery };
+};
+
+const ProbeTools = () => {
+  const { probes } = useConnected();
+  return (
+    <>
+      <ToolButton hand={{ kind: 'probe', probe: 'red' }} target={probes.red} shortcut="r">
+        <Dot probe="red" /> red
+      </ToolButton>
+      <ToolButton hand={{ kind: 'probe', probe: 'black' }} target={probes.black} shortcut="b">
+        <Dot probe="black" /> black
+      </ToolButton>
+    </>
+  );
+};
+
+const DischargeTools = () => {
+  const { discharge } = useConnected();
+  return (
+    <>
+      <ToolButton hand={{ kind: 'discharge-clip' }} target={discharge.clip} shortcut="d">
+        clip
+      </ToolButton>
+      <ToolButton hand={{ kind: 'discharge-tip' }} target={discharge.tip} shortcut="d">
+        tip
+      </ToolButton>
+    </>
+  );
+};
+
+const BatteryTools = () => {
+  const { battery } = useConnected();
+  return (
+    <>
+      <ToolButton hand={{ kind: 'battery-clip', clip: 'neg' }} target={battery.neg}>
+        −
+      </ToolButton>
+      <ToolButton hand={{ kind: 'battery-clip', clip: 'oneK' }} target={battery.oneK}>
+        + 1 kΩ
+      </ToolButton>
+    </>
+  );
+};
+
+/** Everything a hand can take, each with where it sits. */
+export const ToolCards = () => {
+  const labels = useBench(({ state }) => Object.keys(state.labels).length);
+  return (
+    <div
+      role="toolbar"
+      aria-label="Tools"
+      className="grid min-w-0 grow grid-cols-[repeat(auto-fit,minmax(98px,1fr))] content-between gap-1.5"
+    >
+      <Card title="Probes">
+        <ProbeTools />
+      </Card>
+      <Card title="Discharge" more="20 kΩ">
+        <DischargeTools />
+      </Card>
+      <Card title="Battery" more="12.6 V">
+        <BatteryTools />
+      </Card>
+      <Card title="Lead labels" more={`${labels}`}>
+        <ToolButton hand={{ kind: 'label' }}>label</ToolButton>
+      </Card>
+      <Card title="Abrasive pad">
+        <ToolButton hand={{ kind: 'pad' }}>pad</ToolButton>
+      </Card>
+      <Card title="Screwdriver">
+        <ToolButton hand={{ kind: 'screwdriver', from: null }}>blade</ToolButton>
+      </Card>
+    </div>
+  );
+};
+
+const RowGroup = ({ title, children }: { title: string; children: ReactNode }) => (
+  <div role="group" aria-label={title || 'More tools'} className="flex shrink-0 items-center gap-1">
+    <span aria-hidden className="text-xs text-bench-ink-2">
+      {title}
+    </span>
+    {children}
+  </div>
+);
+
+/** The same in one row that scrolls, for a small screen. */
+export const ToolRow = () => (
+  <div role="toolbar" aria-label="Tools" className="flex gap-3 overflow-x-auto pb-0.5">
+    <RowGroup title="Probes">
+      <ProbeTools />
+    </RowGroup>
+    <RowGroup title="Discharge">
+      <DischargeTools />
+    </RowGroup>
+    <RowGroup title="Battery">
+      <BatteryTools />
+    </RowGroup>
+    <RowGroup title="">
+      <ToolButton hand={{ kind: 'label' }}>labels</ToolButton>
+      <ToolButton hand={{ kind: 'pad' }}>pad</ToolButton>
+      <ToolButton hand={{ kind: 'screwdriver', from: null }}>screwdriver</ToolButton>
+    </RowGroup>
+  </div>
+);

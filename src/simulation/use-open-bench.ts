@@ -1,0 +1,67 @@
+import { useEffect, useState } from 'react';
+import { Problem } from '../api/problem.ts';
+import { benchServer } from './bench-server.ts';
+import { newWriterId } from './new-writer-id.ts';
+import { openBench, type Opened } from './open-bench.ts';
+import { memoryOutboxStore, openOutboxStore } from './outbox-store.ts';
+import { lockAttempt } from './writer-lock.ts';
+
+export type BenchDoor =
+  | { kind: 'loading' }
+  | { kind: 'failed'; problem: Problem }
+  | { kind: 'broken'; error: unknown }
+  | Opened;
+
+interface Opening {
+  attempt: string;
+  /** counts up with each try */ round: number;
+  steal: boolean;
+}
+
+/** Opens an attempt and keeps it open while the page stands. `again` opens it anew, taking it over when told to. */
+export function useOpenBench(attempt: string): {
+  door: BenchDoor;
+  again: (how: { steal: boolean }) => void;
+} {
+  const [how, setHow] = useState({ round: 0, steal: false });
+  const [reached, setReached] = useState<{ opening: Opening; door: BenchDoor } | null>(null);
+  const opening: Opening = { attempt, ...how };
+
+  useEffect(() => {
+    const here: Opening = { attempt, round: how.round, steal: how.steal };
+    let isOver = false;
+    let close = (): void => undefined;
+    const arrive = (door: BenchDoor): void => {
+      if (door.kind === 'open') close = door.close;
+      if (isOver) close();
+      else setReached({ opening: here, door });
+    };
+    open(here).then(arrive, (error: unknown) =>
+      arrive(
+        error instanceof Problem ? { kind: 'failed', problem: error } : { kind: 'broken', error },
+      ),
+    );
+    return () => {
+      isOver = true;
+      close();
+    };
+  }, [attempt, how]);
+
+  const isHere =
+    reached?.opening.attempt === opening.attempt && reached.opening.round === opening.round;
+  return {
+    door: isHere ? reached.door : { kind: 'loading' },
+    again: ({ steal }) => setHow(({ round }) => ({ round: round + 1, steal })),
+  };
+}
+
+const open = async ({ attempt, steal }: Opening): Promise<Opened> =>
+  openBench({
+    attempt,
+    writer: newWriterId(),
+    server: benchServer,
+    store: await openOutboxStore().catch(memoryOutboxStore),
+    lock: () => lockAttempt(attempt, { steal, locks: navigator.locks as LockManager | undefined }),
+    realNow: () => performance.now(),
+    now: () => Date.now(),
+  });

@@ -1,0 +1,41 @@
+import type { WireEvent } from '../../shared/bench/event.ts';
+import type { WaitingStep } from './outbox-store.ts';
+
+export type Waiting =
+  /** what the server does not have yet, first step `next` */
+  | { kind: 'follow'; events: WireEvent[] }
+  /** made on another history than the record's */
+  | { kind: 'astray'; why: string };
+
+/**
+ * What of the steps kept on this device is still to be sent. A step that the record has already must
+ * be the very same one: else the bench was continued elsewhere, and none of these follows from it.
+ */
+export function waitingSteps(record: readonly WireEvent[], kept: readonly WaitingStep[]): Waiting {
+  const known = kept.filter(({ sequence }) => sequence < record.length);
+  const rest = kept.filter(({ sequence }) => sequence >= record.length);
+  if (known.some(({ sequence, event }) => !isSameStep(record[sequence], event))) {
+    return {
+      kind: 'astray',
+      why: 'This job was continued on another device after these steps were made here.',
+    };
+  }
+  if (rest.some(({ sequence }, i) => sequence !== record.length + i)) {
+    return { kind: 'astray', why: 'Steps before these are missing on this device.' };
+  }
+  return { kind: 'follow', events: rest.map(({ event }) => event) };
+}
+
+/** Both went through JSON once, so equal steps are equal texts but for the order of their fields. */
+const isSameStep = (a: WireEvent | undefined, b: WireEvent): boolean =>
+  a !== undefined &&
+  a.type === b.type &&
+  a.benchMs === b.benchMs &&
+  sorted(a.data) === sorted(b.data);
+
+const sorted = (value: unknown): string =>
+  JSON.stringify(value, (_key, held: unknown) =>
+    held !== null && typeof held === 'object' && !Array.isArray(held)
+      ? Object.fromEntries(Object.entries(held).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : held,
+  );
