@@ -244,7 +244,9 @@ export function attemptStoreBehaviour(open: () => Promise<Surroundings>): void {
     });
     const trial = await begin({ owner, scenarioVersion: null });
     const ids = async (scenario?: string) =>
-      (await around.store.listOwn(around.iris.id, around.organisation, scenario)).map(({ id }) => id);
+      (await around.store.listOwn(around.iris.id, around.organisation, scenario)).map(
+        ({ id }) => id,
+      );
     expect(await ids()).toEqual([trial.id, b.id, a.id]);
     expect(await ids(around.scenario)).toEqual([trial.id, a.id]);
     expect(await around.store.listOwn(around.iris.id, randomUUID())).toEqual([]);

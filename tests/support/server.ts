@@ -1,4 +1,3 @@
-import { join } from 'node:path';
 import request, { type Test } from 'supertest';
 import { Passwords } from '../../server/accounts/passwords.ts';
 import { createApp, type AppDeps } from '../../server/app.ts';
@@ -7,11 +6,9 @@ import { makeDatabase, type Database } from '../../server/database/data-source.t
 import { isDatabaseUp } from '../../server/database/is-up.ts';
 import { openDatabase } from '../../server/database/open-database.ts';
 import type { FirstPerson } from '../../server/organisations/organisation.ts';
-import type { OvenLibrary } from '../../server/ovens/oven-library.ts';
-import { readOvens } from '../../server/ovens/read-ovens.ts';
 import { publishJobs } from '../../server/scenarios/publish-jobs.ts';
 import { makeStores, type Stores } from '../../server/stores.ts';
-import { hum, root } from './server-content.ts';
+import { hum, readAllOvens } from './server-content.ts';
 import { createDatabase, silent, type TestDatabase } from './database.ts';
 
 export const password = 'a long enough password';
@@ -68,11 +65,6 @@ async function openSession(stores: Stores, name: string): Promise<string> {
   const id = await stores.sessions.open(account.id, membership.organisation.id);
   return `coldbench_session=${id}`;
 }
-
-export const readAllOvens = (): Promise<OvenLibrary> =>
-  readOvens(join(root, 'scenarios', 'ovens'), (bad, mistakes) => {
-    throw new Error(`${bad}: ${JSON.stringify(mistakes)}`);
-  });
 
 /** The server on a database of its own: two schools of four people each, one practice job. */
 export async function openTestServer(more: Partial<AppDeps> = {}): Promise<TestServer> {

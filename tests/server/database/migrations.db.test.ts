@@ -46,8 +46,11 @@ test('the migration can be undone and done again', async () => {
 
 test('two addresses that differ in case alone cannot both have an account', async () => {
   const insert = (email: string) =>
-    raw.sql(`INSERT INTO person (id, email, name, password_hash, created_at)
-      VALUES (gen_random_uuid(), $1, 'x', 'x', now())`, [email]);
+    raw.sql(
+      `INSERT INTO person (id, email, name, password_hash, created_at)
+      VALUES (gen_random_uuid(), $1, 'x', 'x', now())`,
+      [email],
+    );
   await insert('a@b.example');
   await expect(insert('A@b.example')).rejects.toMatchObject({ constraint: 'person_email_lower' });
   await expect(insert('a@b.example')).rejects.toMatchObject({ constraint: 'person_email_key' });
