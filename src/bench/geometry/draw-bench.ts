@@ -1,7 +1,7 @@
 import type { OvenLayout } from '../../../shared/oven/layout.ts';
 import type { OvenDefinition, PartKindName } from '../../../shared/oven/oven.ts';
 import { isInBox, type BenchBox } from './bench-box.ts';
-import { battery, batteryTargets, benchSize, outlet } from './bench-furniture.ts';
+import { batteryTargets, benchSize, outlet } from './bench-furniture.ts';
 import type { BenchPoint } from './bench-point.ts';
 import type { SceneLabel } from './bench-scene.ts';
 import { partWish, terminalWish } from './label-wishes.ts';
@@ -33,7 +33,7 @@ const isDark: Readonly<Record<PartKindName, boolean>> = {
   'hv-transformer': true,
   'hv-capacitor': false,
   'hv-diode': false,
-  magnetron: false,
+  magnetron: true,
 };
 
 /** Places every label of an oven on its bench. Pure; takes some milliseconds, so keep the result. */
@@ -46,7 +46,9 @@ export const drawBench = (definition: OvenDefinition, layout: OvenLayout): Bench
       ),
       ...definition.parts.flatMap((part) => {
         const place = layout.parts[part.ref];
-        return place === undefined || part.kind === 'chassis' ? [] : [partWish(part, place)];
+        return place === undefined || part.kind === 'chassis'
+          ? []
+          : [partWish(part, place, otherParts(part.ref, definition, layout))];
       }),
     ],
     {
@@ -77,6 +79,17 @@ export const targetPoints = (layout: OvenLayout): ReadonlyMap<string, BenchPoint
     ...Object.entries(batteryTargets),
   ]);
 
+const otherParts = (
+  own: string,
+  definition: OvenDefinition,
+  layout: OvenLayout,
+): { box: BenchBox; isBoard: boolean }[] =>
+  definition.parts.flatMap(({ ref, kind }) => {
+    const box = layout.parts[ref];
+    if (box === undefined || ref === own || kind === 'chassis') return [];
+    return [{ box, isBoard: kind === 'control-board' || kind === 'filter-board' }];
+  });
+
 const homeChains = (definition: OvenDefinition, layout: OvenLayout): BenchPoint[][] =>
   definition.leads.flatMap((lead) => {
     const a = layout.terminals[lead.ends[0]];
@@ -91,7 +104,6 @@ const toneAt = (
   definition: OvenDefinition,
   layout: OvenLayout,
 ): SceneLabel['tone'] => {
-  if (isInBox(at, battery)) return 'on-light';
   let tone: SceneLabel['tone'] = isInBox(at, layout.chassis) ? 'on-light' : 'on-dark';
   for (const part of definition.parts) {
     const place = layout.parts[part.ref];

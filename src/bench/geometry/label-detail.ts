@@ -1,7 +1,14 @@
 /** Below this zoom a terminal's name would be smaller than 7 px: it only clutters. */
-const leastZoomForTerminals = 0.64;
+const leastZoomForNames = 0.64;
 
-/** Which names are worth drawing at a zoom (px per unit). */
-export const labelDetail = (zoom: number): { isTerminalNamed: boolean } => ({
-  isTerminalNamed: zoom >= leastZoomForTerminals,
+export interface LabelDetail {
+  isTerminalNamed: boolean;
+  /** units; null: parts are named in full at their usual size, else only their reference at this size */
+  referenceSize: number | null;
+}
+
+/** Which names are worth drawing at a zoom (px per unit). Far out only the references, kept at 10.5 px. */
+export const labelDetail = (zoom: number): LabelDetail => ({
+  isTerminalNamed: zoom >= leastZoomForNames,
+  referenceSize: zoom >= leastZoomForNames ? null : Math.round(105 / zoom) / 10,
 });

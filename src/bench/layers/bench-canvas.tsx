@@ -8,6 +8,7 @@ import { LeadsLayer } from './leads-layer.tsx';
 import { LiveLayer } from './live-layer.tsx';
 import { StaticLayer } from './static-layer.tsx';
 import { TerminalsLayer } from './terminals-layer.tsx';
+import { useCanvasFonts } from './use-canvas-fonts.ts';
 import { usePixelRatio } from './use-pixel-ratio.ts';
 import { useReducedMotion } from './use-reduced-motion.ts';
 import { useStageEvents, type StageEvents } from './use-stage-events.ts';
@@ -27,6 +28,7 @@ export interface BenchCanvasProps extends StageEvents {
 export function BenchCanvas({ scene, camera, width, height, ...events }: BenchCanvasProps) {
   const stage = useRef<Konva.Stage>(null);
   usePixelRatio(stage);
+  useCanvasFonts(stage);
   const reducesMotion = useReducedMotion();
   const handlers = useStageEvents(stage, camera, events);
   return (
@@ -36,7 +38,12 @@ export function BenchCanvas({ scene, camera, width, height, ...events }: BenchCa
         {scene.isCoverOn ? <ClosedOvenLayer scene={scene} camera={camera} /> : null}
         <LeadsLayer scene={scene} camera={camera} reducesMotion={reducesMotion} />
         <TerminalsLayer scene={scene} camera={camera} />
-        <LiveLayer scene={scene} camera={camera} reducesMotion={reducesMotion} />
+        <LiveLayer
+          scene={scene}
+          camera={camera}
+          viewBottom={(height - camera.y) / camera.zoom}
+          reducesMotion={reducesMotion}
+        />
       </Stage>
     </div>
   );

@@ -19,10 +19,13 @@ import { useSameValue } from './use-same-value.ts';
 export const LiveLayer = memo(function LiveLayer({
   scene,
   camera,
+  viewBottom,
   reducesMotion,
 }: {
   scene: BenchScene;
   camera: Camera;
+  /** lower edge of the view, bench units: there the test leads leave towards the meter */
+  viewBottom: number;
   reducesMotion: boolean;
 }) {
   const live = useSameValue({
@@ -36,6 +39,9 @@ export const LiveLayer = memo(function LiveLayer({
       .map(({ at, isFocused }) => ({ at, isFocused })),
     outlined: outlined(scene),
   });
+  const targets = useSameValue(
+    scene.terminals.filter(({ isReachable }) => isReachable).map(({ at }) => at),
+  );
   const paint = useCallback(
     (pen: Pen) => {
       for (const { lead, part, isFocused } of live.outlined) paintHover(pen, lead, part, isFocused);
@@ -44,10 +50,10 @@ export const LiveLayer = memo(function LiveLayer({
       paintDischargeLead(pen, live.discharge, live.handAt);
       for (const probe of live.probes) {
         const other = live.probes.find(({ colour }) => colour !== probe.colour);
-        paintOneProbe(pen, probe, other?.at ?? null, live.handAt);
+        paintOneProbe(pen, probe, other?.at ?? null, live.handAt, targets, viewBottom);
       }
     },
-    [live],
+    [live, targets, viewBottom],
   );
   const flashAt = scene.terminals.find(({ target }) => target === scene.hazardFlash)?.at ?? null;
   return (
@@ -76,8 +82,21 @@ const paintOneProbe = (
   { colour, at, isInHand }: SceneProbe,
   other: BenchPoint | null,
   handAt: BenchPoint | null,
+  targets: readonly BenchPoint[],
+  viewBottom: number,
 ): void => {
-  const tip = isInHand ? (handAt ?? at) : at;
-  if (tip === null) return paintProbe(pen, colour, rest.probe[colour], Math.PI, meterJacks[colour]);
-  paintProbe(pen, colour, tip, probeAngle(colour, tip, other, benchSize), meterJacks[colour]);
+  const jack: BenchPoint = [
+    meterJacks[colour][0],
+    Math.max(meterJacks[colour][1], viewBottom + 10),
+  ];
+  const isMoving = isInHand && handAt !== null;
+  const tip = isMoving ? handAt : at;
+  if (tip === null) return paintProbe(pen, colour, rest.probe[colour], Math.PI, jack);
+  paintProbe(
+    pen,
+    colour,
+    tip,
+    probeAngle(colour, tip, other, isMoving ? [] : targets, benchSize),
+    jack,
+  );
 };

@@ -2,7 +2,7 @@ import { memo, useCallback } from 'react';
 import type { Camera } from '../camera/camera.ts';
 import type { BenchScene } from '../geometry/bench-scene.ts';
 import { labelDetail } from '../geometry/label-detail.ts';
-import { paintLabel } from '../glyphs/label/paint-label.ts';
+import { paintLabel, paintReference } from '../glyphs/label/paint-label.ts';
 import { Painted } from '../glyphs/paint/painted.tsx';
 import type { Pen } from '../glyphs/paint/pen.ts';
 import { paintTerminal } from '../glyphs/terminal/paint-terminal.ts';
@@ -23,17 +23,21 @@ export const TerminalsLayer = memo(function TerminalsLayer({
       .map(({ at, state, probes, label }) => ({ at, state, probes, label })),
   );
   const names = useSameValue(
-    scene.parts.filter(({ kind }) => !scene.isCoverOn || kind === 'plug').map(({ label }) => label),
+    scene.parts
+      .filter(({ kind }) => !scene.isCoverOn || kind === 'plug')
+      .flatMap(({ ref, label }) => (label === null ? [] : [{ ref, label }])),
   );
-  const detail = labelDetail(camera.zoom);
+  const { isTerminalNamed, referenceSize } = labelDetail(camera.zoom);
   const paint = useCallback(
     (pen: Pen) => {
-      if (detail.isTerminalNamed)
+      if (isTerminalNamed)
         for (const { label } of terminals) if (label) paintLabel(pen, label, 'terminal');
-      for (const label of names) if (label) paintLabel(pen, label, 'part');
+      for (const { ref, label } of names)
+        if (referenceSize === null) paintLabel(pen, label, 'part');
+        else paintReference(pen, ref, label, referenceSize);
       for (const terminal of terminals) paintTerminal(pen, terminal);
     },
-    [terminals, names, detail.isTerminalNamed],
+    [terminals, names, isTerminalNamed, referenceSize],
   );
   return (
     <BenchLayer camera={camera}>

@@ -1,6 +1,7 @@
 import type { BenchBox } from '../../geometry/bench-box.ts';
 import { material, shade } from '../../../styles/tokens.ts';
 import { brushed, hole, rivet, screw } from '../paint/hardware.ts';
+import { paintCaution } from './paint-caution.ts';
 import { box, circle, disc, fill, roundRect, rule, stroke, type Rect } from '../paint/outline.ts';
 import { apart, linear, radial, raised, type Pen } from '../paint/pen.ts';
 
@@ -43,6 +44,7 @@ export const paintCavity = (pen: Pen, chassis: BenchBox): void => {
   for (let row = 0; row < 4; row++)
     for (let i = 0; i < 7; i++) hole(pen, x + 128 + i * 8 + (row % 2) * 4, y + 26 + row * 7, 2.1);
   paintOpening(pen, [x + width / 2, y + height * 0.55, 112]);
+  paintCaution(pen, x + 14, y + height - 54);
   for (const [dx, dy] of [
     [18, height - 20],
     [width - 18, height - 20],
@@ -87,9 +89,9 @@ const paintOpening = (pen: Pen, [x, y, radius]: readonly [number, number, number
         pen,
         [x, y, radius],
         [
-          [0, material.enamel[1]],
-          [0.7, material.enamel[2]],
-          [1, material.enamel[3]],
+          [0, material.enamel[2]],
+          [0.62, material.enamel[3]],
+          [1, material.lamination[1]],
         ],
       ),
     );

@@ -1,6 +1,6 @@
 import type { BenchBox } from '../../geometry/bench-box.ts';
 import { material, shade } from '../../../styles/tokens.ts';
-import { brushed, hole, louvres, rivet, screw } from '../paint/hardware.ts';
+import { brushed, hole, rivet, screw } from '../paint/hardware.ts';
 import { box, roundRect, rule, stroke, type Rect } from '../paint/outline.ts';
 import { apart, linear, raised, type Pen } from '../paint/pen.ts';
 import { paintCavity } from './paint-cavity.ts';
@@ -85,7 +85,6 @@ const paintRibs = (pen: Pen, [x, y, width, height]: Rect): void => {
     [338, 246],
   ] as const)
     hole(pen, x + dx, y + dy, 3.4);
-  louvres(pen, [x + width - 150, y + 4, 132, 8], 12);
 };
 
 const paintRim = (pen: Pen, [x, y, width, height]: Rect): void => {

@@ -20,38 +20,53 @@ export const paintFront = (pen: Pen, { at, size }: BenchBox, isDoorOpen: boolean
 };
 
 const paintPanel = (pen: Pen, x: number, y: number, width: number): void => {
-  raised(pen, 6, shade.drop, () => box(pen, [x, y - 6, width, 20], 4, material.plastic[1]));
+  raised(pen, 6, shade.drop, () => box(pen, [x, y - 6, width, 22], 4, material.zinc[2]));
   box(
     pen,
-    [x, y - 6, width, 20],
+    [x, y - 6, width, 22],
     4,
-    linear(pen, [0, y, 0, y + 14], [material.plastic[0], material.plastic[1], material.plastic[3]]),
+    linear(pen, [0, y, 0, y + 16], [material.zinc[0], material.zinc[2]]),
+    material.zinc[3],
+    1,
   );
-  rule(pen, [x + 5, y + 4, x + width - 5, y + 4], shade.haze, 1);
+  box(
+    pen,
+    [x + 6, y + 10, width - 12, 7],
+    3,
+    linear(pen, [0, y + 10, 0, y + 17], [material.plastic[1], material.plastic[3]]),
+  );
 };
 
 const paintDoor = (pen: Pen, width: number): void => {
-  raised(pen, 6, shade.drop, () => box(pen, [0, 0, width, 21], 4, material.plastic[2]));
-  box(pen, [0, 0, width, 6], 2, linear(pen, [0, 0, 0, 6], [material.zinc[2], material.zinc[3]]));
-  box(
-    pen,
-    [0, 5, width, 16],
-    4,
-    linear(pen, [0, 5, 0, 21], [material.plastic[1], material.plastic[2], material.plastic[3]]),
-  );
-  box(
-    pen,
-    [26, 14, width - 60, 4],
-    2,
-    linear(pen, [26, 0, width - 34, 0], [shade.haze, shade.sheen, shade.haze]),
-  );
-  box(
-    pen,
-    [width - 26, 18, 18, 7],
-    3,
-    linear(pen, [0, 18, 0, 25], [material.plastic[0], material.plastic[3]]),
-  );
   // The hooks that work the switches.
-  for (const dx of [10, 24])
-    box(pen, [width - dx, -9, 6, 11], 2, material.nylon[1], material.nylon[3], 0.7);
+  for (const dx of [12, 28])
+    box(pen, [width - dx, -9, 7, 12], 2, material.nylon[1], material.nylon[3], 0.7);
+  raised(pen, 7, shade.drop, () => box(pen, [0, 0, width, 23], 4, material.zinc[2]));
+  box(
+    pen,
+    [0, 0, width, 23],
+    4,
+    linear(
+      pen,
+      [0, 0, 0, 23],
+      [material.zinc[2], material.zinc[0], material.zinc[1], material.zinc[2]],
+    ),
+    material.zinc[3],
+    1,
+  );
+  box(
+    pen,
+    [8, 17, width - 16, 8],
+    3,
+    linear(pen, [0, 17, 0, 25], [material.plastic[1], material.plastic[3]]),
+  );
+  rule(pen, [14, 19, width * 0.6, 19], shade.sheen, 1.2);
+  box(
+    pen,
+    [width - 50, 21, 34, 9],
+    4,
+    linear(pen, [0, 21, 0, 30], [material.tin[0], material.tin[1], material.tin[3]]),
+    material.tin[3],
+    0.8,
+  );
 };

@@ -24,7 +24,7 @@ export const paintClosedOven = (pen: Pen, oven: ClosedOven): void => {
   paintTop(pen, shape);
   const front = rectOf(shape.front);
   raised(pen, 12, shade.drop, () => box(pen, front, 8, material.zinc[2]));
-  const [x, y, width, height] = front;
+  const [x, y, , height] = front;
   box(
     pen,
     front,

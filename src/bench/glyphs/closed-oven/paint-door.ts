@@ -1,7 +1,8 @@
 import type { ClosedOvenShape } from '../../geometry/closed-oven.ts';
 import { material, shade } from '../../../styles/tokens.ts';
+import { paintCavityView } from './paint-cavity-view.ts';
 import { box, chain, fill, roundRect, rule, stroke, type Rect } from '../paint/outline.ts';
-import { apart, linear, radial, raised, type Pen } from '../paint/pen.ts';
+import { apart, linear, raised, type Pen } from '../paint/pen.ts';
 
 /** The closed door: dark glass with its screen, a bar to pull, the lit cavity behind it if the lamp is on. */
 export const paintDoor = (
@@ -25,7 +26,7 @@ export const paintDoor = (
     1,
   );
   const pane: Rect = [...window.at, ...window.size];
-  paintCavityView(pen, pane, isLampLit, isTurning, 0.82);
+  paintCavityView(pen, pane, { isLit: isLampLit, isTurning, clarity: 0.82 });
   apart(pen, () => {
     roundRect(pen, pane, 14);
     pen.clip();
@@ -84,7 +85,11 @@ export const paintInside = (
     material.enamel[3],
     1,
   );
-  paintCavityView(pen, [x + 34, y + 30, width - 72, height - 62], isLampLit, isTurning, 1);
+  paintCavityView(pen, [x + 34, y + 30, width - 72, height - 62], {
+    isLit: isLampLit,
+    isTurning,
+    clarity: 1,
+  });
   // The two slots that the door's hooks go into.
   for (const share of [0.3, 0.66])
     box(
@@ -95,125 +100,6 @@ export const paintInside = (
       material.enamel[3],
       1,
     );
-};
-
-const paintCavityView = (
-  pen: Pen,
-  rect: Rect,
-  isLit: boolean,
-  isTurning: boolean,
-  clarity: number,
-): void =>
-  apart(pen, () => {
-    const [x, y, width, height] = rect;
-    roundRect(pen, rect, 12);
-    pen.clip();
-    pen.fillStyle = material.plastic[3];
-    pen.fillRect(x, y, width, height);
-    pen.globalAlpha = isLit ? 1 : 0.5 * clarity * clarity;
-    const [ix, iy, iw, ih] = [x + width * 0.14, y + height * 0.12, width * 0.72, height * 0.62];
-    const faces: readonly (readonly [readonly (readonly [number, number])[], string])[] = [
-      [
-        [
-          [x, y],
-          [ix, iy],
-          [ix + iw, iy],
-          [x + width, y],
-        ],
-        material.enamel[2],
-      ],
-      [
-        [
-          [x, y],
-          [ix, iy],
-          [ix, iy + ih],
-          [x, y + height],
-        ],
-        material.enamel[1],
-      ],
-      [
-        [
-          [x + width, y],
-          [ix + iw, iy],
-          [ix + iw, iy + ih],
-          [x + width, y + height],
-        ],
-        material.enamel[2],
-      ],
-      [
-        [
-          [ix, iy],
-          [ix + iw, iy],
-          [ix + iw, iy + ih],
-          [ix, iy + ih],
-        ],
-        material.enamel[1],
-      ],
-      [
-        [
-          [x, y + height],
-          [ix, iy + ih],
-          [ix + iw, iy + ih],
-          [x + width, y + height],
-        ],
-        material.enamel[0],
-      ],
-    ];
-    for (const [points, tone] of faces) {
-      chain(pen, points);
-      pen.closePath();
-      fill(pen, tone);
-      stroke(pen, material.enamel[3], 1);
-    }
-    box(
-      pen,
-      [ix + iw + 12, iy + ih * 0.3, width * 0.06, ih * 0.4],
-      2,
-      material.paper[1],
-      material.paper[3],
-      1,
-    );
-    if (isLit) {
-      pen.fillStyle = radial(
-        pen,
-        [x + width * 0.72, y + height * 0.2, width * 0.75],
-        [
-          [0, material.glow[1]],
-          [0.4, shade.sheen],
-          [1, shade.clear],
-        ],
-      );
-      pen.fillRect(x, y, width, height);
-    }
-    paintTray(pen, x + width / 2, y + height * 0.83, width * 0.33, isTurning);
-  });
-
-const paintTray = (pen: Pen, x: number, y: number, radius: number, isTurning: boolean): void => {
-  pen.beginPath();
-  pen.ellipse(x, y + 7, radius, radius * 0.22, 0, 0, Math.PI * 2);
-  fill(pen, shade.soft);
-  pen.beginPath();
-  pen.ellipse(x, y, radius, radius * 0.22, 0, 0, Math.PI * 2);
-  fill(
-    pen,
-    linear(
-      pen,
-      [x - radius, 0, x + radius, 0],
-      [material.glass[2], material.glass[0], material.glass[1]],
-    ),
-  );
-  stroke(pen, material.glass[3], 1.4);
-  pen.beginPath();
-  pen.ellipse(x, y - 2, radius * 0.86, radius * 0.17, 0, 0, Math.PI * 2);
-  stroke(pen, shade.gleam, 2);
-  if (isTurning) {
-    pen.beginPath();
-    pen.ellipse(x, y, radius * 0.6, radius * 0.12, 0, 0.3, 2.4);
-    stroke(pen, material.plastic[1], 3);
-    const tip = [x + Math.cos(2.4) * radius * 0.6, y + Math.sin(2.4) * radius * 0.12] as const;
-    chain(pen, [[tip[0] + 12, tip[1] - 4], tip, [tip[0] + 14, tip[1] + 10]]);
-    stroke(pen, material.plastic[1], 3);
-  }
 };
 
 /** The open door seen almost along its edge, swung to the left. */

@@ -4,7 +4,7 @@ import { pad, screw, silk } from '../paint/hardware.ts';
 import { write } from '../paint/lettering.ts';
 import { box, chain, disc, rule, stroke } from '../paint/outline.ts';
 import { apart, linear, radial, raised, type Pen } from '../paint/pen.ts';
-import { scorch } from '../paint/scorch.ts';
+import { crack, scorch } from '../paint/scorch.ts';
 
 /** The control board with its display. What else sits on it (relays, transformer) has glyphs of its own. */
 export const controlBoardGlyph: Glyph = (pen, part) => {
@@ -32,68 +32,85 @@ export const controlBoardGlyph: Glyph = (pen, part) => {
   paintElectrolytic(pen, width * 0.945, 34, 13);
   for (let i = 0; i < 4; i++) paintSmall(pen, 138, 64 + i * 17);
   for (const at of Object.values(terminals)) pad(pen, at);
+  if (looks.includes('cracked')) {
+    scorch(pen, 144, 115, 9);
+    crack(pen, [136, 110], [152, 121]);
+  }
   if (looks.includes('burnt')) scorch(pen, width * 0.42, height * 0.66, 18);
 };
+
+type Way = readonly (readonly [number, number])[];
+
+/** The wide tracks of the mains side: to the relay contacts and the transformer's primary. */
+const mainsTracks: readonly { way: Way; wide: number }[] = [
+  {
+    way: [
+      [172, 162],
+      [172, 182],
+      [236, 182],
+    ],
+    wide: 6,
+  },
+  {
+    way: [
+      [314, 162],
+      [314, 184],
+      [252, 184],
+    ],
+    wide: 6,
+  },
+  {
+    way: [
+      [14, 24],
+      [30, 24],
+      [38, 40],
+    ],
+    wide: 5,
+  },
+  {
+    way: [
+      [14, 72],
+      [34, 72],
+    ],
+    wide: 5,
+  },
+];
+
+const signalTracks = (width: number, height: number): { way: Way; wide: number }[] => [
+  ...Array.from({ length: 6 }, (_, i) => {
+    const [from, to] = [width * 0.8 + i * 5, width * 0.44 - i * 4];
+    return {
+      way: [
+        [from, 46],
+        [from, 54 + i * 3],
+        [to, 54 + i * 3],
+        [to, 78 + i * 9],
+      ] as Way,
+      wide: 1.4,
+    };
+  }),
+  ...Array.from({ length: 4 }, (_, i) => {
+    const [from, to, y] = [24 + i * 34, width * 0.42 + i * 4, height - 12 + i];
+    return {
+      way: [
+        [from, height - 24],
+        [from, y],
+        [to, y],
+        [to, height * 0.7],
+      ] as Way,
+      wide: 2,
+    };
+  }),
+];
 
 const paintTraces = (pen: Pen, width: number, height: number): void =>
   apart(pen, () => {
     pen.globalAlpha = 0.55;
     pen.lineJoin = 'round';
-    const trace = (points: readonly (readonly [number, number])[], wide = 2): void => {
-      chain(pen, points);
+    for (const { way, wide } of [...signalTracks(width, height), ...mainsTracks]) {
+      chain(pen, way);
       stroke(pen, material.board[0], wide);
-    };
-    for (let i = 0; i < 6; i++)
-      trace(
-        [
-          [width * 0.8 + i * 5, 46],
-          [width * 0.8 + i * 5, 54 + i * 3],
-          [width * 0.44 - i * 4, 54 + i * 3],
-          [width * 0.44 - i * 4, 78 + i * 9],
-        ],
-        1.4,
-      );
-    for (let i = 0; i < 4; i++)
-      trace(
-        [
-          [24 + i * 34, height - 24],
-          [24 + i * 34, height - 12 + i],
-          [width * 0.42 + i * 4, height - 12 + i],
-          [width * 0.42 + i * 4, height * 0.7],
-        ],
-        2,
-      );
-    trace(
-      [
-        [172, 162],
-        [172, 182],
-        [236, 182],
-      ],
-      6,
-    );
-    trace(
-      [
-        [314, 162],
-        [314, 184],
-        [252, 184],
-      ],
-      6,
-    );
-    trace(
-      [
-        [14, 24],
-        [30, 24],
-        [38, 40],
-      ],
-      5,
-    );
-    trace(
-      [
-        [14, 72],
-        [34, 72],
-      ],
-      5,
-    );
+    }
     for (let i = 0; i < 26; i++)
       disc(pen, [150 + ((i * 37) % 190), 58 + ((i * 53) % 128), 1.2], material.board[0]);
     silk(pen, [12, height - 40, 132, 34], 3);

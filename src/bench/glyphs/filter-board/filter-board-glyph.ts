@@ -1,9 +1,9 @@
 import { copper, material, shade } from '../../../styles/tokens.ts';
 import type { Glyph } from '../glyph.ts';
 import { pad, screw, silk, tab } from '../paint/hardware.ts';
-import { box, chain, circle, disc, fill, rule, stroke } from '../paint/outline.ts';
+import { box, chain, circle, disc, rule, stroke } from '../paint/outline.ts';
 import { apart, linear, radial, raised, type Pen } from '../paint/pen.ts';
-import { scorch } from '../paint/scorch.ts';
+import { crack, scorch } from '../paint/scorch.ts';
 import { write } from '../paint/lettering.ts';
 
 /** The mains filter board: a ring choke of two windings, a film capacitor across, two disc capacitors to chassis. */
@@ -37,7 +37,11 @@ export const filterBoardGlyph: Glyph = (pen, { size: [width, height], terminals,
     pad(pen, at);
     tab(pen, at, at[0] > width / 2 ? 0 : Math.PI, 20);
   }
-  if (looks.includes('burnt')) scorch(pen, 96, 60, 17);
+  if (looks.includes('burnt')) scorch(pen, width * 0.6, height * 0.33, 15);
+  if (looks.includes('cracked')) {
+    scorch(pen, 76, 84, 13);
+    crack(pen, [56, 68], [88, 98]);
+  }
 };
 
 const paintTracks = (pen: Pen, width: number, height: number): void =>
@@ -148,11 +152,6 @@ const paintResistor = (
     material.paper[3],
     0.6,
   );
-  for (const [i, tone] of [
-    material.relay[2],
-    material.soot[3],
-    material.film[1],
-    material.brass[2],
-  ].entries())
-    (fill(pen, tone), box(pen, [x + 5 + i * 5.6, y, 2.4, height], 0, tone));
+  const bands = [material.relay[2], material.soot[3], material.film[1], material.brass[2]];
+  bands.forEach((tone, i) => box(pen, [x + 5 + i * 5.6, y, 2.4, height], 0, tone));
 };

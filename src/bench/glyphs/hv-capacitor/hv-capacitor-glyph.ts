@@ -14,15 +14,13 @@ export const hvCapacitorGlyph: Glyph = (pen, part) => {
   if (looks.includes('oil') || looks.includes('leaking'))
     oilStain(pen, width * 0.3, height + 4, 46);
   paintCan(pen, width, height, isSwollen);
-  paintStrap(pen, width / 2 - 12, height);
-  stamp
-    .slice(0, 2)
-    .forEach((line, i) =>
-      write(pen, line, i === 0 ? width * 0.28 : width * 0.75, height * 0.72, {
-        size: 9.5,
-        ink: material.lamination[2],
-      }),
-    );
+  for (const share of [0.17, 0.83]) paintStrap(pen, width * share - 10, height);
+  halves(stamp).forEach((line, i) =>
+    write(pen, line, width / 2, height * (0.6 + 0.19 * i), {
+      size: 11,
+      ink: material.lamination[3],
+    }),
+  );
   for (const [id, at] of Object.entries(terminals)) {
     if (id === 'can')
       disc(
@@ -36,6 +34,13 @@ export const hvCapacitorGlyph: Glyph = (pen, part) => {
   }
   if (looks.includes('burnt'))
     scorch(pen, terminals['2']?.[0] ?? width / 2, terminals['2']?.[1] ?? 20, 18);
+};
+
+/** The rating on two short lines, so that it stands between the terminals and no lead lies over it. */
+const halves = (stamp: readonly string[]): string[] => {
+  const words = stamp.join(' ').split(' ').filter(Boolean);
+  const half = Math.ceil(words.length / 2);
+  return [words.slice(0, half).join(' '), words.slice(half).join(' ')].filter(Boolean);
 };
 
 const paintCan = (pen: Pen, width: number, height: number, isSwollen: boolean): void => {
@@ -91,10 +96,10 @@ const paintCan = (pen: Pen, width: number, height: number, isSwollen: boolean): 
 };
 
 const paintStrap = (pen: Pen, x: number, height: number): void => {
-  raised(pen, 2, shade.drop, () => box(pen, [x, -8, 24, height + 16], 4, material.zinc[1]));
+  raised(pen, 2, shade.drop, () => box(pen, [x, -8, 20, height + 16], 4, material.zinc[1]));
   box(
     pen,
-    [x, -8, 24, height + 16],
+    [x, -8, 20, height + 16],
     4,
     linear(
       pen,
@@ -105,8 +110,8 @@ const paintStrap = (pen: Pen, x: number, height: number): void => {
     0.9,
   );
   rule(pen, [x + 4, 0, x + 4, height], shade.gleam, 1);
-  screw(pen, x + 12, -2, 4);
-  screw(pen, x + 12, height + 2, 4);
+  screw(pen, x + 10, -2, 4);
+  screw(pen, x + 10, height + 2, 4);
 };
 
 const insulated = (pen: Pen, at: readonly [number, number]): void => {

@@ -7,7 +7,8 @@ import { crack, scorch } from '../paint/scorch.ts';
 /** The high-voltage diode: a moulded stick, its cathode band on the side of terminal k. */
 export const hvDiodeGlyph: Glyph = (pen, { size: [width, height], terminals, looks }) => {
   const y = height / 2;
-  const isReversed = (terminals['k']?.[0] ?? width) < (terminals['a']?.[0] ?? 0);
+  const isLeft = (terminals['k']?.[0] ?? width) < (terminals['a']?.[0] ?? 0);
+  const isBandLeft = isLeft !== looks.includes('reversed');
   for (const at of Object.values(terminals)) {
     rule(pen, [at[0], at[1], width / 2, y], material.tin[3], 4.6);
     rule(pen, [at[0], at[1], width / 2, y], material.tin[1], 3);
@@ -35,7 +36,7 @@ export const hvDiodeGlyph: Glyph = (pen, { size: [width, height], terminals, loo
     0.9,
   );
   rule(pen, [36, y - 6, width - 36, y - 6], shade.sheen, 2);
-  const band = isReversed ? 38 : width - 48;
+  const band = isBandLeft ? 38 : width - 48;
   box(
     pen,
     [band, y - 12, 9, 24],

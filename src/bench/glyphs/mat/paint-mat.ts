@@ -1,7 +1,7 @@
 import { benchSize } from '../../geometry/bench-furniture.ts';
-import { palette, shade } from '../../../styles/tokens.ts';
-import { box, rule } from '../paint/outline.ts';
-import { linear, type Pen } from '../paint/pen.ts';
+import { palette } from '../../../styles/tokens.ts';
+import { rule } from '../paint/outline.ts';
+import type { Pen } from '../paint/pen.ts';
 
 const grid = 20;
 /** The mat goes on past the bench, so that no view shows its end. */
@@ -16,10 +16,4 @@ export const paintMat = (pen: Pen): void => {
     rule(pen, [x, -beyond, x, height + beyond], palette['mat-2'], x % (grid * 5) === 0 ? 1.3 : 0.6);
   for (let y = -beyond; y <= height + beyond; y += grid)
     rule(pen, [-beyond, y, width + beyond, y], palette['mat-2'], y % (grid * 5) === 0 ? 1.3 : 0.6);
-  box(
-    pen,
-    [0, 0, width, height],
-    0,
-    linear(pen, [0, 0, width, height], [shade.haze, shade.clear, shade.faint]),
-  );
 };

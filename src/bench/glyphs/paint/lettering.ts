@@ -16,6 +16,13 @@ const stacks = {
   sans: fontFamily.sans.map(quoted).join(', '),
 } as const;
 
+/** Every face the bench writes with, as CSS fonts: to be loaded before it is drawn. */
+export const fontFaces: readonly string[] = [
+  `600 12px ${stacks.mono}`,
+  `800 12px ${stacks.mono}`,
+  `600 12px ${stacks.sans}`,
+];
+
 /** Writes one line of text, its middle on y. */
 export const write = (pen: Pen, text: string, x: number, y: number, how: Lettering): void => {
   pen.font = `${how.weight ?? 600} ${how.size}px ${stacks[how.family ?? 'mono']}`;
@@ -23,7 +30,7 @@ export const write = (pen: Pen, text: string, x: number, y: number, how: Letteri
   pen.textBaseline = 'middle';
   if (how.halo !== undefined) {
     pen.lineJoin = 'round';
-    pen.lineWidth = how.size * 0.3;
+    pen.lineWidth = how.size * 0.24;
     pen.strokeStyle = how.halo;
     pen.strokeText(text, x, y + how.size * 0.05);
   }

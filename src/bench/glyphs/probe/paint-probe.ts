@@ -1,5 +1,6 @@
 import { along, type BenchPoint } from '../../geometry/bench-point.ts';
 import type { ProbeColour } from '../../geometry/bench-scene.ts';
+import { probeLength } from '../../geometry/probe-pose.ts';
 import { insulation, material, palette, shade } from '../../../styles/tokens.ts';
 import { paintWire } from '../lead/paint-curve.ts';
 import { box, chain, disc, fill, rule, stroke } from '../paint/outline.ts';
@@ -12,9 +13,6 @@ const colours = {
     wire: insulation.black,
   },
 } as const;
-
-/** From tip to where the cable leaves the handle, units. */
-export const probeLength = 132;
 
 /**
  * A test probe: its steel tip exactly on `tip`, its handle away from it in direction `angle` (radians),

@@ -34,6 +34,8 @@ export const relayGlyph: Glyph = (pen, { size: [width, height], terminals, stamp
   rule(pen, [x - 2, height - 15, x + 6, height - 15], ink, 1);
   rule(pen, [x + 6, height - 15, x + 15, height - 21], ink, 1);
   rule(pen, [x + 16, height - 15, x + 23, height - 15], ink, 1);
-  stamp.slice(0, 2).forEach((line, i) => write(pen, line, x, 13 + i * 11, { size: 8.5, ink }));
+  stamp
+    .slice(0, 2)
+    .forEach((line, i) => write(pen, line, width * 0.66, 14 + i * 11, { size: 8.5, ink }));
   if (looks.includes('burnt')) scorch(pen, width * 0.7, height * 0.8, 12);
 };
