@@ -73,8 +73,17 @@ export function settle(integrator: Integrator, time: number): EngineFailure | un
   return undefined;
 }
 
-/** Tries a step of `length` s; false when a stage has no solution. Leaves the end's solution in the machine. */
-export function tryStep(integrator: Integrator, time: number, length: number): boolean {
+/**
+ * Tries a step of `length` s; false when a stage has no solution. Leaves the end's solution in the
+ * machine. `middle` is the time halfway between the breaks: before it the sources are taken just
+ * after their corners, beyond it just before.
+ */
+export function tryStep(
+  integrator: Integrator,
+  time: number,
+  length: number,
+  middle: number,
+): boolean {
   const { machine, tableau, state, nextState, history, rates } = integrator;
   const { stages, gamma, a, c } = tableau;
   stampStage(machine.system, machine, length * gamma);
@@ -87,7 +96,8 @@ export function tryStep(integrator: Integrator, time: number, length: number): b
       for (let j = 0; j < history.length; j += 1) history[j]! += weight * rate[j]!;
     }
     setHistory(integrator, length * gamma);
-    setSources(machine, time + c[stage]! * length, 1, -1);
+    const moment = time + c[stage]! * length;
+    setSources(machine, moment, 1, moment < middle ? 1 : -1);
     if (!newton(machine, STAGE_TOLERANCE, STAGE_ITERATIONS).isSolved) return false;
     readRates(integrator, rates[stage]!, length * gamma);
     integrator.onStage?.(stage);

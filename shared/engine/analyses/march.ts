@@ -24,6 +24,11 @@ export interface Plan {
   readonly breaks: readonly number[];
   /** every multiple of this is landed on; 0 for none */ readonly grid: number;
   readonly maxStep: number;
+  /**
+   * Share of the time since the last break below which no step is forced, for the sake of rings that
+   * nobody will see: they are then damped, charge and flux being kept. 0 to follow everything.
+   */
+  readonly patience: number;
   /** of each capacitor's voltage and inductor's current, in one step */
   readonly relativeTolerance: number;
 }
@@ -152,11 +157,13 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
     walk.wanted = wanted;
     return 'refused';
   };
-  if (!tryStep(integrator, walk.base + walk.offset, length)) {
+  const middle = walk.base + walk.end / 2;
+  if (!tryStep(integrator, walk.base + walk.offset, length, middle)) {
     return length <= shortest ? 'unsolved' : refuse(length / 8);
   }
   const error = stepError(integrator, length, plan.relativeTolerance);
-  if (error > 1 && length > shortest) return refuse(nextStep(length, error, tableau.errorPower));
+  const enough = Math.max(shortest, plan.patience * walk.offset);
+  if (error > 1 && length > enough) return refuse(nextStep(length, error, tableau.errorPower));
   const overdrive = overdrives(machine);
   const turn = turningAt(walk.overdrive, overdrive);
   if (turn < 1 - TURN_PRECISION && length * turn > shortest) {
@@ -170,7 +177,8 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   walk.offset = left <= shortest ? walk.end : walk.offset + length;
   // a step cut short by a landing says little against the one that was wanted
   const basis = Math.max(length, Math.min(walk.wanted, 2 * length));
-  walk.wanted = Math.min(walk.longest, nextStep(basis, error, tableau.errorPower));
+  const next = Math.max(nextStep(basis, error, tableau.errorPower), plan.patience * walk.offset);
+  walk.wanted = Math.min(walk.longest, next);
   return turn <= 1 ? 'turning' : 'accepted';
 }
 

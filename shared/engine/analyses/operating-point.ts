@@ -52,20 +52,22 @@ const MOST_TURNS = 50;
 /** Solves from the present state, turning switches until each agrees with its control. */
 export function solveWithSwitches(machine: Machine, moment: Moment): EngineFailure | undefined {
   const { system, switches, netlist } = machine;
+  let restless = switches[0];
   for (let turn = 0; turn < MOST_TURNS; turn += 1) {
     const failure = solveRobustly(machine, moment);
     if (failure !== undefined) return failure;
     const turning = switches.filter((state) => switchOverdrive(system, state) > 0);
     if (turning.length === 0) return undefined;
+    restless = turning[0];
     for (const state of turning) {
       state.isOn = !state.isOn;
       stampSwitch(system, state);
     }
   }
-  const restless = switches.find((state) => switchOverdrive(system, state) > 0)!;
-  const node = netlist.nodeNames[restless.controlFrom] ?? '0';
-  const message = `${netlist.branches[restless.branch]!.name} has no state that its control agrees with`;
-  const residual = switchOverdrive(system, restless);
+  const name = restless === undefined ? '' : netlist.branches[restless.branch]!.name;
+  const node = netlist.nodeNames[restless?.controlFrom ?? -1] ?? '0';
+  const message = `${name} has no state that its control agrees with`;
+  const residual = restless === undefined ? 0 : Math.abs(switchOverdrive(system, restless));
   return { code: 'not-converged', node, iteration: MOST_TURNS, residual, message };
 }
 

@@ -121,6 +121,7 @@ function planOf(options: TransientOptions, window: { from: number; to: number } 
     breaks: window ? [window.from, window.to] : [],
     grid: step ?? 0,
     maxStep: Math.min(maxStep ?? Infinity, step ?? stop / 50),
+    patience: 0,
     relativeTolerance:
       options.relativeTolerance ?? (step === undefined ? SUMMARY_TOLERANCE : SAMPLED_TOLERANCE),
   };
