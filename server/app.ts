@@ -1,12 +1,12 @@
-import express, { type ErrorRequestHandler, type Express } from 'express';
+import express, { type Express } from 'express';
 import type { Logger } from 'pino';
 import type { AccountStore, SessionStore } from './accounts/account.ts';
 import { makeIdentify } from './accounts/identify.ts';
 import type { Env } from './env.ts';
+import { answerErrors } from './http/answer-errors.ts';
 import type { ApiRoute } from './http/api-route.ts';
 import { serveClient } from './http/client-files.ts';
 import { refuseCrossSite } from './http/cross-site.ts';
-import { errorProblem } from './http/error-problem.ts';
 import { readJson } from './http/json-body.ts';
 import { mountRoutes } from './http/mount-routes.ts';
 import { requestLog } from './http/request-log.ts';
@@ -22,19 +22,6 @@ export interface AppDeps extends RouteDeps {
   trustedProxies: number;
   /** the built client; null: served by somebody else */ clientFolder: string | null;
 }
-
-/** Errors that nobody expected: what they say goes to the log, never into the answer. */
-const answerError =
-  (log: Logger): ErrorRequestHandler =>
-  (error: unknown, request, response, next) => {
-    const { problem, isBug } = errorProblem(error, String(request.id));
-    if (isBug) log.error({ err: error, request: request.id }, 'a request failed');
-    else if (problem.code === 'database-away') {
-      log.warn({ request: request.id, reason: String(error) }, 'the database is away');
-    }
-    if (response.headersSent) return next(error);
-    sendProblem(response, problem);
-  };
 
 /** The whole server but its socket. `routes` is the table that was mounted. */
 export function createApp(deps: AppDeps): { app: Express; routes: readonly ApiRoute[] } {
@@ -58,6 +45,6 @@ export function createApp(deps: AppDeps): { app: Express; routes: readonly ApiRo
   app.use((_request, response) =>
     sendProblem(response, { code: 'not-found', detail: 'There is nothing at this address.' }),
   );
-  app.use(answerError(deps.log));
+  app.use(answerErrors(deps.log));
   return { app, routes };
 }
