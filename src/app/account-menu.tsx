@@ -1,14 +1,13 @@
-import { Link, useNavigate } from 'react-router-dom';
+import { Link } from 'react-router-dom';
 import type { SignedIn } from '../../shared/contracts/accounts.ts';
 import { Disclosure } from '../components/disclosure.tsx';
 import { menuItemClasses } from '../components/menu-item-classes.ts';
 import { useSignOut } from '../features/account/api/use-sign-out.ts';
 import { useWorkIn } from '../features/account/api/use-work-in.ts';
-import { homeOf, placesOf } from './navigation.ts';
+import { placesOf } from './navigation.ts';
 
 const Others = ({ signedIn }: { signedIn: SignedIn }) => {
   const workIn = useWorkIn();
-  const navigate = useNavigate();
   const others = signedIn.memberships.filter(
     ({ organisation }) => organisation.id !== signedIn.organisation.id,
   );
@@ -20,11 +19,7 @@ const Others = ({ signedIn }: { signedIn: SignedIn }) => {
           key={organisation.id}
           type="button"
           className={menuItemClasses}
-          onClick={() =>
-            workIn.mutate(organisation.id, {
-              onSuccess: (answer) => void navigate(homeOf(answer.signedIn.role)),
-            })
-          }
+          onClick={() => workIn.mutate(organisation.id)}
         >
           Work in {organisation.name} as {role}
         </button>
@@ -36,7 +31,6 @@ const Others = ({ signedIn }: { signedIn: SignedIn }) => {
 /** Who is signed in and where; the pages as well, where the header has no room for them. */
 export const AccountMenu = ({ signedIn }: { signedIn: SignedIn }) => {
   const signOut = useSignOut();
-  const navigate = useNavigate();
   return (
     <Disclosure label={signedIn.person.name}>
       <p className="px-3 pt-1 pb-1.5 text-sm text-ink-2">
@@ -54,11 +48,7 @@ export const AccountMenu = ({ signedIn }: { signedIn: SignedIn }) => {
         <Link to="/account" className={menuItemClasses}>
           Account
         </Link>
-        <button
-          type="button"
-          className={menuItemClasses}
-          onClick={() => signOut.mutate(undefined, { onSuccess: () => void navigate('/') })}
-        >
+        <button type="button" className={menuItemClasses} onClick={() => signOut.mutate()}>
           Sign out
         </button>
       </div>

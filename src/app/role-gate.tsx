@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { Navigate, Outlet, useLocation } from 'react-router-dom';
 import type { Role } from '../../shared/contracts/fields.ts';
 import { ButtonLink } from '../components/button-link.tsx';
@@ -12,6 +13,8 @@ import { homeOf } from './navigation.ts';
 export const RoleGate = ({ roles }: { roles: readonly Role[] }) => {
   const { pathname, search } = useLocation();
   const query = useSignedIn();
+  const [hasStood, setHasStood] = useState(false);
+  if (query.data && !hasStood) setHasStood(true);
   if (query.isPending)
     return (
       <Page title="Coldbench">
@@ -24,8 +27,11 @@ export const RoleGate = ({ roles }: { roles: readonly Role[] }) => {
         <Failed what="Your account" problem={query.error} retry={() => void query.refetch()} />
       </Page>
     );
-  if (query.data === null)
-    return <Navigate replace to={`/sign-in?then=${encodeURIComponent(pathname + search)}`} />;
+  if (query.data === null) {
+    // Whoever was let in and is nobody now has signed out: the next person starts afresh.
+    const signIn = `/sign-in?then=${encodeURIComponent(pathname + search)}`;
+    return <Navigate replace to={hasStood ? '/' : signIn} />;
+  }
   if (roles.includes(query.data.role)) return <Outlet />;
   return (
     <Page title="Not for your role">

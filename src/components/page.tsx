@@ -13,11 +13,12 @@ interface Props {
 const useFocusAfterNavigation = () => {
   const heading = useRef<HTMLHeadingElement>(null);
   const { key, pathname } = useLocation();
-  const isFirstLoad = key === 'default';
+  // Filters and moments live in the query string and must not move the focus: the path alone counts.
+  const seen = useRef(key === 'default' ? pathname : null);
   useEffect(() => {
-    if (!isFirstLoad) heading.current?.focus({ preventScroll: true });
-    // Filters and moments live in the query string and must not move the focus: the path alone counts.
-  }, [pathname, isFirstLoad]);
+    if (seen.current !== pathname) heading.current?.focus({ preventScroll: true });
+    seen.current = pathname;
+  }, [pathname]);
   return heading;
 };
 

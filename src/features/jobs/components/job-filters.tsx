@@ -10,7 +10,7 @@ interface Props {
 }
 
 export const JobFilters = ({ values, set }: Props) => (
-  <search className="grid gap-3 sm:grid-cols-[1.2fr_1.2fr_0.8fr]">
+  <div role="search" className="grid gap-3 sm:grid-cols-[1.2fr_1.2fr_0.8fr]">
     <SearchField value={values.text} onChange={(text) => set('text', text)} />
     <SelectField
       label="Symptom"
@@ -34,5 +34,5 @@ export const JobFilters = ({ values, set }: Props) => (
         </option>
       ))}
     </SelectField>
-  </search>
+  </div>
 );

@@ -1,0 +1,144 @@
+import { screen, waitFor, within } from '@testing-library/react';
+import { describe, expect, it } from 'vitest';
+import { whoAmI } from '../../shared/contracts/accounts.ts';
+import { getAttempt, getDebrief, getEvents } from '../../shared/contracts/attempts.ts';
+import { getOven } from '../../shared/contracts/ovens.ts';
+import {
+  attempt,
+  debrief,
+  events,
+  id,
+  layout,
+  oven,
+  signedInAs,
+} from '../support/client-fixtures.ts';
+import { fakeApi, type FakeApi } from '../support/fake-api.ts';
+import { renderApp } from '../support/render-app.tsx';
+
+const path = `/attempts/${id(101)}`;
+
+const handedIn = (): FakeApi =>
+  fakeApi()
+    .on(whoAmI, { signedIn: signedInAs('trainee') })
+    .on(getAttempt, { attempt: attempt() })
+    .on(getDebrief, { debrief })
+    .on(getEvents, { events: [...events] })
+    .on(getOven, { definition: oven, layout });
+
+const timeline = () => screen.findByRole('region', { name: 'What you did' });
+
+describe('the debrief', () => {
+  it('leads with one sentence, the score and the six skills', async () => {
+    handedIn();
+    await renderApp(path);
+    const outcome = await screen.findByRole('region', { name: 'Outcome' });
+    expect(within(outcome).getByText(debrief.outcome)).toBeInTheDocument();
+    expect(within(outcome).getByText('cause found')).toBeInTheDocument();
+    expect(within(outcome).getByText('not worked safely')).toBeInTheDocument();
+    const skills = screen.getByRole('region', { name: 'Six skills' });
+    expect(
+      within(skills)
+        .getAllByRole('heading', { level: 3 })
+        .map(({ textContent }) => textContent),
+    ).toEqual(['make safe', 'isolate', 'measure', 'reason', 'repair and verify', 'record']);
+    expect(within(skills).getByText('not judged')).toBeInTheDocument();
+    expect(within(skills).getByText('−30')).toBeInTheDocument();
+  });
+
+  it('jumps from a mark to its moment and keeps the moment in the address', async () => {
+    handedIn();
+    const { user, address } = await renderApp(path);
+    await timeline();
+    await user.click(screen.getByRole('button', { name: /You discharged C1\.1/ }));
+    await waitFor(() => expect(address()).toBe(`${path}?at=4`));
+    const moment = within(await timeline()).getByRole('button', {
+      name: /Discharge tip on C1\.1/i,
+    });
+    await waitFor(() => expect(moment).toHaveFocus());
+    expect(moment).toHaveAttribute('aria-current', 'true');
+    expect(moment).toHaveTextContent('00:44');
+  });
+
+  it('offers no jump for what was never done', async () => {
+    handedIn();
+    await renderApp(path);
+    await timeline();
+    expect(
+      screen.getByText('You never proved the capacitor dead on DC volts.'),
+    ).toBeInTheDocument();
+    expect(
+      screen.queryByRole('button', { name: /You never proved the capacitor/ }),
+    ).not.toBeInTheDocument();
+  });
+
+  it('opens at the moment of the address', async () => {
+    handedIn();
+    await renderApp(`${path}?at=8`);
+    const moment = within(await timeline()).getByRole('button', { current: true });
+    expect(moment).toHaveTextContent('D1.a–D1.k 0.4 Ω');
+  });
+
+  it('names what was truly wrong', async () => {
+    handedIn();
+    await renderApp(path);
+    const faults = await screen.findByRole('region', { name: 'What was truly wrong' });
+    await waitFor(() => expect(faults).toHaveTextContent(/D1, .*diode: shorted/i));
+  });
+
+  it('sets the readings of the job sheet against the service data', async () => {
+    handedIn();
+    await renderApp(path);
+    const table = await screen.findByRole('table', { name: 'Readings on the job sheet' });
+    // Service data of the oven: high-voltage winding 80 to 120 Ω; the diode gives 20 to 50 MΩ forward.
+    const winding = within(table).getByRole('row', { name: /T1\.HV – T1\.core/ });
+    expect(winding).toHaveTextContent('94.8 Ω');
+    expect(winding).toHaveTextContent('80 to 120 Ω');
+    expect(within(winding).getByText('within')).toBeInTheDocument();
+    const diode = within(table).getByRole('row', { name: /D1\.a – D1\.k/ });
+    expect(within(diode).getByText('outside')).toBeInTheDocument();
+  });
+
+  it('offers the bench while the attempt is not handed in', async () => {
+    fakeApi()
+      .on(whoAmI, { signedIn: signedInAs('trainee') })
+      .on(getAttempt, { attempt: attempt({ status: 'on the bench', score: null }) });
+    await renderApp(path);
+    expect(await screen.findByRole('link', { name: 'Go on with your attempt' })).toHaveAttribute(
+      'href',
+      `/bench/${id(101)}`,
+    );
+  });
+
+  it('offers no bench to whoever only reads', async () => {
+    fakeApi()
+      .on(whoAmI, { signedIn: signedInAs('instructor') })
+      .on(getAttempt, { attempt: attempt({ status: 'on the bench', score: null, isOwn: false }) });
+    await renderApp(path);
+    expect(await screen.findByText(/Tom Reyes has not handed in/)).toBeInTheDocument();
+    expect(screen.queryByRole('link', { name: /Go on/ })).not.toBeInTheDocument();
+  });
+
+  it('asks a visitor to keep it', async () => {
+    handedIn().on(whoAmI, { signedIn: null });
+    await renderApp(path);
+    expect(
+      await screen.findByRole('link', { name: 'Create an account and keep it' }),
+    ).toHaveAttribute('href', '/sign-up');
+  });
+
+  it('keeps the skills when the timeline fails', async () => {
+    const api = handedIn().on(getEvents, 'no network');
+    const { user } = await renderApp(path);
+    expect(await screen.findByText('The timeline could not be loaded.')).toBeInTheDocument();
+    expect(screen.getByRole('region', { name: 'Six skills' })).toBeInTheDocument();
+    api.on(getEvents, { events: [...events] });
+    await user.click(screen.getByRole('button', { name: 'Try again' }));
+    expect(await timeline()).toBeInTheDocument();
+  });
+
+  it('says so when nothing was written on the sheet', async () => {
+    handedIn().on(getEvents, { events: events.slice(0, 3) });
+    await renderApp(path);
+    expect(await screen.findByText('No reading was written on the job sheet.')).toBeInTheDocument();
+  });
+});
