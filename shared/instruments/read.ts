@@ -64,7 +64,8 @@ function measured(setting: ActiveSetting, input: ReadInput): Reading {
   if (Math.abs(raw) > scale.maxCounts) return overRange(setting);
   // `+ 0` turns a negative zero into zero.
   const counts = Math.round(value / step + noise - (relative ?? 0) / step) + 0;
-  const beepsBelow = setting.function === 'beep' ? (setting.beepsBelow ?? 0) : 0;
+  // A negative voltage lies below every limit too: only the beep setting sounds.
+  const isBeeping = setting.function === 'beep' && value < (setting.beepsBelow ?? 0);
   return {
     ...blank,
     display: shown(setting, counts),
@@ -72,7 +73,7 @@ function measured(setting: ActiveSetting, input: ReadInput): Reading {
     value: counts * step,
     counts,
     decimals: scale.decimals,
-    isBeeping: value < beepsBelow,
+    isBeeping,
   };
 }
 
