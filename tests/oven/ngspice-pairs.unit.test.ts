@@ -88,14 +88,20 @@ function ngspiceJob({ red, black, setting, state }: Pair, index: number) {
   const branch = meterBranch(manual2000, setting, red, black);
   const circuit = assemble(drawOven(lc28, seedOf(index)), state, branch ? [branch] : []);
   const deck = writeDeck(circuit);
-  // ngspice puts no conductance from a node to ground. Ours is 1e-12 S; on a range of hundreds of
-  // ohms ten times as much is below any digit, and ngspice needs it to settle on the board's bridge.
-  const ohms = setting === 'ohms-200' || setting === 'diode' ? 1e11 : 1e12;
+  // ngspice puts no conductance from a node to ground: ours is 1e-12 S. With tolerances far below a
+  // count it does not settle on the bridge of the board, so here they are near its own.
+  const options = { reltol: '1e-4', abstol: '1e-12', vntol: '1e-7' };
   const held = [...deck.nodes.values()]
     .filter((node) => node !== '0')
-    .map((node, place) => `rhold${place} ${node} 0 ${ohms}`);
-  const at = (target: string) => deck.nodes.get(nodeOf(state, target)) ?? '0';
-  return { lines: [...deck.lines, ...held], commands: ['op'], red: at(red), black: at(black) };
+    .map((node, place) => `rhold${place} ${node} 0 1e12`);
+  const at = (target: string) => deck.nodes.get(nodeOf(state, target)) ?? 'missing';
+  return {
+    lines: [...deck.lines, ...held],
+    options,
+    commands: ['op'],
+    red: at(red),
+    black: at(black),
+  };
 }
 
 function shownFor(setting: string, volts: number): Reading {
@@ -116,7 +122,8 @@ describe('readings beside ngspice', () => {
     const jobs = pairs.map(ngspiceJob);
     theirs = runNgspice(jobs).map(({ op = {} }, index) => {
       const { red, black } = jobs[index]!;
-      const volts = (op[`v(${red})`] ?? 0) - (op[`v(${black})`] ?? 0);
+      const at = (node: string) => (node === '0' ? 0 : (op[`v(${node})`] ?? Number.NaN));
+      const volts = at(red) - at(black);
       return shownFor(pairs[index]!.setting, volts);
     });
   }, 120_000);
