@@ -1,4 +1,5 @@
 import type { OvenState } from '../../../shared/oven/oven-state.ts';
+import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 import { batteryTargets } from './bench-furniture.ts';
 import type { BenchHand } from './bench-hand.ts';
 import type { BenchPoint } from './bench-point.ts';
@@ -30,7 +31,7 @@ export const sceneTerminals = (
   });
   return [
     ...[...places].map(([target, at]) =>
-      terminal(target, at, stateOf(target, oven), isReachable(drawing, hand, target)),
+      terminal(target, at, stateOf(drawing, target, oven), isReachable(drawing, hand, target)),
     ),
     ...leads.flatMap(({ ends, isInCord }) =>
       ends
@@ -48,10 +49,13 @@ const labelOf = (drawing: BenchDrawing, target: string): SceneTerminal['label'] 
 const isOnPlug = ({ definition }: BenchDrawing, target: string): boolean =>
   definition.parts.some(({ ref, kind }) => kind === 'plug' && ref === target.split('.')[0]);
 
-/** A transformer's core is varnished until a spot on it is cleaned. */
-const stateOf = (target: string, oven: OvenState): TerminalState => {
+/** Metal under varnish stays so until a spot on it is cleaned. */
+const stateOf = ({ definition }: BenchDrawing, target: string, oven: OvenState): TerminalState => {
   if (oven.cleaned.includes(target)) return 'cleaned';
-  return target.endsWith('.core') ? 'varnished' : 'bare';
+  const [ref, id] = target.split('.');
+  const part = definition.parts.find((each) => each.ref === ref);
+  const terminals = part === undefined ? [] : partKinds[part.kind].terminals(part.variant);
+  return terminals.some((each) => each.id === id && each.isVarnished) ? 'varnished' : 'bare';
 };
 
 const isReachable = ({ definition }: BenchDrawing, hand: BenchHand, target: string): boolean => {

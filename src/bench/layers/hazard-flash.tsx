@@ -17,9 +17,10 @@ export function HazardFlash({ at, reducesMotion }: { at: BenchPoint; reducesMoti
       node.current?.getLayer()?.batchDraw();
     };
     if (reducesMotion) return show(1);
-    const began = performance.now();
+    let began: number | null = null;
     let frame = requestAnimationFrame(function step(now) {
-      show(Math.min(1, Math.max(0, (now - began) / flashMs)));
+      began ??= now;
+      show(Math.min(1, (now - began) / flashMs));
       if (share.current < 1) frame = requestAnimationFrame(step);
     });
     return () => cancelAnimationFrame(frame);

@@ -29,9 +29,10 @@ export const LeadGlyph = memo(function LeadGlyph({
       node.current?.getLayer()?.batchDraw();
     };
     if (from === lead || reducesMotion) return show(lead);
-    const began = performance.now();
+    let began: number | null = null;
     let frame = requestAnimationFrame(function step(now) {
-      const share = Math.min(1, Math.max(0, (now - began) / swingMs));
+      began ??= now;
+      const share = Math.min(1, (now - began) / swingMs);
       show(share === 1 ? lead : swingLead(from, lead, share));
       if (share < 1) frame = requestAnimationFrame(step);
     });
