@@ -67,6 +67,7 @@ export function march(integrator: Integrator, plan: Plan, watch: Watch): EngineF
     if (typeof reached === 'object') return reached;
     if (reached >= segment.length) {
       at += 1;
+      if (at >= ends.length) return undefined;
       base = segment.base + segment.length;
       turns = 0;
       continue;
@@ -75,7 +76,6 @@ export function march(integrator: Integrator, plan: Plan, watch: Watch): EngineF
     base += reached;
     if (turns > MOST_TURNS) return notConverged(integrator.machine, turns, base);
   }
-  return undefined;
 }
 
 function segmentEnds({ sources }: Machine, plan: Plan): number[] {

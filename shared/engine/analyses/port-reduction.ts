@@ -6,6 +6,7 @@ import type { CompiledCircuit } from './compile.ts';
 import { junctionPorts, type JunctionPorts } from './junction-ports.ts';
 import { createMachine, singular, type EngineOptions, type Machine } from './machine.ts';
 import { operatingPoint, solveAtRest } from './operating-point.ts';
+import { presentCircuit } from './present-circuit.ts';
 import { createPortNewton, type PortNewton } from './port-newton.ts';
 
 /** What a meter puts between its tips: an open voltage (V, red tip positive) behind a resistance (Ohm). */
@@ -109,7 +110,10 @@ function probeWhole(
     { kind: 'resistor', name: 'in the meter', nodes: [red, black], resistance: sourceResistance },
     { kind: 'current-source', name: 'of the meter', nodes: [black, red], wave },
   ];
-  const solved = operatingPoint({ elements: [...machine.circuit.elements, ...added] }, options);
+  const solved = operatingPoint(
+    { elements: [...presentCircuit(machine).elements, ...added] },
+    options,
+  );
   if (!solved.ok) return solved;
   const volts = solved.value.voltages[red]! - solved.value.voltages[black]!;
   return { ok: true, value: { volts, amps: (openVolts - volts) / sourceResistance } };
