@@ -80,6 +80,7 @@ describe('manual meter, 2000 counts', () => {
     expect(showOhms('beep', 50.5).isBeeping).toBe(false);
     expect(showOhms('beep', 95)).toMatchObject({ isBeeping: false, isOverRange: false });
     expect(showOhms('ohms-200', 10).isBeeping).toBe(false);
+    expect(show('dc-20', steady(-5)).isBeeping).toBe(false);
   });
 
   it('shows junction volts to 1.999', () => {
