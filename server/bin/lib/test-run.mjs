@@ -8,6 +8,9 @@ import { say, since } from './say.mjs';
 import { countTests, summaryLine } from './test-count.mjs';
 
 /** @typedef {import('./test-count.mjs').Count} Count */
+// Vitest cannot stop a test that never gives the processor back; a run must end all the same.
+const stepWithin = 30 * 60_000;
+
 /** @typedef {import('./test-steps.mjs').Step} Step */
 
 /**
@@ -59,7 +62,12 @@ async function countStep(children, step, env, folder) {
 async function runCommand(children, step, more, env) {
   const { command, args } = step.commandOf();
   const child = children.start(command, [...args, ...more], { cwd: projectFolder, env });
+  const timer = setTimeout(() => {
+    say(`${step.name}: stopped, because it did not end within ${stepWithin / 60_000} minutes`);
+    void child.stop();
+  }, stepWithin);
   const { code } = await child.ended;
+  clearTimeout(timer);
   // A server or a worker that a test forgot must not meet the next step.
   await child.stop();
   return code;
