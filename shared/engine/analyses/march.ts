@@ -58,16 +58,18 @@ export function march(integrator: Integrator, plan: Plan, watch: Watch): EngineF
   const budget = { steps: MOST_STEPS };
   let base = plan.from;
   let turns = 0;
-  for (let at = 0; at < ends.length;) {
+  for (let at = 0; ;) {
     const failure = settle(integrator, base);
     if (failure !== undefined) return failure;
     watch.onMoment?.(base);
-    const segment = { base, length: ends[at]! - base };
+    const end = ends[at];
+    if (end === undefined) return undefined;
+    const segment = { base, length: end - base };
     const reached = marchSegment(integrator, plan, segment, watch, budget);
     if (typeof reached === 'object') return reached;
     if (reached >= segment.length) {
       at += 1;
-      if (at >= ends.length) return undefined;
+      if (at === ends.length) return undefined;
       base = segment.base + segment.length;
       turns = 0;
       continue;
