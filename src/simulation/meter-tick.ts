@@ -1,8 +1,11 @@
 import type { StoreApi } from 'zustand/vanilla';
+import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { MeterView } from '../../shared/bench/reading.ts';
-import { meterAt, readingPeriod } from '../../shared/bench/reading.ts';
+import { readingPeriod, readMeter } from '../../shared/bench/reading.ts';
+import type { Setup } from '../../shared/bench/setup.ts';
 import { autoRange } from '../../shared/instruments/auto-range.ts';
 import type { BenchStore } from './bench-store.ts';
+import type { MeterReader } from './meter-reader.ts';
 import { isClosedTo } from './save-state.ts';
 
 /**
@@ -10,14 +13,13 @@ import { isClosedTo } from './save-state.ts';
  * something changes. A reading that stands still goes on record once, until something about it changes.
  * Returns what stops it.
  */
-export function meterTick(bench: StoreApi<BenchStore>): () => void {
+export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () => void {
   let taken = '';
-  const tick = (): void => {
-    const { state, clock, setup, show } = bench.getState();
-    const at = Math.floor(Math.floor(clock.now() / readingPeriod) * readingPeriod);
-    const atMs = Math.max(at, state.benchMs);
-    const view = meterAt(setup, state, atMs);
-    show(view);
+  let isReading = false;
+  let isOver = false;
+
+  const arrive = (view: MeterView | null, atMs: number): void => {
+    bench.getState().show(view);
     if (!view || !mayRecord(bench.getState())) return;
     if (changeRange(bench.getState(), view, atMs)) return;
     const key = readingKey(bench.getState(), view);
@@ -25,22 +27,46 @@ export function meterTick(bench: StoreApi<BenchStore>): () => void {
     taken = key;
     bench.getState().run({ type: 'TakeReading', data: {} }, atMs);
   };
-  tick();
-  const timer = setInterval(tick, readingPeriod);
+  const tick = async (): Promise<void> => {
+    const { state, clock, setup } = bench.getState();
+    const at = Math.floor(Math.floor(clock.now() / readingPeriod) * readingPeriod);
+    const atMs = Math.max(at, state.benchMs);
+    const isDriven = isConnected(state);
+    if (!isDriven) return arrive(loose(setup, state, atMs), atMs);
+    if (isReading) return;
+    isReading = true;
+    try {
+      const view = await reader.read(state, atMs);
+      if (isOver) return;
+      if (bench.getState().state === state) arrive(view, atMs);
+    } finally {
+      isReading = false;
+    }
+    // What the bench has become meanwhile is read at once, not a third of a second later.
+    if (bench.getState().state !== state && isConnected(bench.getState().state)) await tick();
+  };
+  void tick();
+  const timer = setInterval(() => void tick(), readingPeriod);
   const stop = bench.subscribe((now, before) => {
-    if (now.state !== before.state) tick();
+    if (now.state !== before.state) void tick();
   });
   return () => {
+    isOver = true;
     clearInterval(timer);
     stop();
+    reader.stop();
   };
 }
 
+const isConnected = ({ probes, meter }: BenchState): boolean =>
+  meter.setting !== 'off' && !meter.isDestroyed && probes.red !== null && probes.black !== null;
+
+/** Off, dead, or a tip in the air: nothing of the circuit is shown. */
+const loose = (setup: Setup, state: BenchState, atMs: number): MeterView | null =>
+  readMeter(setup, state, { state: { ...state, benchMs: atMs }, trace: { time: [], volts: [] } });
+
 const mayRecord = ({ state, save }: BenchStore): boolean =>
-  !isClosedTo(save) &&
-  !state.isHandedIn &&
-  state.probes.red !== null &&
-  state.probes.black !== null;
+  !isClosedTo(save) && !state.isHandedIn && isConnected(state);
 
 /** REL holds the range, as a number of one range means nothing to another. */
 function changeRange({ setup, state, run }: BenchStore, view: MeterView, atMs: number): boolean {
@@ -53,13 +79,5 @@ function changeRange({ setup, state, run }: BenchStore, view: MeterView, atMs: n
 function readingKey({ state }: BenchStore, { reading }: MeterView): string {
   const counts = reading.isOverRange ? 'OL' : Math.round((reading.counts ?? 0) / 4);
   const { probes, meter, oven, replaced } = state;
-  return JSON.stringify([
-    probes,
-    meter.setting,
-    meter.relative,
-    counts,
-    oven.leadEnds,
-    oven,
-    replaced,
-  ]);
+  return JSON.stringify([probes, meter.setting, meter.relative, counts, oven, replaced]);
 }

@@ -13,7 +13,7 @@ const Group = ({ group }: { group: KeyGroup }) => {
           aria-hidden
           className="flex h-[26px] items-center justify-center font-mono text-xs font-semibold text-bench-ink-2"
         >
-          {group.legend}
+          <KeySign label={group.legend} />
         </span>
       )}
       {group.keys.map((key) => (

@@ -13,7 +13,9 @@ export const HandIn = ({ onHandedIn }: { onHandedIn: () => void }) => {
   return (
     <>
       <Button look="main" isSmall disabled={isHandedIn} onClick={() => setIsAsking(true)}>
-        Hand in<span className="max-[700px]:sr-only"> job sheet</span>
+        <span>
+          Hand in<span className="max-[700px]:sr-only"> job sheet</span>
+        </span>
       </Button>
       <ConfirmDialog
         isOpen={isAsking}

@@ -4,7 +4,13 @@ import { hintForHand, nameOfHand } from '../tools/catalogue.ts';
 import { hoverWords } from './hover-words.ts';
 
 /** Beside the pointer: what lies under it. Its place is set from outside, move by move. */
-export const HoverName = ({ place }: { place: RefObject<HTMLDivElement | null> }) => {
+export const HoverName = ({
+  place,
+  isHidden,
+}: {
+  place: RefObject<HTMLDivElement | null>;
+  isHidden: boolean;
+}) => {
   const words = useBench(({ setup, state, hovered }) => {
     const found = hovered === null ? null : hoverWords(setup.oven.definition, state, hovered);
     return found && `${found.ref}\n${found.words}`;
@@ -14,8 +20,8 @@ export const HoverName = ({ place }: { place: RefObject<HTMLDivElement | null> }
     <div
       ref={place}
       aria-hidden
-      className="pointer-events-none absolute top-0 left-0 z-[2] max-w-[260px] rounded-[7px] bg-mat-deep px-3 py-1.5 shadow-lg data-[off=true]:hidden"
-      hidden={words === null}
+      className="pointer-events-none absolute top-0 left-0 z-[2] max-w-[240px] rounded-[7px] bg-mat-deep px-2.5 py-1 shadow-lg data-[off=true]:hidden"
+      hidden={words === null || isHidden}
     >
       <p className="font-mono text-xs font-semibold text-caution">{ref}</p>
       <p className="text-sm text-bench-ink">{name}</p>
@@ -30,9 +36,11 @@ export const HandHint = () => {
   const putDown = useBench((store) => store.putDown);
   if (hand.kind === 'empty') return null;
   return (
-    <div className="pointer-events-auto flex max-w-full items-center gap-3 rounded-md border border-act bg-mat-deep py-1 pr-1 pl-3 text-sm text-bench-ink shadow-lg">
+    <div className="pointer-events-auto flex max-w-full items-center gap-3 rounded-md border border-act bg-mat-deep py-1 pr-1 pl-3 text-sm leading-snug text-bench-ink shadow-lg">
       <p>
-        <b className="font-semibold first-letter:uppercase">{nameOfHand(hand)} in hand.</b>{' '}
+        <b className="inline-block font-semibold first-letter:uppercase">
+          {nameOfHand(hand)} in hand.
+        </b>{' '}
         {hintForHand(hand, state)}
       </p>
       <button

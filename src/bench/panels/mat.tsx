@@ -9,7 +9,7 @@ import { mirrorGroups } from '../mirror/mirror-entries.ts';
 import { Mirror } from '../mirror/mirror.tsx';
 import { HandHint, HoverName } from './hover-name.tsx';
 import { MatContext } from './mat-context.ts';
-import { NoticePanel } from './notice-panel.tsx';
+import { HazardNotice, RefusalNotice } from './notice-panel.tsx';
 import { placeBeside } from './place-beside.ts';
 import { placeOf } from './place-of.ts';
 import { RunPanel } from './run-panel.tsx';
@@ -31,7 +31,7 @@ interface Props {
 }
 
 /** px, and the view below which it takes the whole width */
-const panelWidth = 272;
+const panelWidth = 300;
 const narrow = 560;
 
 /** The mat: the picture of the bench, what is said about it, and its parallel buttons. */
@@ -59,7 +59,8 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
     const label = name.current;
     if (!label) return;
     label.dataset['off'] = String(isGone || event.pointerType !== 'mouse');
-    const x = Math.max(4, Math.min(event.screen[0] + 16, view.width - label.offsetWidth - 8));
+    const isRight = event.screen[0] + label.offsetWidth + 28 > view.width;
+    const x = event.screen[0] + (isRight ? -label.offsetWidth - 18 : 18);
     const isLow = event.screen[1] > view.height - label.offsetHeight - 40;
     label.style.transform = `translate(${x}px, ${event.screen[1] + (isLow ? -label.offsetHeight - 14 : 20)}px)`;
   };
@@ -127,16 +128,21 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
         />
       ) : null}
       <div className="pointer-events-none absolute inset-x-3 top-2.5 z-[2] grid justify-items-start gap-2">
-        <div className="pointer-events-auto max-w-full">
-          <StateChips />
+        <div className="pointer-events-auto flex w-full items-start justify-between gap-2">
+          <div className="min-w-0">
+            <StateChips />
+          </div>
+          <ZoomButtons camera={camera} />
         </div>
-        <div className="grid w-full justify-items-center gap-2">
-          <HandHint />
-          <NoticePanel />
+        <div className="grid w-full justify-items-center">
+          <HazardNotice />
         </div>
       </div>
-      <HoverName place={name} />
-      <ZoomButtons camera={camera} />
+      <div className="pointer-events-none absolute bottom-2 left-2 z-[2] grid max-w-[min(440px,calc(100%-16px))] justify-items-start gap-1.5">
+        <RefusalNotice />
+        <HandHint />
+      </div>
+      <HoverName place={name} isHidden={selection !== null} />
       {panelStyle ? <SelectionPanel style={panelStyle} onClose={closeSelection} /> : null}
       {isRunOpen ? <RunPanel onClose={onRunClose} /> : null}
       <Mirror

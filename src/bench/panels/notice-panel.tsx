@@ -12,7 +12,7 @@ const Row = ({ label, text }: { label: string; text: string }) => (
   </div>
 );
 
-const HazardNotice = ({ data, onClose }: { data: HazardData; onClose: () => void }) => {
+const HazardPanel = ({ data, onClose }: { data: HazardData; onClose: () => void }) => {
   const isGuided = useBench(({ condition }) => condition === 'guided');
   const words = hazardWords(data);
   return (
@@ -40,19 +40,25 @@ const HazardNotice = ({ data, onClose }: { data: HazardData; onClose: () => void
   );
 };
 
-/** What the bench has to say: why not, or what just happened. */
-export const NoticePanel = () => {
+/** What just happened, in plain words; it stays until the trainee goes on. */
+export const HazardNotice = () => {
   const notice = useBench((store) => store.notice);
   const dismiss = useBench((store) => store.dismiss);
-  if (!notice) return null;
-  if (notice.kind === 'refusal')
-    return (
-      <div className="pointer-events-auto flex max-w-[560px] items-center gap-2 rounded-md border border-caution bg-mat-deep py-1 pr-1 pl-3 text-bench-ink shadow-lg">
-        <TriangleAlert aria-hidden size={18} className="shrink-0 text-caution" />
-        <p className="text-sm">{notice.text}</p>
-        <IconX name="Close this note" onPress={dismiss} />
-      </div>
-    );
+  if (notice?.kind !== 'hazard') return null;
   const parsed = hazard.safeParse(notice.event.data);
-  return parsed.success ? <HazardNotice data={parsed.data} onClose={dismiss} /> : null;
+  return parsed.success ? <HazardPanel data={parsed.data} onClose={dismiss} /> : null;
+};
+
+/** Why not, in one sentence. */
+export const RefusalNotice = () => {
+  const notice = useBench((store) => store.notice);
+  const dismiss = useBench((store) => store.dismiss);
+  if (notice?.kind !== 'refusal') return null;
+  return (
+    <div className="pointer-events-auto flex max-w-full items-center gap-2 rounded-md border border-caution bg-mat-deep py-1 pr-1 pl-3 leading-snug text-bench-ink shadow-lg">
+      <TriangleAlert aria-hidden size={18} className="shrink-0 text-caution" />
+      <p className="text-sm">{notice.text}</p>
+      <IconX name="Close this note" onPress={dismiss} />
+    </div>
+  );
 };

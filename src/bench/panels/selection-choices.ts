@@ -8,7 +8,12 @@ import { seatedEnds } from './seated-ends.ts';
 
 /** One thing that can be done with what is picked out. */
 export type Choice =
-  | { kind: 'command'; label: string; command: BenchCommand }
+  | {
+      kind: 'command';
+      label: string;
+      /** what stands on the button under a title that says the rest; it begins the label */ short?: string;
+      command: BenchCommand;
+    }
   | { kind: 'take'; label: string; hand: Hand }
   /** asks for the text of the tag first */
   | { kind: 'label'; label: string; end: string; text: string }
@@ -48,7 +53,14 @@ function targetChoices(definition: OvenDefinition, state: BenchState, ref: strin
   if (name === null || (isEnd && state.oven.leadEnds[ref] !== null)) return null;
   const terminal = terminalsOf(definition).find((one) => one.ref === ref);
   const groups: ChoiceGroup[] = [
-    { title: 'Meter', choices: [probeChoice(state, 'red', ref), probeChoice(state, 'black', ref)] },
+    {
+      title: 'Put here or take off',
+      choices: [
+        probeChoice(state, 'red', ref),
+        probeChoice(state, 'black', ref),
+        ...toolChoices(state, ref),
+      ],
+    },
     {
       title: isEnd ? 'This lead end' : 'Leads here',
       choices: isEnd
@@ -60,7 +72,6 @@ function targetChoices(definition: OvenDefinition, state: BenchState, ref: strin
             ...fitChoices(definition, state, ref),
           ],
     },
-    { title: 'Discharge and battery', choices: toolChoices(state, ref) },
     {
       title: 'More',
       choices: [
@@ -90,13 +101,19 @@ const command = (label: string, it: BenchCommand): Choice => ({
   command: it,
 });
 
+/** `here`: it sits here already. */
+const placing = (name: string, here: boolean, put: BenchCommand, take: BenchCommand): Choice =>
+  here
+    ? command(`${name} off`, take)
+    : { kind: 'command', label: `${name} here`, short: name, command: put };
+
 const probeChoice = (state: BenchState, probe: 'red' | 'black', target: string): Choice =>
-  state.probes[probe] === target
-    ? command(`Take the ${probe} probe off`, { type: 'RemoveProbe', data: { probe } })
-    : command(`${probe === 'red' ? 'Red' : 'Black'} probe here`, {
-        type: 'PlaceProbe',
-        data: { probe, target },
-      });
+  placing(
+    probe === 'red' ? 'Red probe' : 'Black probe',
+    state.probes[probe] === target,
+    { type: 'PlaceProbe', data: { probe, target } },
+    { type: 'RemoveProbe', data: { probe } },
+  );
 
 const labelChoice = (state: BenchState, end: string, text: string): Choice => {
   const now = state.labels[end];
@@ -143,23 +160,28 @@ const fitChoices = (definition: OvenDefinition, state: BenchState, terminal: str
     );
 
 function toolChoices({ discharge, battery }: BenchState, target: string): Choice[] {
-  const tools: Choice[] = [
-    discharge.clip === target
-      ? command('Take the discharge clip off', { type: 'RemoveDischargeClip', data: {} })
-      : command('Discharge clip here', { type: 'FitDischargeClip', data: { target } }),
-    discharge.tip === target
-      ? command('Take the discharge tip off', { type: 'LiftDischargeTip', data: {} })
-      : command('Discharge tip here', { type: 'TouchDischargeTip', data: { target } }),
+  const tools = [
+    placing(
+      'Discharge clip',
+      discharge.clip === target,
+      { type: 'FitDischargeClip', data: { target } },
+      { type: 'RemoveDischargeClip', data: {} },
+    ),
+    placing(
+      'Discharge tip',
+      discharge.tip === target,
+      { type: 'TouchDischargeTip', data: { target } },
+      { type: 'LiftDischargeTip', data: {} },
+    ),
   ];
-  const clips: Choice[] = (['neg', 'oneK'] as const).map((clip) => {
-    const name = clip === 'neg' ? 'battery negative' : 'battery 1 kΩ';
-    return battery[clip] === target
-      ? command(`Take ${name} off`, { type: 'UnclipBattery', data: { clip } })
-      : command(`${name[0]?.toUpperCase()}${name.slice(1)} here`, {
-          type: 'ClipBattery',
-          data: { clip, target },
-        });
-  });
+  const clips = (['neg', 'oneK'] as const).map((clip) =>
+    placing(
+      clip === 'neg' ? 'Battery −' : 'Battery + 1 kΩ',
+      battery[clip] === target,
+      { type: 'ClipBattery', data: { clip, target } },
+      { type: 'UnclipBattery', data: { clip } },
+    ),
+  );
   return target.startsWith('BAT.') ? tools : [...tools, ...clips];
 }
 

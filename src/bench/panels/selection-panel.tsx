@@ -26,6 +26,9 @@ const Look = ({ part }: { part: string }) => {
 /** A tool is where it goes, the hand free for the next thing; a lead or part is seldom done with after one. */
 const isPlacing = ({ type }: BenchCommand): boolean => /Probe|Discharge|Battery/.test(type);
 
+const isShort = (choice: Choice): choice is Extract<Choice, { kind: 'command' }> =>
+  choice.kind === 'command' && choice.short !== undefined;
+
 const buttonClasses =
   'flex min-h-8 w-full items-center rounded border border-bench-line px-2.5 py-1 text-left text-sm font-semibold hover:border-bench-ink-2 hover:bg-mat';
 
@@ -87,18 +90,24 @@ export const SelectionPanel = ({ style, onClose }: Props) => {
         />
       ) : (
         choices.groups.map(({ title, choices: here }) => (
-          <div key={title} role="group" aria-label={title} className="grid gap-1">
-            <p aria-hidden className="text-xs text-bench-ink-2">
+          <div
+            key={title}
+            role="group"
+            aria-label={title}
+            className={`grid gap-1 ${here.some(isShort) ? 'grid-cols-2' : ''}`}
+          >
+            <p aria-hidden className="col-span-full text-xs text-bench-ink-2">
               {title}
             </p>
             {here.map((choice) => (
               <button
                 key={choice.label}
                 type="button"
+                aria-label={choice.label}
                 className={buttonClasses}
                 onClick={() => choose(choice)}
               >
-                {choice.label}
+                {isShort(choice) ? choice.short : choice.label}
               </button>
             ))}
           </div>

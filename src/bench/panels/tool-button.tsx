@@ -44,16 +44,14 @@ export const ToolButton = ({ hand, children, target = null, shortcut }: Props) =
         aria-keyshortcuts={shortcut}
         onClick={toggle}
         {...drag}
-        className={`flex h-[26px] min-w-0 grow touch-none items-center gap-1 rounded border px-1.5 text-xs font-semibold ${
+        className={`flex h-[26px] min-w-0 grow touch-none items-center gap-1 rounded border px-1 text-xs font-semibold ${
           isInHand
             ? 'border-act bg-act text-on-act'
             : 'border-bench-line bg-mat-deep text-bench-ink hover:border-bench-ink-2'
         }`}
       >
         {children}
-        <span className="ml-auto truncate pl-1 font-mono">
-          {isInHand ? 'in hand' : (target ?? '')}
-        </span>
+        <span className="ml-auto truncate font-mono">{target ?? ''}</span>
       </button>
       {target !== null ? (
         <button

@@ -38,10 +38,10 @@ const ProbeTools = () => {
   return (
     <>
       <ToolButton hand={{ kind: 'probe', probe: 'red' }} target={probes.red} shortcut="r">
-        <Dot probe="red" /> red
+        <Dot probe="red" /> {probes.red === null ? 'red' : ''}
       </ToolButton>
       <ToolButton hand={{ kind: 'probe', probe: 'black' }} target={probes.black} shortcut="b">
-        <Dot probe="black" /> black
+        <Dot probe="black" /> {probes.black === null ? 'black' : ''}
       </ToolButton>
     </>
   );
@@ -87,7 +87,7 @@ export const ToolCards = () => {
       <Card title="Probes">
         <ProbeTools />
       </Card>
-      <Card title="Discharge" more="20 kΩ">
+      <Card title="Discharge lead">
         <DischargeTools />
       </Card>
       <Card title="Battery" more="12.6 V">

@@ -8,14 +8,14 @@ const ZoomButton = (props: { name: string; onPress: () => void; children: ReactN
     aria-label={props.name}
     title={props.name}
     onClick={props.onPress}
-    className="flex size-8 items-center justify-center rounded border border-bench-line bg-mat-deep text-bench-ink hover:border-bench-ink-2"
+    className="flex size-7 items-center justify-center rounded border border-bench-line bg-mat-deep text-bench-ink hover:border-bench-ink-2"
   >
     {props.children}
   </button>
 );
 
 export const ZoomButtons = ({ camera }: { camera: BenchCamera }) => (
-  <div role="group" aria-label="View" className="absolute right-2 bottom-2 z-[1] flex gap-1">
+  <div role="group" aria-label="View" className="flex shrink-0 gap-1">
     <ZoomButton name="Smaller" onPress={() => camera.zoom(0.8)}>
       <Minus aria-hidden size={16} />
     </ZoomButton>
