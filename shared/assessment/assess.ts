@@ -29,9 +29,16 @@ export function assess(setup: Setup, events: readonly RecordedEvent[]): Debrief 
 
 /** One sentence, the first thing a trainee reads. */
 function outcome(attempt: Attempt): string {
-  const found = isCauseFound(attempt) ? 'You found the cause' : 'The cause is not what you wrote';
+  const { faults } = attempt.setup;
+  const named = faults.filter((fault) =>
+    attempt.end.sheet.causes.some((one) => one.on === fault.on && one.fault === fault.fault),
+  ).length;
+  const isFound = isCauseFound(attempt);
+  const partly =
+    named > 0 ? `You named ${named} of ${faults.length} causes` : 'The cause is not on your sheet';
   const hazards = attempt.end.hazards.length;
-  if (hazards === 0) return `${found}, and nobody was put at risk.`;
+  if (hazards === 0)
+    return `${isFound ? 'You found the cause' : partly}, and nobody was put at risk.`;
   const times = hazards === 1 ? 'one hazard' : `${hazards} hazards`;
-  return `${found}, but ${times} happened on the way.`;
+  return `${isFound ? 'You found the cause, but' : `${partly}, and`} ${times} happened on the way.`;
 }

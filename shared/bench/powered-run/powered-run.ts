@@ -4,12 +4,15 @@ import { asFitted } from '../../oven/initial-state.ts';
 import type { RunOutcome } from '../record.ts';
 import { meltingTime } from './fuse-melting.ts';
 import type { Electrical } from './run-electrically.ts';
-import { refsOf, runElectrically } from './run-electrically.ts';
+import { heaterCurrents, refsOf, runElectrically } from './run-electrically.ts';
 
 /** W: the board's logic runs, and the display glows, from about two thirds of the rated voltage up. Judgement. */
 const logicWatts = 0.15;
 const displayWatts = 0.5;
-/** Share of its healthy power with which a lamp is seen to be lit, and a heater emits. Judgement. */
+/** s of mains after which the board's supply, and the high-voltage side, repeat themselves */
+const standbySeconds = 0.15;
+const settledSeconds = 0.3;
+/** Share of its healthy power with which a lamp is seen to be lit; of its healthy current with which a heater emits. Judgement. */
 const seen = 0.3;
 const emitting = 0.6;
 /** Share of a motor's healthy current with which it turns. Judgement. */
@@ -26,7 +29,7 @@ const loudAbove = 1.15;
 /** What start does to this oven for up to `ordered` s: seen, heard, blown, heated, and left on the capacitors. */
 export function poweredRun(oven: DrawnOven, state: OvenState, ordered: number): RunOutcome {
   const healthy = healthyRun(oven);
-  const { ran, isAlive } = start(oven, state, healthy);
+  const { ran, isAlive } = start(oven, state);
   const fuses = refsOf(oven, 'fuse').map((ref) => ({
     ref,
     after: fuseTime(oven, state, ref, ran),
@@ -69,21 +72,21 @@ interface Started {
 }
 
 /**
- * The control first, on its own transformer; then its relays. A magnetron emits when its heater gets
- * most of the power it gets in a healthy oven, else the run is one without it.
+ * The control first, on its own transformer; then its relays. A magnetron emits when its heater
+ * carries most of what it carries in a healthy oven.
  */
-function start(oven: DrawnOven, state: OvenState, healthy: Electrical): Started {
-  const standby = runElectrically(oven, { ...state, energised: [], hot: [] });
+function start(oven: DrawnOven, state: OvenState): Started {
+  const standby = runElectrically(oven, { ...state, energised: [], hot: [] }, standbySeconds);
   const isAlive = boardIsAlive(oven, state, standby);
   if (!isAlive || !state.isDoorClosed) return { ran: standby, isAlive };
   const running = inFullRun(oven, state);
-  const ran = runElectrically(oven, running, boards);
-  const cold = refsOf(oven, 'magnetron').filter(
-    (ref) => ran.power(`${ref}:heater`) < emitting * healthy.power(`${ref}:heater`),
-  );
-  if (cold.length === 0) return { ran, isAlive };
-  const hot = (running.hot ?? []).filter((ref) => !cold.includes(ref));
-  return { ran: runElectrically(oven, { ...running, hot }, boards), isAlive };
+  const heaters = heaterCurrents(oven, running);
+  const sound = heaterCurrents(oven, inFullRun(oven, asFitted(oven.definition, [])));
+  const hot = (running.hot ?? []).filter((ref) => {
+    const healthy = sound[ref];
+    return healthy === undefined || (heaters[ref] ?? 0) > emitting * healthy;
+  });
+  return { ran: runElectrically(oven, { ...running, hot }, settledSeconds, boards), isAlive };
 }
 
 /** Judged in standby, and of no weight beside what the relays switch. */
@@ -109,7 +112,12 @@ const healthyRuns = new WeakMap<DrawnOven, Electrical>();
 function healthyRun(oven: DrawnOven): Electrical {
   const known = healthyRuns.get(oven);
   if (known) return known;
-  const ran = runElectrically(oven, inFullRun(oven, asFitted(oven.definition, [])), boards);
+  const ran = runElectrically(
+    oven,
+    inFullRun(oven, asFitted(oven.definition, [])),
+    settledSeconds,
+    boards,
+  );
   healthyRuns.set(oven, ran);
   return ran;
 }

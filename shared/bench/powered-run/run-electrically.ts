@@ -1,4 +1,5 @@
 import { transient } from '../../engine/analyses/transient.ts';
+import { phasor } from '../../engine/analyses/phasor.ts';
 import type { Gathered } from '../../engine/analyses/summarise.ts';
 import type { Circuit, Storage } from '../../engine/circuit/circuit.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
@@ -6,8 +7,7 @@ import type { PartKindName } from '../../oven/oven.ts';
 import { energisedCircuit } from './energised-circuit.ts';
 import { withoutParasitics } from './without-parasitics.ts';
 
-/** s until the high-voltage side repeats itself, and of mains averaged at its end */
-const settling = 0.3;
+/** s of mains averaged at the end of a run */
 const averaged = 0.1;
 
 /** of one step; means over six cycles come out to a thousandth */
@@ -22,10 +22,11 @@ export interface Electrical {
 export const refsOf = (oven: DrawnOven, kind: PartKindName): string[] =>
   oven.definition.parts.filter((part) => part.kind === kind).map((part) => part.ref);
 
-/** 0.3 s of mains through the oven in this state, less the parts of some kinds, and what flowed in the last tenth of a second. */
+/** `settling` s of mains through the oven in this state, less the parts of some kinds, and what flowed in the last tenth of a second. */
 export function runElectrically(
   oven: DrawnOven,
   state: OvenState,
+  settling: number,
   leftOut: readonly PartKindName[] = [],
 ): Electrical {
   const named = (kind: PartKindName, inner: string): string[] =>
@@ -35,13 +36,11 @@ export function runElectrically(
     ...named('fuse', 'element'),
     ...named('hv-transformer', 'primary'),
     ...named('motor', 'winding'),
-    ...named('magnetron', 'heater'),
   ];
   const powers = [
     ...named('control-board', 'load'),
     ...named('control-board', 'filament'),
     ...named('lamp', 'filament'),
-    ...named('magnetron', 'heater'),
     ...named('magnetron', 'beam'),
     ...named('magnetron', 'threshold'),
   ];
@@ -62,6 +61,18 @@ export function runElectrically(
     power: (element) => of(summary?.powers, element)?.mean ?? 0,
     storage,
   };
+}
+
+/** A rms through each magnetron's heater before anything conducts at high voltage: linear, so by phasors. */
+export function heaterCurrents(oven: DrawnOven, state: OvenState): Record<string, number> {
+  const solved = phasor(energisedCircuit(oven, state), [oven.definition.supply.hertz]);
+  if (!solved.ok) throw new Error(`heaters: ${solved.failure.message}`);
+  return Object.fromEntries(
+    refsOf(oven, 'magnetron').map((ref) => {
+      const [re, im] = solved.value.currents[`${ref}:heater`]?.[0] ?? [0, 0];
+      return [ref, Math.hypot(re, im)];
+    }),
+  );
 }
 
 /** The circuit without the elements of these parts. */
