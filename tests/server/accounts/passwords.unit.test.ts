@@ -1,5 +1,5 @@
 import { afterEach, expect, test, vi } from 'vitest';
-import * as argon2 from '@node-rs/argon2';
+import type * as argon2 from '@node-rs/argon2';
 import { Passwords } from '../../../server/accounts/passwords.ts';
 
 // The real argon2, counted: how many hashes run at once cannot be seen from outside.
