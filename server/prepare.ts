@@ -1,7 +1,10 @@
 import { join } from 'node:path';
 import type { Logger } from 'pino';
 import type { Passwords } from './accounts/passwords.ts';
+import { attemptRules } from './attempts/attempt-rules.ts';
 import { readDemoAccounts } from './demo/demo-accounts.ts';
+import { readRecordings } from './demo/read-recordings.ts';
+import { seedAttempts } from './demo/seed-attempts.ts';
 import { seedDemo } from './demo/seed-demo.ts';
 import type { OvenLibrary } from './ovens/oven-library.ts';
 import type { OnBadFile } from './ovens/read-json-folder.ts';
@@ -36,7 +39,15 @@ export async function prepare(options: PrepareOptions): Promise<OvenLibrary> {
       await readDemoAccounts(root),
       jobs,
     );
-    if (organisation !== null) log.info('the demonstration organisation was set up');
+    if (organisation !== null) {
+      const recordings = await readRecordings(root, onBadFile);
+      await seedAttempts(
+        { ...stores, rules: attemptRules, ovens, clock },
+        organisation,
+        recordings,
+      );
+      log.info('the demonstration organisation was set up');
+    }
   }
   log.info({ ovens: ovens.list().length, jobs: jobs.length }, 'ovens and practice jobs are ready');
   return ovens;

@@ -1,0 +1,26 @@
+import { readFile, writeFile } from 'node:fs/promises';
+import { join } from 'node:path';
+import { perform } from '../../shared/bench/perform.ts';
+import { makeSetup } from '../../shared/bench/setup.ts';
+import { ovenDefinition } from '../../shared/oven/oven.ts';
+import { scenarioContent } from '../../shared/scenario/scenario.ts';
+import { demoAttempts } from '../demo/attempts.ts';
+import type { Recording } from '../demo/recording.ts';
+import { findProjectRoot } from '../project-root.ts';
+
+// npm run record-demo: does the demo's written-down attempts on the bench and keeps what the circuit gave.
+const scenarios = join(findProjectRoot(), 'scenarios');
+const read = async (...path: string[]): Promise<unknown> =>
+  JSON.parse(await readFile(join(scenarios, ...path), 'utf8'));
+
+for (const [index, { email, job, seed, steps }] of demoAttempts.entries()) {
+  const content = scenarioContent.parse(await read('jobs', `${job}.json`));
+  const definition = ovenDefinition.parse(await read('ovens', `${content.oven}.json`));
+  const setup = makeSetup({ ...content, definition, seed });
+  const performed = perform(setup, steps);
+  if (!performed.ok) throw new Error(`${job}, step ${performed.step}: ${performed.message}`);
+  const recording: Recording = { schemaVersion: 1, email, job, seed, events: performed.events };
+  const file = join(scenarios, 'recordings', `${index + 1}-${job}.json`);
+  await writeFile(file, `${JSON.stringify(recording, null, 1)}\n`);
+  process.stdout.write(`${job}: ${performed.events.length} events\n`);
+}
