@@ -34,7 +34,11 @@ export const renderApp = async (path: string) => {
   return {
     user: userEvent.setup({ delay: null }),
     router,
-    /** where the person is: path and query */
-    address: () => `${router.state.location.pathname}${router.state.location.search}`,
+    /** where the person is, or is on the way to while that page's code is fetched */
+    address: () => {
+      const { location, navigation } = router.state;
+      const { pathname, search } = navigation.location ?? location;
+      return `${pathname}${search}`;
+    },
   };
 };

@@ -11,12 +11,12 @@ interface Found {
 }
 
 const missing = (draft: ScenarioContent): Found[] =>
-  draft.faults.flatMap(({ on, fault }, index) => {
-    if (on === '') return [{ path: `faults.${index}.on`, message: 'Choose a part or a lead.' }];
-    return fault === ''
+  draft.faults.flatMap(({ on, fault }, index) => [
+    ...(on === '' ? [{ path: `faults.${index}.on`, message: 'Choose a part or a lead.' }] : []),
+    ...(fault === ''
       ? [{ path: `faults.${index}.fault`, message: 'Choose what is wrong with it.' }]
-      : [];
-  });
+      : []),
+  ]);
 
 const unfit = (definition: OvenDefinition, draft: ScenarioContent): Found[] => {
   const faults = draft.faults.filter(({ on, fault }) => on !== '' && fault !== '');

@@ -1,14 +1,18 @@
 import { useState } from 'react';
 import { Link, useNavigate, useParams } from 'react-router-dom';
+import type { Scenario } from '../../../shared/contracts/scenarios.ts';
+import type { ScenarioContent } from '../../../shared/scenario/scenario.ts';
 import { EmptyState } from '../../components/empty-state.tsx';
 import { Failed } from '../../components/failed.tsx';
 import { Loading } from '../../components/loading.tsx';
 import { Page } from '../../components/page.tsx';
+import { useOven } from '../ovens/api/use-oven.ts';
 import { useOvens } from '../ovens/api/use-ovens.ts';
 import { useScenario } from './api/use-scenario.ts';
 import { Editor } from './components/editor.tsx';
 import type { OvenChoice } from './components/job-fields.tsx';
 import { newDraft } from './new-draft.ts';
+import { withUsualValues } from './usual-values.ts';
 
 interface Props {
   id: string;
@@ -16,6 +20,20 @@ interface Props {
   editorKey: string;
   onCreated: (id: string) => void;
 }
+
+type OpenedProps = Pick<Props, 'ovens' | 'onCreated'> & {
+  scenario: Scenario | null;
+  draft: ScenarioContent;
+};
+
+/** Opens the draft once; what is saved later never changes the form. Without its oven it stands as it is. */
+const Opened = ({ draft, ...rest }: OpenedProps) => {
+  const [opened] = useState(draft);
+  const oven = useOven(opened.oven);
+  if (oven.isPending) return <Loading what="the oven" />;
+  const start = oven.data ? withUsualValues(opened, oven.data.definition) : opened;
+  return <Editor start={start} {...rest} />;
+};
 
 const Loaded = ({ id, ovens, editorKey, onCreated }: Props) => {
   const isNew = id === 'new';
@@ -27,28 +45,12 @@ const Loaded = ({ id, ovens, editorKey, onCreated }: Props) => {
         Ovens come with the server. Ask whoever runs it.
       </EmptyState>
     );
-  if (isNew)
-    return (
-      <Editor
-        key={editorKey}
-        scenario={null}
-        start={newDraft(first.id)}
-        ovens={ovens}
-        onCreated={onCreated}
-      />
-    );
+  const rest = { ovens, onCreated };
+  if (isNew) return <Opened key={editorKey} scenario={null} draft={newDraft(first.id)} {...rest} />;
   if (query.isPending) return <Loading what="the scenario" />;
   if (query.isError)
     return <Failed what="The scenario" problem={query.error} retry={() => void query.refetch()} />;
-  return (
-    <Editor
-      key={editorKey}
-      scenario={query.data}
-      start={query.data.draft}
-      ovens={ovens}
-      onCreated={onCreated}
-    />
-  );
+  return <Opened key={editorKey} scenario={query.data} draft={query.data.draft} {...rest} />;
 };
 
 /** The editor at `/scenarios/new` and `/scenarios/:id`: one page, so that a first save keeps the form as it is. */

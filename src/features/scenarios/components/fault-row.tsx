@@ -5,11 +5,14 @@ import type { OvenDefinition } from '../../../../shared/oven/oven.ts';
 import type { ScenarioContent } from '../../../../shared/scenario/scenario.ts';
 import { Button } from '../../../components/button.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
+import { usualValues } from '../usual-values.ts';
 import { QuantityField } from './quantity-field.tsx';
 
-const usualValues = (kind: FaultKind | undefined): Record<string, number> | undefined =>
-  kind?.parameters &&
-  Object.fromEntries(Object.entries(kind.parameters).map(([name, { usual }]) => [name, usual]));
+/** No `values` at all where a fault has none: the form compares by what is there. */
+const valuesOf = (kind: FaultKind | undefined): { values?: Record<string, number> } => {
+  const values = usualValues(kind);
+  return values ? { values } : {};
+};
 
 interface Props {
   index: number;
@@ -30,7 +33,7 @@ export const FaultRow = ({ index, definition, onRemove }: Props) => {
     clearErrors(`faults.${index}`);
     setValue(
       `faults.${index}`,
-      { on, fault: chosen?.id ?? '', values: usualValues(chosen) },
+      { on, fault: chosen?.id ?? '', ...valuesOf(chosen) },
       { shouldDirty: true, shouldValidate: isShownBefore },
     );
   };

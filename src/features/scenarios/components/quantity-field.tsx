@@ -16,7 +16,7 @@ export const QuantityField = ({ name, limits }: Props) => {
   const {
     field: { ref: focusRef, value, onBlur, onChange },
     fieldState,
-  } = useController<ScenarioContent, typeof name>({ name });
+  } = useController<ScenarioContent, typeof name>({ name, defaultValue: limits.usual });
   const [typed, setTyped] = useState(() =>
     quantityText(typeof value === 'number' ? value : limits.usual),
   );
