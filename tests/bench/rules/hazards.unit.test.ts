@@ -4,7 +4,11 @@ import { handsOn, opened, reads, setupWith } from '../../support/bench.ts';
 const bleederOpen = [{ on: 'C1', fault: 'bleeder-open' }];
 
 const charged = () =>
-  opened(handsOn(setupWith([{ on: 'V1', fault: 'heater-open' }, ...bleederOpen], { lastRunSecondsAgo: 60 })));
+  opened(
+    handsOn(
+      setupWith([{ on: 'V1', fault: 'heater-open' }, ...bleederOpen], { lastRunSecondsAgo: 60 }),
+    ),
+  );
 
 const hazardsOf = (events: readonly { type: string; data: object }[]) =>
   events.filter((event) => event.type === 'HazardHappened').map((event) => event.data);
@@ -54,13 +58,17 @@ describe('a capacitor that nobody discharged', () => {
 
 describe('a capacitor with its bleeder', () => {
   it('is empty after five minutes of waiting (10 MOhm, 0.95 uF: 31 time constants)', () => {
-    const hands = opened(handsOn(setupWith([{ on: 'V1', fault: 'heater-open' }], { lastRunSecondsAgo: 5 })));
+    const hands = opened(
+      handsOn(setupWith([{ on: 'V1', fault: 'heater-open' }], { lastRunSecondsAgo: 5 })),
+    );
     hands.does('Wait', { ms: 300_000 }, 300);
     expect(hazardsOf(hands.does('LiftLead', { end: 'W24/a' }))).toEqual([]);
   });
 
   it('still holds more than 60 V after 30 s: waiting is not discharging (FACTS 1.3)', () => {
-    const hands = opened(handsOn(setupWith([{ on: 'V1', fault: 'heater-open' }], { lastRunSecondsAgo: 5 })));
+    const hands = opened(
+      handsOn(setupWith([{ on: 'V1', fault: 'heater-open' }], { lastRunSecondsAgo: 5 })),
+    );
     hands.does('Wait', { ms: 22_000 }, 22);
     expect(hazardsOf(hands.does('LiftLead', { end: 'W24/a' }))).toHaveLength(1);
   });
