@@ -67,7 +67,7 @@ describe('assembling', () => {
       }),
       { seed: 20261, numRuns: 150 },
     );
-  });
+  }, 60_000);
 
   it('has every terminal as a node, whatever is lifted', () => {
     const { voltages } = solve(cold({ lift: leadEnds }), []);

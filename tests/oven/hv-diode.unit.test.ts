@@ -70,7 +70,7 @@ describe('high-voltage diode, one set of values for both trade checks', () => {
       expect(reverse).toBeGreaterThanOrEqual(180);
       expect(reverse).toBeLessThanOrEqual(350);
     }
-  });
+  }, 60_000);
 
   it.each([
     ['shorted', 10, 11],

@@ -59,6 +59,7 @@ describe('service data of the LC-28', () => {
       for (let seed = 1; seed <= 10; seed += 1)
         expect(isGood(entry, measure(entry, [], seed)), `seed ${seed}`).toBe(true);
     },
+    60_000,
   );
 
   const bad: [string, AppliedFault][] = [
@@ -126,8 +127,12 @@ describe('service data of the LC-28', () => {
     { on: 'M1', fault: 'seized' },
     { on: 'A1', fault: 'dead' },
   ];
-  it.each(unseen)('no settled line sees %o', (fault) => {
-    for (const entry of lc28.serviceData)
-      expect(isGood(entry, measure(entry, [fault], 4)), entry.id).toBe(true);
-  });
+  it.each(unseen)(
+    'no settled line sees %o',
+    (fault) => {
+      for (const entry of lc28.serviceData)
+        expect(isGood(entry, measure(entry, [fault], 4)), entry.id).toBe(true);
+    },
+    60_000,
+  );
 });
