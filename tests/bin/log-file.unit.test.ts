@@ -31,6 +31,13 @@ describe('the last words of a program', () => {
     expect(lastWords(text)).toBe('cannot migrate: relation missing');
   });
 
+  it.each([
+    'initdb: error: invalid locale name "x"\ninitdb: removing data directory',
+    '2026-01-01 10:00:00 UTC [7] FATAL:  lock file is empty\n2026-01-01 10:00:00 UTC [7] LOG:  down',
+  ])('are what PostgreSQL gave up over: %j', (text) => {
+    expect(lastWords(text)).toBe(text.split('\n')[0]);
+  });
+
   it('are a line that only begins like JSON, as it is', () => {
     expect(lastWords('{"level":30,')).toBe('{"level":30,');
   });

@@ -81,6 +81,7 @@ export function createChildren() {
       isStopping = true;
       for (const { child } of [...running].reverse()) await child.stop();
     },
+    isStopping: () => isStopping,
     records: () => running.map(({ record }) => record),
     /** @param {() => void} listener told when something started or ended */
     onChange: (listener) => {

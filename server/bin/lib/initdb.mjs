@@ -1,6 +1,7 @@
 import { closeSync, openSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { Failure } from './failure.mjs';
+import { lastWordsIn } from './log-file.mjs';
 import { postgresEnv } from './postgres-env.mjs';
 
 /**
@@ -31,7 +32,7 @@ export async function makeCluster(children, { folder, role, account, programs, i
   });
   closeSync(lines);
   if (code !== 0) {
-    throw new Failure(`PostgreSQL could not make its cluster (exit code ${code}): see ${log}.`);
+    throw new Failure(`PostgreSQL could not make its cluster (${log}): ${lastWordsIn(log)}`);
   }
   renameSync(made, join(folder, 'cluster'));
 }

@@ -22,7 +22,8 @@ export function lastWords(text) {
     .split('\n')
     .filter((line) => !/^(\s.*|[{}^]*|Node\.js v.*)$/.test(line))
     .map(messageOf);
-  return (lines.findLast((line) => /^\w*error\b/i.test(line)) ?? lines.at(-1) ?? '').trim();
+  const isError = /^(\w+: )?\w*error\b|\b(FATAL|PANIC): /i;
+  return (lines.findLast((line) => isError.test(line)) ?? lines.at(-1) ?? '').trim();
 }
 
 /** @param {string} file */

@@ -2,6 +2,7 @@ import { closeSync, existsSync, openSync, readFileSync, renameSync, rmSync } fro
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { Failure } from './failure.mjs';
+import { lastWordsIn } from './log-file.mjs';
 import { freePort, loopback } from './ports.mjs';
 import { postgresEnv } from './postgres-env.mjs';
 import { commandOf } from './processes.mjs';
@@ -37,7 +38,7 @@ export async function startPostmaster(children, options) {
     await postmaster.stop();
     if (!readFileSync(options.log, 'utf8').includes('Address already in use')) break;
   }
-  throw new Failure(`PostgreSQL did not start: see ${options.log}.`);
+  throw new Failure(`PostgreSQL did not start (${options.log}): ${lastWordsIn(options.log)}`);
 }
 
 /**

@@ -7,10 +7,10 @@ import { projectFolder } from './project.mjs';
 import { say, since } from './say.mjs';
 import { countTests, summaryLine } from './test-count.mjs';
 
-/** @typedef {import('./test-count.mjs').Count} Count */
 // Vitest cannot stop a test that never gives the processor back; a run must end all the same.
 const stepWithin = 30 * 60_000;
 
+/** @typedef {import('./test-count.mjs').Count} Count */
 /** @typedef {import('./test-steps.mjs').Step} Step */
 
 /**
@@ -70,6 +70,7 @@ async function runCommand(children, step, more, env) {
   clearTimeout(timer);
   // A server or a worker that a test forgot must not meet the next step.
   await child.stop();
+  if (children.isStopping()) throw new Stopping();
   return code;
 }
 
