@@ -3,7 +3,7 @@ import type { WireEvent } from './event.ts';
 import { apply } from './run-command.ts';
 import { evolve, untouched } from './fold.ts';
 import { passTime } from './pass-time.ts';
-import { poweredRun } from './powered-run/powered-run.ts';
+import { poweredRun, standsBy } from './powered-run/powered-run.ts';
 import type { Setup } from './setup.ts';
 import { engineVersion } from './setup.ts';
 
@@ -13,10 +13,12 @@ const lastRunSeconds = 30;
 /** The first event of an attempt, and the bench it makes: the oven's last run decides what is still charged. */
 export function begin(setup: Setup): { event: WireEvent; state: BenchState } {
   const { charge, opened } = whatIsLeft(setup);
+  const { oven } = untouched(setup);
+  const isDisplayLit = standsBy(setup.oven, { ...oven, opened });
   const event: WireEvent = {
     type: 'AttemptBegan',
     version: 1,
-    data: { engine: engineVersion, seed: setup.seed, charge, opened },
+    data: { engine: engineVersion, seed: setup.seed, charge, opened, isDisplayLit },
     benchMs: 0,
   };
   return { event, state: evolve(setup, untouched(setup), event) };

@@ -10,6 +10,7 @@ export interface BenchState {
   benchMs: number;
   isCordIn: boolean;
   isCoverOn: boolean;
+  /** what is seen of the oven while it stands plugged in */ isDisplayLit: boolean;
   oven: OvenState;
   labels: Readonly<Record<LeadEndRef, string>>;
   probes: Readonly<Record<ProbeColour, TargetRef | null>>;

@@ -10,6 +10,7 @@ export const untouched = (setup: Setup): BenchState => ({
   benchMs: 0,
   isCordIn: true,
   isCoverOn: true,
+  isDisplayLit: false,
   oven: asFitted(setup.oven.definition, setup.faults),
   labels: {},
   probes: { red: null, black: null },

@@ -24,9 +24,11 @@ export const attemptBegan = outcome({
     /** V left on capacitors by the last run, by element name */
     charge: z.record(z.string(), z.number()),
     /** fuses blown and cut-outs open */ opened: z.array(z.string()),
+    isDisplayLit: z.boolean(),
   }),
-  evolve: (state, { charge, opened }) => ({
+  evolve: (state, { charge, opened, isDisplayLit }) => ({
     ...state,
+    isDisplayLit,
     storage: { voltages: charge, currents: {} },
     oven: { ...state.oven, opened },
   }),

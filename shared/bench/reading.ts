@@ -1,5 +1,7 @@
+import { settingOf } from '../instruments/meters.ts';
 import { read } from '../instruments/read.ts';
 import type { Reading, Trace } from '../instruments/meter.ts';
+import { admittance } from './admittance.ts';
 import { solveLive } from './live-volts.ts';
 import type { BenchState } from './bench-state.ts';
 import type { Passed } from './pass-time.ts';
@@ -64,7 +66,16 @@ const readTrace = (setup: Setup, before: BenchState, atMs: number, trace: Trace)
     lagState: before.meter.lag,
     relative: before.meter.relative,
     readingNumber: Math.max(0, Math.floor(atMs / readingPeriod)),
+    ...admittanceOf(setup, before),
   }).reading;
+
+/** What a capacitance setting needs beside the trace. */
+function admittanceOf(setup: Setup, state: BenchState): { admittance?: readonly [number, number] } {
+  const setting = settingOf(setup.meter, state.meter.setting);
+  const { red, black } = state.probes;
+  if (setting?.function !== 'capacitance' || !red || !black) return {};
+  return { admittance: admittance(setup, state, [red, black], setting.stimulus.hertz) };
+}
 
 /** Tips in the air: nothing flows, and a volts input sits at zero. */
 const openTrace: Trace = { time: [], volts: [] };

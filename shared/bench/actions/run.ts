@@ -21,6 +21,7 @@ export const runOven = action({
   evolve: (state, outcome) => ({
     ...state,
     runs: [...state.runs, outcome],
+    isDisplayLit: outcome.isDisplayLit && outcome.opened.length === 0,
     storage: { voltages: { ...outcome.charge }, currents: {} },
     oven: {
       ...state.oven,

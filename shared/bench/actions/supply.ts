@@ -1,8 +1,10 @@
 import { z } from 'zod';
 import { accept, action, refuse } from '../action.ts';
 import { chargeAtUnplugging } from '../charge-at-unplugging.ts';
+import { standsBy } from '../powered-run/powered-run.ts';
 
 const nothing = z.strictObject({});
+const seen = z.strictObject({ isDisplayLit: z.boolean() });
 
 export const pullCord = action({
   command: 'PullCord',
@@ -14,6 +16,7 @@ export const pullCord = action({
   evolve: (state, _data, setup) => ({
     ...state,
     isCordIn: false,
+    isDisplayLit: false,
     storage: chargeAtUnplugging(setup, state),
   }),
   describe: () => 'cord out',
@@ -23,8 +26,8 @@ export const plugCord = action({
   command: 'PlugCord',
   event: 'CordPlugged',
   input: nothing,
-  data: nothing,
-  decide: ({ state }) => {
+  data: seen,
+  decide: ({ setup, state }) => {
     if (state.isCordIn) return refuse('cord-is-in', 'The cord is in already.');
     const onPlug = [
       state.probes.red,
@@ -48,10 +51,10 @@ export const plugCord = action({
             energy: 0,
           },
         ];
-    return accept({}, hazards);
+    return accept({ isDisplayLit: standsBy(setup.oven, state.oven) }, hazards);
   },
-  evolve: (state) => ({ ...state, isCordIn: true }),
-  describe: () => 'cord in',
+  evolve: (state, { isDisplayLit }) => ({ ...state, isCordIn: true, isDisplayLit }),
+  describe: ({ isDisplayLit }) => `cord in, display ${isDisplayLit ? 'lit' : 'dark'}`,
 });
 
 export const removeCover = action({

@@ -76,7 +76,7 @@ interface Started {
  * carries most of what it carries in a healthy oven.
  */
 function start(oven: DrawnOven, state: OvenState): Started {
-  const standby = runElectrically(oven, { ...state, energised: [], hot: [] }, standbySeconds);
+  const standby = inStandby(oven, state);
   const isAlive = boardIsAlive(oven, state, standby);
   if (!isAlive || !state.isDoorClosed) return { ran: standby, isAlive };
   const running = inFullRun(oven, state);
@@ -88,6 +88,13 @@ function start(oven: DrawnOven, state: OvenState): Started {
   });
   return { ran: runElectrically(oven, { ...running, hot }, settledSeconds, boards), isAlive };
 }
+
+/** Whether the display glows with the oven plugged in and nothing pressed. */
+export const standsBy = (oven: DrawnOven, state: OvenState): boolean =>
+  boardIsAlive(oven, state, inStandby(oven, state));
+
+const inStandby = (oven: DrawnOven, state: OvenState): Electrical =>
+  runElectrically(oven, { ...state, energised: [], hot: [] }, standbySeconds);
 
 /** Judged in standby, and of no weight beside what the relays switch. */
 const boards: readonly PartKindName[] = ['control-board', 'board-transformer'];

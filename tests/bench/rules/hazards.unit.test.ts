@@ -106,3 +106,16 @@ describe('a good meter on its known source', () => {
     expect(Math.abs(Number(reading.display) - 12.6)).toBeLessThan(0.1);
   });
 });
+
+describe('the capacitance setting', () => {
+  it('reads the capacitor with its lead off: 0.95 uF within its tolerance and the 3 % + 10 of the meter', () => {
+    const hands = opened(handsOn(setupWith()));
+    hands.does('LiftLead', { end: 'W23/b' });
+    hands.does('LiftLead', { end: 'W24/a' });
+    hands.does('LiftLead', { end: 'W27/a' });
+    const truth = hands.setup.oven.values['C1']?.['capacitance'] ?? 0;
+    const reading = reads(hands, 'capacitance-2u', 'C1.1', 'C1.2');
+    expect(reading.unit).toBe('µF');
+    expect(Math.abs(Number(reading.display) * 1e-6 - truth)).toBeLessThan(0.03 * truth + 10e-9);
+  });
+});
