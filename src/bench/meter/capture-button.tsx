@@ -13,7 +13,9 @@ export const CaptureButton = () => {
     >
       <PencilLine aria-hidden size={14} />
       Write on job sheet
-      <kbd className="rounded border border-bench-line px-1 font-mono text-xs">C</kbd>
+      <kbd className="hidden rounded border border-bench-line px-1 font-mono text-xs min-[860px]:inline">
+        C
+      </kbd>
     </button>
   );
 };

@@ -4,6 +4,7 @@ import { describeTarget } from '../../../shared/oven/targets.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
 import type { BenchScene } from '../geometry/bench-scene.ts';
 import { seatedEnds } from '../panels/seated-ends.ts';
+import { targetWords } from '../panels/target-words.ts';
 
 /** One thing on the bench that a tap can meet, as a button. */
 export interface MirrorEntry {
@@ -32,7 +33,8 @@ export function mirrorGroups(
       .filter(({ target }) => target === ref)
       .map(({ target, at }) => targetEntry(definition, state, target, at));
   const isOpen = !scene.isCoverOn;
-  const parts = scene.parts
+  const drawn = definition.parts.flatMap(({ ref }) => scene.parts.filter((one) => one.ref === ref));
+  const parts = drawn
     .filter(({ kind }) => kind !== 'chassis' || isOpen)
     .map((part): MirrorGroup => {
       const own = targets.filter(({ target }) => target.startsWith(`${part.ref}.`));
@@ -84,7 +86,7 @@ function targetEntry(
     kind: 'target',
     ref: target,
     name: [words.startsWith(target) ? words : `${target}, ${words}`, ...marks].join(', '),
-    short: [words.split(', ').at(-1) ?? words, ...marks].join(', '),
+    short: [targetWords(definition, state, target).short, ...marks].join(', '),
     at,
   };
 }
@@ -104,7 +106,6 @@ export function marksOn(
     ...on(discharge.tip === target, 'discharge tip on it'),
     ...on(battery.neg === target, 'battery negative on it'),
     ...on(battery.oneK === target, 'battery 1 kΩ on it'),
-    ...on(oven.cleaned.includes(target), 'cleaned spot'),
     ...on(label !== undefined, `labelled ${label}`),
     ...on(ends.length > 0, `${ends.map((end) => end.split('/')[0]).join(' and ')} on it`),
   ];

@@ -127,16 +127,16 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
           onPinch={camera.pinch}
         />
       ) : null}
-      <div className="pointer-events-none absolute inset-x-3 top-2.5 z-[2] grid justify-items-start gap-2">
-        <div className="pointer-events-auto flex w-full items-start justify-between gap-2">
-          <div className="min-w-0">
-            <StateChips />
-          </div>
+      <div className="pointer-events-none absolute inset-x-3 top-2.5 z-[2] flex items-start justify-between gap-2">
+        <div className="pointer-events-auto min-w-0">
+          <StateChips />
+        </div>
+        <div className="pointer-events-auto">
           <ZoomButtons camera={camera} />
         </div>
-        <div className="grid w-full justify-items-center">
-          <HazardNotice />
-        </div>
+      </div>
+      <div className="pointer-events-none absolute inset-x-2 top-12 z-[6] grid max-h-[calc(100%-56px)] justify-items-center">
+        <HazardNotice />
       </div>
       <div className="pointer-events-none absolute bottom-2 left-2 z-[2] grid max-w-[min(440px,calc(100%-16px))] justify-items-start gap-1.5">
         <RefusalNotice />

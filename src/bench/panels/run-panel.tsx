@@ -22,7 +22,7 @@ export const RunPanel = ({ onClose }: { onClose: () => void }) => {
       ref={panel}
       tabIndex={-1}
       aria-label="Run the oven"
-      className="absolute bottom-2 left-2 z-[3] grid w-[320px] max-w-[calc(100%-16px)] gap-2.5 rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
+      className="absolute bottom-2 left-2 z-[5] grid w-[320px] max-w-[calc(100%-16px)] gap-2.5 rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
     >
       <div className="flex items-start justify-between gap-2">
         <p className="text-sm">

@@ -71,7 +71,7 @@ export const SelectionPanel = ({ style, onClose }: Props) => {
       tabIndex={-1}
       aria-label={`${choices.ref}, ${choices.name}`}
       style={style}
-      className="absolute z-[3] grid content-start gap-2.5 overflow-y-auto rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
+      className="absolute z-[5] grid content-start gap-2.5 overflow-y-auto rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
     >
       <div className="flex items-start justify-between gap-2">
         <p className="grid">

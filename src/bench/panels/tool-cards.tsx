@@ -82,7 +82,7 @@ export const ToolCards = () => {
     <div
       role="toolbar"
       aria-label="Tools"
-      className="grid min-w-0 grow grid-cols-[repeat(auto-fit,minmax(98px,1fr))] content-between gap-1.5"
+      className="grid min-w-0 grow grid-cols-3 content-between gap-1.5"
     >
       <Card title="Probes">
         <ProbeTools />
@@ -90,7 +90,7 @@ export const ToolCards = () => {
       <Card title="Discharge lead">
         <DischargeTools />
       </Card>
-      <Card title="Battery" more="12.6 V">
+      <Card title="Battery 12.6 V">
         <BatteryTools />
       </Card>
       <Card title="Lead labels" more={`${labels}`}>

@@ -14,8 +14,8 @@ import type { PinchMove } from '../camera/pinch-gesture.ts';
 import { benchSize } from '../geometry/bench-furniture.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
 
-/** Below this terminals are too close together for a finger: a small screen begins with a part of the bench. */
-const leastOpenZoom = 0.6;
+/** Below the first terminals are too close together for a finger; above the second too little of the bench is seen. */
+const openZoom = { least: 0.6, most: 0.8 } as const;
 
 export interface BenchCamera {
   camera: Camera;
@@ -49,12 +49,13 @@ export function useBenchCamera(view: View, isOpen: boolean): BenchCamera {
   };
 }
 
-/** The whole bench; with the cover off never smaller than a finger can use. */
+/** The whole bench; with the cover off never smaller than a finger can use: then as high as the view. */
 export function homeCamera(view: View, isOpen: boolean): Camera {
   const whole = fitCamera(view, benchSize);
-  if (!isOpen || whole.zoom >= leastOpenZoom || view.width === 0) return whole;
+  if (!isOpen || whole.zoom >= openZoom.least || view.width === 0) return whole;
+  const high = Math.min(openZoom.most, Math.max(openZoom.least, view.height / benchSize[1]));
   const middle: BenchPoint = [view.width / 2, view.height / 2];
-  return keepInView(zoomAbout(whole, middle, leastOpenZoom / whole.zoom), view, benchSize);
+  return keepInView(zoomAbout(whole, middle, high / whole.zoom), view, benchSize);
 }
 
 const margin = 40;
