@@ -53,7 +53,7 @@ export function sceneHand(
     stamps: Object.fromEntries(definition.parts.map((part) => [part.ref, stampOf(part)])),
     lit: [
       ...ofKind('lamp', run?.isLampLit ?? false),
-      ...ofKind('control-board', run?.isDisplayLit ?? false),
+      ...ofKind('control-board', run?.isDisplayLit ?? state.isDisplayLit),
     ],
     turning: [
       ...ofKind('motor', run?.isFanTurning ?? false, 'fan'),
