@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
+import type { Role } from '../../shared/contracts/fields.ts';
 import { AttemptEntity } from '../attempts/attempt.entity.ts';
 import { isTaken } from '../database/database-problem.ts';
 import type { Membership } from '../http/caller.ts';
@@ -40,16 +41,16 @@ export class TypeormAccountStore implements AccountStore {
     return row && { id: row.id, name: row.name, email: row.email, passwordHash: row.passwordHash };
   };
 
+  /** Asked with every request, hence plain SQL. */
   membershipsOf = async (personId: string): Promise<Membership[]> => {
-    const rows = await this.#database.manager.find(MembershipEntity, {
-      where: { personId },
-      relations: { organisation: true },
-      order: { joinedAt: 'ASC', organisationId: 'ASC' },
-    });
-    return rows.map(({ organisation: { id, name }, role }) => ({
-      organisation: { id, name },
-      role,
-    }));
+    const rows = await this.#database.query<{ id: string; name: string; role: Role }[]>(
+      `SELECT organisation.id, organisation.name, membership.role
+         FROM membership JOIN organisation ON organisation.id = membership.organisation_id
+        WHERE membership.person_id = $1
+        ORDER BY membership.joined_at, organisation.id`,
+      [personId],
+    );
+    return rows.map(({ id, name, role }) => ({ organisation: { id, name }, role }));
   };
 
   create = async (account: NewAccount): Promise<Created> => {

@@ -145,7 +145,11 @@ export class AppendService {
       benchMs: verified.state.benchMs,
       handedIn: isHandedIn ? { at, debrief: await this.#assess(locked, bench, recorded) } : null,
       checkpoint: isCheckpointDue(attempt, next)
-        ? { sequence: next - 1, state: verified.state }
+        ? {
+            sequence: next - 1,
+            engineVersion: this.#rules.engineVersion,
+            state: verified.state,
+          }
         : null,
     });
     return done({ next, bench: { setup: bench.setup, state: verified.state } });

@@ -2,7 +2,8 @@ import type { EntityManager, SelectQueryBuilder } from 'typeorm';
 import type { Debrief } from '../../shared/assessment/debrief.ts';
 import type { ScenarioContent } from '../../shared/scenario/scenario.ts';
 import { AttemptEntity } from './attempt.entity.ts';
-import type { AttemptLine, AttemptRecord, AttemptStatus, Owner } from './attempt.ts';
+import type { AttemptLine, AttemptRecord, AttemptStatus } from './attempt.ts';
+import { ownerOf } from './locked-attempt-store.ts';
 
 interface LineRow {
   id: string;
@@ -81,13 +82,6 @@ function select(
   for (const [name, sql] of Object.entries(columns)) query.addSelect(sql, name);
   narrow(query);
   return query;
-}
-
-function ownerOf(row: LineRow): Owner {
-  if (row.person !== null && row.organisation !== null) {
-    return { person: row.person, organisation: row.organisation, visitor: null };
-  }
-  return { person: null, organisation: null, visitor: row.visitor ?? '' };
 }
 
 function lineOf(row: LineRow): AttemptLine {

@@ -62,6 +62,7 @@ export interface NewAttempt extends PinnedAttempt {
 
 export interface Checkpoint {
   /** of the last event folded into the state */ sequence: number;
+  /** of the rules that folded it */ engineVersion: number;
   state: BenchState;
 }
 
@@ -79,7 +80,10 @@ export interface LockedAttempt {
   attempt: AttemptState;
   /** events from this sequence number on, in order */
   eventsFrom: (sequence: number) => Promise<RecordedEvent[]>;
-  newestCheckpoint: () => Promise<Checkpoint | null>;
+  /** the newest that this version of the rules folded */
+  newestCheckpoint: (
+    engineVersion: number,
+  ) => Promise<{ sequence: number; state: BenchState } | null>;
   advance: (advance: Advance) => Promise<void>;
   takeOver: (writer: string, epoch: number) => Promise<void>;
 }

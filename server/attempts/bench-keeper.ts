@@ -44,7 +44,7 @@ export class BenchKeeper {
     if (kept?.next === attempt.next) return kept;
     const setup = this.setUp(attempt);
     if (!setup) return null;
-    const checkpoint = await locked.newestCheckpoint();
+    const checkpoint = await locked.newestCheckpoint(this.#rules.engineVersion);
     const events = await locked.eventsFrom(checkpoint ? checkpoint.sequence + 1 : 0);
     return { setup, state: this.#rules.fold(setup, events, checkpoint?.state ?? null) };
   }
@@ -57,9 +57,5 @@ export class BenchKeeper {
       if (this.#kept.size <= mostKept) break;
       this.#kept.delete(oldest);
     }
-  }
-
-  forget(id: string): void {
-    this.#kept.delete(id);
   }
 }

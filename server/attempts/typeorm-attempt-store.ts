@@ -1,137 +1,17 @@
-import { Brackets, type DataSource, type EntityManager } from 'typeorm';
+import { Brackets, type DataSource } from 'typeorm';
 import type { RecordedEvent } from '../../shared/bench/event.ts';
-import { AttemptCheckpointEntity } from './attempt-checkpoint.entity.ts';
-import { AttemptEventEntity } from './attempt-event.entity.ts';
+import { eventsFrom, insertEventsOf, saveCheckpoint } from './attempt-events-store.ts';
 import { attemptLines, attemptRecords } from './attempt-rows-store.ts';
 import { AttemptEntity } from './attempt.entity.ts';
 import type {
-  Advance,
   AttemptLine,
   AttemptRecord,
-  AttemptState,
   AttemptStore,
-  Checkpoint,
   LockedAttempt,
   NewAttempt,
   Owner,
 } from './attempt.ts';
-
-const ownerOf = (row: AttemptEntity): Owner =>
-  row.personId !== null && row.organisationId !== null
-    ? { person: row.personId, organisation: row.organisationId, visitor: null }
-    : { person: null, organisation: null, visitor: row.visitorTokenHash ?? '' };
-
-const stateOf = (row: AttemptEntity): AttemptState => ({
-  id: row.id,
-  seed: row.seed,
-  content: row.content,
-  engineVersion: row.engineVersion,
-  owner: ownerOf(row),
-  epoch: row.epoch,
-  writer: row.writer,
-  next: row.nextSequence,
-  benchMs: row.benchMs,
-  status: row.status,
-});
-
-/** Version 1 is the only one so far; an older one would be brought up to date here, step by step. */
-const eventOf = (row: AttemptEventEntity): RecordedEvent => ({
-  sequence: row.sequence,
-  type: row.type,
-  version: 1,
-  data: row.data as Record<string, unknown>,
-  benchMs: row.benchMs,
-  recordedAt: row.recordedAt.toISOString(),
-});
-
-const rowOf = (attemptId: string, event: RecordedEvent) => ({
-  attemptId,
-  sequence: event.sequence,
-  type: event.type,
-  version: event.version,
-  data: event.data,
-  benchMs: event.benchMs,
-  recordedAt: new Date(event.recordedAt),
-});
-
-async function eventsFrom(
-  manager: EntityManager,
-  attemptId: string,
-  sequence: number,
-): Promise<RecordedEvent[]> {
-  const rows = await manager
-    .createQueryBuilder(AttemptEventEntity, 'event')
-    .where('event.attemptId = :attemptId AND event.sequence >= :sequence', { attemptId, sequence })
-    .orderBy('event.sequence')
-    .getMany();
-  return rows.map(eventOf);
-}
-
-async function saveCheckpoint(
-  manager: EntityManager,
-  attempt: { id: string; engineVersion: number },
-  { sequence, state }: Checkpoint,
-): Promise<void> {
-  await manager
-    .createQueryBuilder()
-    .insert()
-    .into(AttemptCheckpointEntity)
-    .values({
-      attemptId: attempt.id,
-      engineVersion: attempt.engineVersion,
-      sequence,
-      state,
-    })
-    .orIgnore()
-    .updateEntity(false)
-    .execute();
-}
-
-/** One attempt whose row is locked until the transaction of `manager` ends. */
-class LockedRow implements LockedAttempt {
-  readonly #manager: EntityManager;
-  readonly attempt: AttemptState;
-
-  constructor(manager: EntityManager, row: AttemptEntity) {
-    this.#manager = manager;
-    this.attempt = stateOf(row);
-  }
-
-  eventsFrom = (sequence: number): Promise<RecordedEvent[]> =>
-    eventsFrom(this.#manager, this.attempt.id, sequence);
-
-  newestCheckpoint = async (): Promise<Checkpoint | null> => {
-    const { id: attemptId, engineVersion } = this.attempt;
-    const row = await this.#manager.findOne(AttemptCheckpointEntity, {
-      where: { attemptId, engineVersion },
-      order: { sequence: 'DESC' },
-    });
-    return row && { sequence: row.sequence, state: row.state };
-  };
-
-  advance = async (advance: Advance): Promise<void> => {
-    const { id, next } = this.attempt;
-    await this.#manager.insert(
-      AttemptEventEntity,
-      advance.events.map((event) => rowOf(id, event)),
-    );
-    await this.#manager.update(AttemptEntity, id, {
-      nextSequence: next + advance.events.length,
-      benchMs: advance.benchMs,
-      writer: advance.writer,
-      ...(advance.handedIn && {
-        status: 'handed in' as const,
-        handedInAt: advance.handedIn.at,
-        debrief: advance.handedIn.debrief,
-      }),
-    });
-    if (advance.checkpoint) await saveCheckpoint(this.#manager, this.attempt, advance.checkpoint);
-  };
-
-  takeOver = async (writer: string, epoch: number): Promise<void> => {
-    await this.#manager.update(AttemptEntity, this.attempt.id, { writer, epoch });
-  };
-}
+import { lockAttempt } from './locked-attempt-store.ts';
 
 /** Attempts in PostgreSQL. */
 export class TypeormAttemptStore implements AttemptStore {
@@ -162,9 +42,10 @@ export class TypeormAttemptStore implements AttemptStore {
         handedInAt: null,
         debrief: null,
       });
-      await manager.insert(AttemptEventEntity, rowOf(attempt.id, attempt.first));
-      const { sequence } = attempt.first;
-      await saveCheckpoint(manager, attempt, { sequence, state: attempt.state });
+      const { first, engineVersion, state } = attempt;
+      await insertEventsOf(manager, attempt.id, [first]);
+      const checkpoint = { sequence: first.sequence, engineVersion, state };
+      await saveCheckpoint(manager, attempt.id, checkpoint);
     });
     const record = await this.find(attempt.id);
     if (!record) throw new Error(`attempt ${attempt.id} is gone right after it was stored`);
@@ -219,10 +100,7 @@ export class TypeormAttemptStore implements AttemptStore {
 
   withLocked = <T>(id: string, work: (locked: LockedAttempt) => Promise<T>): Promise<T | null> =>
     this.#database.transaction(async (manager) => {
-      const row = await manager.findOne(AttemptEntity, {
-        where: { id },
-        lock: { mode: 'pessimistic_write' },
-      });
-      return row ? work(new LockedRow(manager, row)) : null;
+      const locked = await lockAttempt(manager, id);
+      return locked && work(locked);
     });
 }

@@ -169,11 +169,13 @@ export function attemptStoreBehaviour(open: () => Promise<Surroundings>): void {
 
   test('the newest checkpoint is given, the first one is there from the beginning', async () => {
     const { id } = await begin();
-    const newest = () => around.store.withLocked(id, ({ newestCheckpoint }) => newestCheckpoint());
+    const newest = (engine = 1) =>
+      around.store.withLocked(id, ({ newestCheckpoint }) => newestCheckpoint(engine));
     expect(await newest()).toEqual({ sequence: 0, state });
     const later = { ...state, benchMs: 5000, isCordIn: false };
-    await advance(id, 1, 2, { checkpoint: { sequence: 2, state: later } });
+    await advance(id, 1, 2, { checkpoint: { sequence: 2, engineVersion: 1, state: later } });
     expect(await newest()).toEqual({ sequence: 2, state: later });
+    expect(await newest(2)).toBeNull();
   });
 
   test('handing in closes it and keeps the debrief', async () => {
@@ -197,7 +199,7 @@ export function attemptStoreBehaviour(open: () => Promise<Surroundings>): void {
         writer: around.iris.id,
         benchMs: 1,
         handedIn: null,
-        checkpoint: { sequence: 1, state },
+        checkpoint: { sequence: 1, engineVersion: 1, state },
       });
       throw new Error('judged wrongly');
     });

@@ -42,6 +42,7 @@ export class MemoryAttempts implements AttemptStore {
 
   create: AttemptStore['create'] = async (attempt) => {
     const { first, state, scenarioVersion, owner, ...pinned } = copy(attempt);
+    const { engineVersion } = pinned;
     const record: AttemptRecord = {
       ...pinned,
       owner,
@@ -60,7 +61,7 @@ export class MemoryAttempts implements AttemptStore {
       writer: null,
       debrief: null,
     };
-    const checkpoints = [{ sequence: first.sequence, state }];
+    const checkpoints = [{ sequence: first.sequence, engineVersion, state }];
     this.#kept.set(record.id, { record, events: [first], checkpoints });
     return copy(record);
   };
@@ -113,7 +114,10 @@ export class MemoryAttempts implements AttemptStore {
       attempt: copy(record),
       eventsFrom: async (sequence) =>
         copy(draft.events.filter((event) => event.sequence >= sequence)),
-      newestCheckpoint: async () => copy(draft.checkpoints.at(-1) ?? null),
+      newestCheckpoint: async (version) => {
+        const found = draft.checkpoints.findLast((one) => one.engineVersion === version);
+        return found ? copy({ sequence: found.sequence, state: found.state }) : null;
+      },
       advance: async ({ events, writer, benchMs, handedIn, checkpoint }) => {
         draft.events.push(...copy([...events]));
         Object.assign(record, { writer, benchMs, next: record.next + events.length });

@@ -155,6 +155,14 @@ describe('judging events', () => {
     expect(sent).toMatchObject({ ok: true });
   });
 
+  test('what another process stored in between is not forgotten here', async () => {
+    const other = desk.another();
+    await desk.send(1, begin());
+    await desk.send(3, desk.hands.does('CloseDoor', {}), { service: other });
+    const again = desk.hands.does('OpenDoor', {});
+    expect(await desk.send(4, again)).toEqual({ ok: true, value: { next: 5 } });
+  });
+
   test('after a hundred events there is a checkpoint, and it is what all events fold to', async () => {
     const events = begin();
     while (events.length < 110) {
@@ -163,7 +171,7 @@ describe('judging events', () => {
     await desk.send(1, events.slice(0, 60));
     await desk.send(61, events.slice(60));
     const checkpoint = await desk.store.withLocked(desk.attempt.id, ({ newestCheckpoint }) =>
-      newestCheckpoint(),
+      newestCheckpoint(attemptRules.engineVersion),
     );
     expect(checkpoint?.sequence).toBe(110);
     const setup = attemptRules.setUp(desk.hands.setup.oven.definition, desk.attempt.content, 417);
