@@ -23,6 +23,7 @@ const state: BenchState = {
   benchMs: 0,
   isCordIn: true,
   isCoverOn: true,
+  isDisplayLit: false,
   oven: {
     faults: [],
     leadEnds: { 'W1/a': 'C1.1', 'W1/b': null },
