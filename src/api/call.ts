@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { AnyEndpoint } from '../../shared/contracts/endpoint.ts';
-import { problemFrom, unreachable, unreadable } from './problem.ts';
+import { problemFrom } from './problem-from.ts';
+import { unreachable, unreadable } from './problem.ts';
 
 type Part<K extends string, S extends z.ZodType> =
   Record<string, never> extends z.input<S>

@@ -1,4 +1,4 @@
-import { problemDetails, type ProblemCode } from '../../shared/contracts/problem.ts';
+import type { ProblemCode } from '../../shared/contracts/problem.ts';
 
 /** The server's codes, and the two that only a client can find. */
 export type ClientProblemCode = ProblemCode | 'unreachable' | 'unreadable';
@@ -50,11 +50,3 @@ export const unreadable = (status: number): Problem =>
         ? 'The server is not answering as it should. Wait a minute, then try again.'
         : 'The answer of the server could not be read. Reload the page: it may be older than the server.',
   });
-
-/** From the JSON of an answer that is no success; anything but problem details is unreadable. */
-export const problemFrom = (status: number, json: unknown): Problem => {
-  const parsed = problemDetails.safeParse(json);
-  if (!parsed.success) return unreadable(status);
-  const { code, detail, errors, expected, epoch } = parsed.data;
-  return new Problem({ code, message: detail, status, errors, expected, epoch });
-};

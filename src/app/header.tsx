@@ -1,8 +1,9 @@
-import { Link, NavLink } from 'react-router-dom';
+import { lazy, Suspense } from 'react';
+import { Link, NavLink, useLocation } from 'react-router-dom';
 import { Brand } from '../components/brand.tsx';
 import { ButtonLink } from '../components/button-link.tsx';
 import { useSignedIn } from '../features/account/api/use-signed-in.ts';
-import { AccountMenu } from './account-menu.tsx';
+import { signedInBefore } from '../features/account/signed-in-before.ts';
 import { homeOf, placesOf } from './navigation.ts';
 
 const placeClasses =
@@ -22,8 +23,15 @@ const Visitor = () => (
   </>
 );
 
+const AccountMenu = lazy(async () => {
+  const { AccountMenu: loaded } = await import('./account-menu.tsx');
+  return { default: loaded };
+});
+
 export const Header = () => {
-  const { data: signedIn, isSuccess } = useSignedIn();
+  const isStart = useLocation().pathname === '/';
+  const isAsked = !isStart || signedInBefore();
+  const { data: signedIn, isSuccess } = useSignedIn(isAsked);
   return (
     <header className="flex h-[52px] items-center gap-4 border-b border-line bg-sheet px-4">
       <Link
@@ -43,7 +51,13 @@ export const Header = () => {
         </nav>
       ) : null}
       <div className="ml-auto flex items-center gap-2">
-        {signedIn ? <AccountMenu signedIn={signedIn} /> : isSuccess ? <Visitor /> : null}
+        {signedIn ? (
+          <Suspense>
+            <AccountMenu signedIn={signedIn} />
+          </Suspense>
+        ) : isSuccess || !isAsked ? (
+          <Visitor />
+        ) : null}
       </div>
     </header>
   );

@@ -1,3 +1,4 @@
+import { lazy, Suspense } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import type { Attempt } from '../../../../shared/contracts/attempts.ts';
 import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
@@ -8,10 +9,17 @@ import { debriefQuery } from '../api/debrief-query.ts';
 import { useEvents } from '../api/use-events.ts';
 import { useMoment } from '../hooks/use-moment.ts';
 import { Outcome } from './outcome.tsx';
-import { ReadingsTable } from './readings-table.tsx';
 import { Skills } from './skills.tsx';
-import { Timeline } from './timeline.tsx';
-import { TrueFaults } from './true-faults.tsx';
+
+// Describing events and faults takes the whole bench with it: the outcome and the skills stand before.
+const BenchRecord = lazy(async () => {
+  const { BenchRecord: loaded } = await import('./bench-record.tsx');
+  return { default: loaded };
+});
+const TrueFaults = lazy(async () => {
+  const { TrueFaults: loaded } = await import('./true-faults.tsx');
+  return { default: loaded };
+});
 
 const noServiceData: readonly ServiceMeasurement[] = [];
 
@@ -31,21 +39,16 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
     <>
       <Outcome debrief={debrief.data} />
       <Skills skills={debrief.data.skills} moment={moment} goTo={goTo} />
-      <TrueFaults faults={debrief.data.faults} definition={oven.data?.definition} />
-      {events.isPending ? (
-        <Loading what="the timeline" />
-      ) : events.isError ? (
-        <Failed what="The timeline" problem={events.error} retry={() => void events.refetch()} />
-      ) : (
-        <>
-          <Timeline events={events.data} marks={marks} moment={moment} goTo={goTo} />
-          <ReadingsTable
-            events={events.data}
-            serviceData={oven.data?.definition.serviceData ?? noServiceData}
-            goTo={goTo}
-          />
-        </>
-      )}
+      <Suspense fallback={<Loading what="the timeline" />}>
+        <TrueFaults faults={debrief.data.faults} definition={oven.data?.definition} />
+        <BenchRecord
+          events={events}
+          marks={marks}
+          serviceData={oven.data?.definition.serviceData ?? noServiceData}
+          moment={moment}
+          goTo={goTo}
+        />
+      </Suspense>
     </>
   );
 };

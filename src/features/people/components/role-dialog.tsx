@@ -1,6 +1,6 @@
 import type { Role } from '../../../../shared/contracts/fields.ts';
 import type { Person } from '../../../../shared/contracts/people.ts';
-import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Ask } from '../../../components/ask.tsx';
 import { FormProblem } from '../../account/components/form-problem.tsx';
 import type { useChangeRole } from '../api/use-change-role.ts';
 
@@ -21,8 +21,7 @@ interface Props {
 }
 
 export const RoleDialog = ({ person, role, isOwn, change, onClose }: Props) => (
-  <ConfirmDialog
-    isOpen
+  <Ask
     title={`Make ${person.name} ${article(role)}?`}
     confirm={`Make ${article(role)}`}
     cancel={`Leave as ${person.role}`}
@@ -35,5 +34,5 @@ export const RoleDialog = ({ person, role, isOwn, change, onClose }: Props) => (
     </p>
     {isOwn ? <p className="font-semibold">This is you: you may lose this page at once.</p> : null}
     <FormProblem problem={change.error} />
-  </ConfirmDialog>
+  </Ask>
 );

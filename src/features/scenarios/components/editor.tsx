@@ -3,7 +3,7 @@ import { FormProvider } from 'react-hook-form';
 import type { Scenario } from '../../../../shared/contracts/scenarios.ts';
 import type { ScenarioContent } from '../../../../shared/scenario/scenario.ts';
 import { Button } from '../../../components/button.tsx';
-import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Ask } from '../../../components/ask.tsx';
 import { useEditor } from '../hooks/use-editor.ts';
 import { BenchFields } from './bench-fields.tsx';
 import { FaultsField } from './faults-field.tsx';
@@ -56,22 +56,23 @@ export const Editor = ({ scenario, start, ovens, onCreated }: Props) => {
           </div>
         </div>
       </form>
-      <ConfirmDialog
-        isOpen={isAsking}
-        title={`Publish version ${version}?`}
-        confirm={`Publish version ${version}`}
-        cancel="Not yet"
-        onConfirm={() => {
-          setIsAsking(false);
-          void editor.publishIt();
-        }}
-        onCancel={() => setIsAsking(false)}
-      >
-        <p>
-          The draft is saved first. A published version never changes: new attempts get it, attempts
-          already begun keep theirs.
-        </p>
-      </ConfirmDialog>
+      {isAsking ? (
+        <Ask
+          title={`Publish version ${version}?`}
+          confirm={`Publish version ${version}`}
+          cancel="Not yet"
+          onConfirm={() => {
+            setIsAsking(false);
+            void editor.publishIt();
+          }}
+          onCancel={() => setIsAsking(false)}
+        >
+          <p>
+            The draft is saved first. A published version never changes: new attempts get it,
+            attempts already begun keep theirs.
+          </p>
+        </Ask>
+      ) : null}
       <LeaveGuard blocker={editor.blocker} />
     </FormProvider>
   );

@@ -1,10 +1,9 @@
 import type { Blocker } from 'react-router-dom';
-import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Ask } from '../../../components/ask.tsx';
 
 export const LeaveGuard = ({ blocker }: { blocker: Blocker }) =>
   blocker.state === 'blocked' ? (
-    <ConfirmDialog
-      isOpen
+    <Ask
       isDangerous
       title="Leave without saving?"
       confirm="Leave and lose the changes"
@@ -13,5 +12,5 @@ export const LeaveGuard = ({ blocker }: { blocker: Blocker }) =>
       onCancel={() => blocker.reset()}
     >
       <p>What you changed since the last save is only on this page.</p>
-    </ConfirmDialog>
+    </Ask>
   ) : null;
