@@ -36,7 +36,11 @@ export async function visit(
   return { context, page, errors };
 }
 
-export async function signIn(page: Page, email: string, password = 'cold-bench-demo'): Promise<void> {
+export async function signIn(
+  page: Page,
+  email: string,
+  password = 'cold-bench-demo',
+): Promise<void> {
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(email);
   await page.getByLabel('Password').fill(password);

@@ -29,18 +29,22 @@ export async function startServer(): Promise<E2eServer> {
   await admin.connect();
   await admin.query(`CREATE DATABASE ${database}`);
   const databaseUrl = Object.assign(new URL(adminUrl), { pathname: `/${database}` }).href;
-  const child = spawn(process.execPath, ['--enable-source-maps', required('COLDBENCH_E2E_SERVER')], {
-    env: {
-      PATH: process.env['PATH'],
-      DATABASE_URL: databaseUrl,
-      PORT: port,
-      HOST: '127.0.0.1',
-      NODE_ENV: 'production',
-      COLDBENCH_SEED: 'demo',
-      LOG_LEVEL: 'warn',
+  const child = spawn(
+    process.execPath,
+    ['--enable-source-maps', required('COLDBENCH_E2E_SERVER')],
+    {
+      env: {
+        PATH: process.env['PATH'],
+        DATABASE_URL: databaseUrl,
+        PORT: port,
+        HOST: '127.0.0.1',
+        NODE_ENV: 'production',
+        COLDBENCH_SEED: 'demo',
+        LOG_LEVEL: 'warn',
+      },
+      stdio: ['ignore', 'pipe', 'pipe'],
     },
-    stdio: ['ignore', 'pipe', 'pipe'],
-  });
+  );
   const said: string[] = [];
   for (const stream of [child.stdout, child.stderr]) {
     stream?.on('data', (chunk: Buffer) => said.push(chunk.toString()));
