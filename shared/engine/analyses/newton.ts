@@ -25,17 +25,21 @@ const MOST_REFINEMENTS = 4;
 /** Of the largest current at a node; a tenth of what is promised. */
 const KIRCHHOFF = 1e-10;
 
-/** Solves from the present x and junction voltages. Nothing is allocated but the outcome. */
+/**
+ * Solves from the present x and junction voltages; `slack` lets junctions keep a line in the matrix
+ * that is nearly right. Nothing is allocated but the outcome.
+ */
 export function newton(
   machine: Machine,
   tolerance: number = EXACT,
   mostIterations: number = MOST_ITERATIONS,
+  slack: number = 0,
 ): NewtonOutcome {
   const { system, factors, junctions } = machine;
   let iterations = 0;
   for (;;) {
     iterations += 1;
-    for (let j = 0; j < junctions.length; j += 1) stampDiode(system, junctions[j]!);
+    for (let j = 0; j < junctions.length; j += 1) stampDiode(system, junctions[j]!, slack);
     if (system.isStale) {
       const singularColumn = factor(factors, system.values);
       if (singularColumn >= 0) return { isSolved: false, iterations, singularColumn };

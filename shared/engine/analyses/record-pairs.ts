@@ -4,6 +4,7 @@ import { setInductorHistory } from '../devices/inductor.ts';
 import { createFactors, factor, solveFactored, type Factors } from '../linear/factors.ts';
 import { createSystem, type System } from '../stamping/system.ts';
 import { INSTANT, type Integrator } from './integrator.ts';
+import type { Machine } from './machine.ts';
 import type { Watch } from './march.ts';
 import { setSourceSlopes } from './set-source-slopes.ts';
 import { stampFixed } from './stamp-at-rest.ts';
@@ -123,7 +124,7 @@ function slopeFinder(integrator: Integrator, ends: Ends): SlopeFinder {
   const system = createSystem(netlist, machine.baseConductance);
   const own = createFactors(factors.pattern, factors.first.symbolic);
   return (time, side) => {
-    stampFixed(system, machine);
+    stampExactly(system, machine);
     stampStage(system, machine, INSTANT);
     if (!refactored(system, own)) return new Float64Array(ends.a.length);
     setSlopes(integrator, system, time, side);
@@ -131,6 +132,13 @@ function slopeFinder(integrator: Integrator, ends: Ends): SlopeFinder {
     system.step[netlist.size] = 0;
     return Float64Array.from(ends.a, (a, p) => system.step[a]! - system.step[ends.b[p]!]!);
   };
+}
+
+/** With each junction at its own slope, leaving the lines that stand in the machine's matrix alone. */
+function stampExactly(system: System, machine: Machine): void {
+  const lines = machine.junctions.map((junction) => junction.line);
+  stampFixed(system, machine);
+  machine.junctions.forEach((junction, j) => (junction.line = lines[j]!));
 }
 
 function refactored(system: System, factors: Factors): boolean {

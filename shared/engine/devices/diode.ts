@@ -1,6 +1,7 @@
 import type { DiodeModel } from '../circuit/circuit.ts';
 import { setConductiveBranch, setResistiveBranch } from '../stamping/branch-equation.ts';
 import { REFERENCE, type System } from '../stamping/system.ts';
+import { DEFAULT_CURRENT, matchBreakdown } from './match-breakdown.ts';
 import { linearise, type Junction, type JunctionLaw } from './diode-law.ts';
 
 /**
@@ -21,37 +22,42 @@ export function createJunction(
     saturation,
     slope,
     seriesResistance: model.seriesResistance,
-    breakdown: model.breakdownVoltage ?? Infinity,
-    // the usual default of IBV in a model card
-    breakdownCurrent: model.breakdownCurrent ?? 1e-3,
+    breakdown:
+      law === 'spice'
+        ? matchBreakdown(model, thermalVoltage)
+        : (model.breakdownVoltage ?? Infinity),
+    breakdownCurrent: law === 'spice' ? saturation : (model.breakdownCurrent ?? DEFAULT_CURRENT),
     critical: slope * Math.log(slope / (Math.SQRT2 * saturation)),
     law,
     voltage: 0,
     current: 0,
     conductance: 0,
+    line: 0,
   };
   linearise(junction, 0);
   return junction;
 }
 
-/** Writes the junction's present linear form into its branch. */
-export function stampDiode(system: System, junction: Junction): void {
-  const { branch, conductance, current, voltage, seriesResistance } = junction;
-  if (conductance * REFERENCE > 1) {
-    setResistiveBranch(
-      system,
-      branch,
-      1 / conductance + seriesResistance,
-      voltage - current / conductance,
-    );
+/** S; what so small a slope does in the wrong place is nothing even behind 1e12 ohm. */
+const NO_SLOPE = 1e-16;
+
+/**
+ * Writes the junction's present linear form into its branch. A line whose slope is within `slack`
+ * (a share) of the junction's is kept, so that the matrix need not be factored again: the iteration
+ * still ends on the law, by the chord instead of the tangent.
+ */
+export function stampDiode(system: System, junction: Junction, slack: number = 0): void {
+  const { branch, conductance, current, voltage, seriesResistance, line } = junction;
+  const off = Math.abs(conductance - line);
+  if (off > slack * Math.max(conductance, line) && (slack === 0 || off > NO_SLOPE)) {
+    junction.line = conductance;
+  }
+  const slope = junction.line;
+  if (slope * REFERENCE > 1) {
+    setResistiveBranch(system, branch, 1 / slope + seriesResistance, voltage - current / slope);
   } else {
-    const share = 1 / (1 + conductance * seriesResistance);
-    setConductiveBranch(
-      system,
-      branch,
-      conductance * share,
-      (current - conductance * voltage) * share,
-    );
+    const share = 1 / (1 + slope * seriesResistance);
+    setConductiveBranch(system, branch, slope * share, (current - slope * voltage) * share);
   }
 }
 

@@ -1,5 +1,5 @@
 import type { Netlist } from '../circuit/netlist.ts';
-import { sparsePattern, type SparsePattern } from '../linear/sparse-pattern.ts';
+import { phasorLayoutOf, type PhasorEntry, type PhasorLayout } from './phasor-layout.ts';
 import { REFERENCE } from './system.ts';
 
 /**
@@ -9,75 +9,34 @@ import { REFERENCE } from './system.ts';
  *   [Im A   Re A] [Im x] = [Im b],
  * so that one sparse elimination serves both. Entries that are always real have no imaginary slots.
  */
-export interface PhasorSystem {
+export interface PhasorSystem extends PhasorLayout {
   readonly netlist: Netlist;
-  readonly pattern: SparsePattern;
   readonly values: Float64Array;
-  readonly fromEntry: Entry[];
-  readonly toEntry: Entry[];
-  readonly ownEntry: Entry[];
-  /** rows (first, second) of each coupling, in turn */ readonly mutualEntry: Entry[];
   /** right-hand side, real parts then imaginary */ readonly b: Float64Array;
   readonly x: Float64Array;
 }
 
-/** Slots of one complex entry: real upper, real lower, minus imaginary upper, imaginary lower; -1 for none. */
-type Entry = readonly [number, number, number, number];
-
 export function createPhasorSystem(netlist: Netlist, groundConductance: number): PhasorSystem {
-  const { nodeCount, branches, coupled, from, to, size } = netlist;
-  const rows: number[] = [];
-  const columns: number[] = [];
-  const put = (row: number, column: number): number => {
-    rows.push(row);
-    columns.push(column);
-    return rows.length - 1;
-  };
-  const NONE = [-1, -1, -1, -1] as const;
-  const place = (row: number, column: number, isReal: boolean): Entry => {
-    if (row === size || column === size) return NONE;
-    const real = [put(row, column), put(row + size, column + size)] as const;
-    return isReal ? [...real, -1, -1] : [...real, put(row, column + size), put(row + size, column)];
-  };
-  const isReal = branches.map(({ kind }) => kind !== 'capacitor' && kind !== 'inductor');
-  const isOnOneNode = (k: number): boolean => from[k] === to[k];
-  const node = Array.from({ length: nodeCount }, (_, at) => place(at, at, true));
-  const leaving = branches.map((_, k) =>
-    isOnOneNode(k) ? NONE : place(from[k]!, nodeCount + k, true),
-  );
-  const entering = branches.map((_, k) =>
-    isOnOneNode(k) ? NONE : place(to[k]!, nodeCount + k, true),
-  );
-  const atEnd = (ends: Int32Array) => (_: unknown, k: number) =>
-    isOnOneNode(k) ? NONE : place(nodeCount + k, ends[k]!, isReal[k]!);
-  const fromEntry = branches.map(atEnd(from));
-  const toEntry = branches.map(atEnd(to));
-  const ownEntry = branches.map((_, k) => place(nodeCount + k, nodeCount + k, isReal[k]!));
-  const mutualEntry = coupled.flatMap(({ first, second }) => [
-    place(nodeCount + first, nodeCount + second, false),
-    place(nodeCount + second, nodeCount + first, false),
-  ]);
-  const { pattern, slots } = sparsePattern(2 * size, rows, columns);
-  const settle = (entry: Entry): Entry =>
-    entry.map((at) => (at < 0 ? -1 : slots[at]!)) as unknown as Entry;
+  const layout = phasorLayoutOf(netlist.topology);
   const system: PhasorSystem = {
     netlist,
-    pattern,
-    values: new Float64Array(pattern.rowIndex.length),
-    fromEntry: fromEntry.map(settle),
-    toEntry: toEntry.map(settle),
-    ownEntry: ownEntry.map(settle),
-    mutualEntry: mutualEntry.map(settle),
-    b: new Float64Array(2 * size),
-    x: new Float64Array(2 * size),
+    ...layout,
+    values: new Float64Array(layout.pattern.rowIndex.length),
+    b: new Float64Array(2 * netlist.size),
+    x: new Float64Array(2 * netlist.size),
   };
-  node.forEach((entry) => setEntry(system, settle(entry), groundConductance * REFERENCE, 0));
-  leaving.forEach((entry) => setEntry(system, settle(entry), 1, 0));
-  entering.forEach((entry) => setEntry(system, settle(entry), -1, 0));
+  for (const entry of layout.node) setEntry(system, entry, groundConductance * REFERENCE, 0);
+  for (const entry of layout.leaving) setEntry(system, entry, 1, 0);
+  for (const entry of layout.entering) setEntry(system, entry, -1, 0);
   return system;
 }
 
-function setEntry({ values }: PhasorSystem, entry: Entry, real: number, imaginary: number): void {
+function setEntry(
+  { values }: PhasorSystem,
+  entry: PhasorEntry,
+  real: number,
+  imaginary: number,
+): void {
   const [upper, lower, minus, plus] = entry;
   if (upper >= 0) values[upper] = real;
   if (lower >= 0) values[lower] = real;
