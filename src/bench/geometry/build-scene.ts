@@ -19,7 +19,7 @@ export const buildScene = (drawing: BenchDrawing, oven: OvenState, hand: BenchHa
   const bare = sceneLeads(drawing, places, oven, hand);
   const terminals = sceneTerminals(drawing, places, oven, hand, bare);
   const leads = withTags(drawing, bare, terminals);
-  const parts = sceneParts(drawing, places, oven, hand);
+  const parts = sceneParts(drawing, oven, hand);
   const at = (target: TargetRef | null): BenchPoint | null =>
     terminals.find((terminal) => terminal.target === target)?.at ?? null;
   return {

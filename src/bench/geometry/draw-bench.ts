@@ -1,18 +1,30 @@
 import type { OvenLayout } from '../../../shared/oven/layout.ts';
-import type { OvenDefinition, PartKindName } from '../../../shared/oven/oven.ts';
+import type {
+  OvenDefinition,
+  OvenPart,
+  PartKindName,
+  PartRef,
+  TargetRef,
+} from '../../../shared/oven/oven.ts';
 import { isInBox, type BenchBox } from './bench-box.ts';
-import { batteryTargets, benchSize, outlet } from './bench-furniture.ts';
+import { benchSize, outlet } from './bench-furniture.ts';
 import type { BenchPoint } from './bench-point.ts';
 import type { SceneLabel } from './bench-scene.ts';
 import { partWish, terminalWish } from './label-wishes.ts';
 import { leadPath } from './lead-path.ts';
+import { mapLeads } from './lead-map.ts';
 import { placeLabels, type PlacedLabel } from './place-labels.ts';
 import { flatten, smoothPath } from './smooth-path.ts';
+import { targetTraits, type TargetTraits } from './target-traits.ts';
 
 /** What of the picture never changes while an oven is on the bench: places and labels. Made once per oven. */
 export interface BenchDrawing {
   definition: OvenDefinition;
   layout: OvenLayout;
+  targets: ReadonlyMap<TargetRef, TargetTraits>;
+  /** in the order of drawing */ partsByHeight: readonly OvenPart[];
+  /** by part: its terminals by id, from the part's upper left corner */
+  partTerminals: ReadonlyMap<PartRef, Readonly<Record<string, BenchPoint>>>;
   /** by target */ terminalLabels: ReadonlyMap<string, SceneLabel>;
   /** by part reference */ partLabels: ReadonlyMap<string, SceneLabel>;
 }
@@ -38,10 +50,10 @@ const isDark: Readonly<Record<PartKindName, boolean>> = {
 
 /** Places every label of an oven on its bench. Pure; takes some milliseconds, so keep the result. */
 export const drawBench = (definition: OvenDefinition, layout: OvenLayout): BenchDrawing => {
-  const points = targetPoints(layout);
+  const targets = targetTraits(definition, layout);
   const placed = placeLabels(
     [
-      ...[...points].map(([target, at]) =>
+      ...[...targets].map(([target, { at }]) =>
         terminalWish(target, at, layout.terminals[target]?.label),
       ),
       ...definition.parts.flatMap((part) => {
@@ -52,10 +64,10 @@ export const drawBench = (definition: OvenDefinition, layout: OvenLayout): Bench
       }),
     ],
     {
-      points: [...points.values()],
+      points: [...targets.values()].map(({ at }) => at),
       clearance: 8,
       boxes: [outlet],
-      chains: homeChains(definition, layout),
+      leads: mapLeads(homeChains(definition, layout)),
       within: { at: [2, 52], size: [benchSize[0] - 4, benchSize[1] - 54] },
     },
   );
@@ -67,17 +79,34 @@ export const drawBench = (definition: OvenDefinition, layout: OvenLayout): Bench
   return {
     definition,
     layout,
-    terminalLabels: new Map(labels.filter(([id]) => points.has(id))),
-    partLabels: new Map(labels.filter(([id]) => !points.has(id))),
+    targets,
+    partsByHeight: [...definition.parts].sort(byHeight),
+    partTerminals: partTerminals(layout, targets),
+    terminalLabels: new Map(labels.filter(([id]) => targets.has(id))),
+    partLabels: new Map(labels.filter(([id]) => !targets.has(id))),
   };
 };
 
-/** Every place a probe can touch while all leads are at home: the oven's terminals and the battery's. */
-export const targetPoints = (layout: OvenLayout): ReadonlyMap<string, BenchPoint> =>
-  new Map([
-    ...Object.entries(layout.terminals).map(([target, { at }]) => [target, at] as const),
-    ...Object.entries(batteryTargets),
-  ]);
+/** Boards and the chassis carry other parts, so they are drawn first. */
+const carries: readonly PartKindName[] = ['chassis', 'filter-board', 'control-board'];
+
+const byHeight = (a: OvenPart, b: OvenPart): number =>
+  Number(carries.includes(b.kind)) - Number(carries.includes(a.kind));
+
+const partTerminals = (
+  layout: OvenLayout,
+  targets: ReadonlyMap<TargetRef, TargetTraits>,
+): BenchDrawing['partTerminals'] =>
+  new Map(
+    Object.entries(layout.parts).map(([ref, place]) => {
+      const own = [...targets.values()].filter(({ part }) => part === ref);
+      const local = own.map(({ id, at }): [string, BenchPoint] => [
+        id,
+        [at[0] - place.at[0], at[1] - place.at[1]],
+      ]);
+      return [ref, Object.fromEntries(local)];
+    }),
+  );
 
 const otherParts = (
   own: string,

@@ -2,7 +2,7 @@ import type { TargetRef } from '../../../shared/oven/oven.ts';
 import { isInBox } from './bench-box.ts';
 import { distance, type BenchPoint } from './bench-point.ts';
 import type { BenchScene, SceneLead } from './bench-scene.ts';
-import { distanceToChain, flatten, smoothPath } from './smooth-path.ts';
+import { distanceToCurve } from './smooth-path.ts';
 
 /** Reach on the screen, px: a fingertip finds a target from 24 px; nearer than 12 px a target beats a lead. */
 export const reach = { target: 24, sure: 12, lead: 8 } as const;
@@ -40,8 +40,8 @@ export const hitLead = (
   if (scene.isCoverOn) return null;
   let found: { lead: SceneLead; away: number } | null = null;
   for (const lead of scene.leads) {
-    const away = distanceToChain(at, flatten(smoothPath(lead.path)));
-    if (away <= reach.lead / zoom && (found === null || away <= found.away)) found = { lead, away };
+    const away = distanceToCurve(at, lead.path, reach.lead / zoom);
+    if (away < Infinity && (found === null || away <= found.away)) found = { lead, away };
   }
   if (found === null) return null;
   const [a, b] = found.lead.ends;

@@ -1,5 +1,6 @@
 import { boxAround, boxesOverlap, distanceToBox, type BenchBox } from './bench-box.ts';
-import { between, type BenchPoint } from './bench-point.ts';
+import type { BenchPoint } from './bench-point.ts';
+import { coveredLength, type LeadMap } from './lead-map.ts';
 
 /** A text to be placed: its sizes to choose from, best first, and the middles it may take, best first. */
 export interface LabelWish {
@@ -18,7 +19,7 @@ export interface LabelObstacles {
   points: readonly BenchPoint[];
   clearance: number;
   /** never covered */ boxes: readonly BenchBox[];
-  /** better not covered: chains of leads */ chains: readonly (readonly BenchPoint[])[];
+  /** better not covered */ leads: LeadMap;
   /** everything stays inside */ within: BenchBox;
 }
 
@@ -41,7 +42,7 @@ export const placeLabels = (
       .filter(({ box }) => isFree(box, obstacles))
       .map((choice) => ({
         ...choice,
-        cost: choice.cost + coverCost * covered(choice.box, obstacles.chains),
+        cost: choice.cost + coverCost * coveredLength(choice.box, obstacles.leads),
       }))
       .sort((a, b) => a.cost - b.cost),
   }));
@@ -65,15 +66,3 @@ const isFree = (box: BenchBox, { points, clearance, boxes, within }: LabelObstac
   box.at[1] + box.size[1] <= within.at[1] + within.size[1] &&
   points.every((point) => distanceToBox(point, box) >= clearance) &&
   boxes.every((other) => !boxesOverlap(box, other, gap));
-
-/** Units of lead that run under a box. */
-const covered = (box: BenchBox, chains: readonly (readonly BenchPoint[])[]): number => {
-  let units = 0;
-  for (const chain of chains)
-    for (let i = 0; i + 1 < chain.length; i++) {
-      const a = chain[i]!;
-      const b = chain[i + 1]!;
-      if (distanceToBox(between(a, b, 0.5), box) < 3) units += Math.hypot(a[0] - b[0], a[1] - b[1]);
-    }
-  return units;
-};

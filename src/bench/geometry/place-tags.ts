@@ -21,7 +21,7 @@ export const placeTags = (
     points: targets,
     clearance: 9,
     boxes: labels,
-    chains: [],
+    leads: new Map(),
     within: { at: [2, 2], size: [benchSize[0] - 4, benchSize[1] - 4] },
   });
   return new Map([...placed].map(([id, label]) => [id, { ...label, tone: 'on-light' }]));

@@ -1,4 +1,3 @@
-import type { OvenPart, PartKindName } from '../../../shared/oven/oven.ts';
 import type { OvenState } from '../../../shared/oven/oven-state.ts';
 import type { BenchHand } from './bench-hand.ts';
 import type { BenchPoint } from './bench-point.ts';
@@ -6,17 +5,9 @@ import type { ScenePart } from './bench-scene.ts';
 import type { BenchDrawing } from './draw-bench.ts';
 import { plugShift } from './target-places.ts';
 
-/** Boards and the chassis carry other parts, so they are drawn first. */
-const carries: readonly PartKindName[] = ['chassis', 'filter-board', 'control-board'];
-
 /** Every part that has a place on the bench, as it looks now, in the order of drawing. */
-export const sceneParts = (
-  drawing: BenchDrawing,
-  places: ReadonlyMap<string, BenchPoint>,
-  oven: OvenState,
-  hand: BenchHand,
-): ScenePart[] =>
-  [...drawing.definition.parts].sort(byHeight).flatMap((part): ScenePart[] => {
+export const sceneParts = (drawing: BenchDrawing, oven: OvenState, hand: BenchHand): ScenePart[] =>
+  drawing.partsByHeight.flatMap((part): ScenePart[] => {
     const place = drawing.layout.parts[part.ref];
     if (place === undefined) return [];
     const shift = part.kind === 'plug' ? plugShift(drawing, hand.isCordIn) : [0, 0];
@@ -34,7 +25,7 @@ export const sceneParts = (
         name: part.name,
         label:
           part.kind === 'plug' && hand.isCordIn ? null : (drawing.partLabels.get(part.ref) ?? null),
-        terminals: terminalsOf(part.ref, at, places),
+        terminals: drawing.partTerminals.get(part.ref) ?? {},
         stamp: hand.stamps[part.ref] ?? [],
         looks: hand.looks[part.ref] ?? [],
         isActuated:
@@ -48,18 +39,3 @@ export const sceneParts = (
       },
     ];
   });
-
-const byHeight = (a: OvenPart, b: OvenPart): number =>
-  Number(carries.includes(b.kind)) - Number(carries.includes(a.kind));
-
-const terminalsOf = (
-  part: string,
-  from: BenchPoint,
-  places: ReadonlyMap<string, BenchPoint>,
-): Record<string, BenchPoint> =>
-  Object.fromEntries(
-    [...places].flatMap(([target, at]) => {
-      const [ref, id] = target.split('.');
-      return ref === part && id !== undefined ? [[id, [at[0] - from[0], at[1] - from[1]]]] : [];
-    }),
-  );

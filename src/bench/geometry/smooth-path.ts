@@ -62,6 +62,37 @@ export const distanceToChain = (point: BenchPoint, chain: readonly BenchPoint[])
   return nearest;
 };
 
+/** How far a lead's curve may swing out of the box of its points, units: generous, for a first coarse look. */
+const overshoot = 60;
+
+/**
+ * Distance of a point from the smooth curve through points, if it is at most `reach`, else Infinity.
+ * A Bezier piece lies within the box of its four points, so far pieces are never drawn out.
+ */
+export const distanceToCurve = (
+  point: BenchPoint,
+  points: readonly BenchPoint[],
+  reach: number,
+): number => {
+  let nearest = Infinity;
+  if (!isNearBox(point, points, reach + overshoot)) return nearest;
+  for (const piece of smoothPath(points))
+    if (isNearBox(point, piece, reach))
+      nearest = Math.min(nearest, distanceToChain(point, flatten([piece])));
+  return nearest <= reach ? nearest : Infinity;
+};
+
+const isNearBox = (at: BenchPoint, points: readonly BenchPoint[], reach: number): boolean =>
+  ([0, 1] as const).every((k) => {
+    let least = Infinity;
+    let most = -Infinity;
+    for (const point of points) {
+      least = Math.min(least, point[k]);
+      most = Math.max(most, point[k]);
+    }
+    return at[k] >= least - reach && at[k] <= most + reach;
+  });
+
 const distanceToPiece = (p: BenchPoint, a: BenchPoint, b: BenchPoint): number => {
   const dx = b[0] - a[0];
   const dy = b[1] - a[1];

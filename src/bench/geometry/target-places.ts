@@ -1,6 +1,5 @@
 import type { TargetRef } from '../../../shared/oven/oven.ts';
 import { outlet } from './bench-furniture.ts';
-import { batteryTargets } from './bench-furniture.ts';
 import type { BenchPoint } from './bench-point.ts';
 import type { BenchDrawing } from './draw-bench.ts';
 
@@ -17,14 +16,11 @@ export const targetPlaces = (
   drawing: BenchDrawing,
   isCordIn: boolean,
 ): ReadonlyMap<TargetRef, BenchPoint> => {
-  const shift = plugShift(drawing, isCordIn);
-  const isPlug = (target: string): boolean =>
-    drawing.definition.parts.find(({ ref }) => ref === target.split('.')[0])?.kind === 'plug';
-  return new Map([
-    ...Object.entries(drawing.layout.terminals).map(([target, { at }]): [string, BenchPoint] => [
+  const [dx, dy] = plugShift(drawing, isCordIn);
+  return new Map(
+    [...drawing.targets].map(([target, { at, isOnPlug }]) => [
       target,
-      isPlug(target) ? [at[0] + shift[0], at[1] + shift[1]] : at,
+      isOnPlug ? [at[0] + dx, at[1] + dy] : at,
     ]),
-    ...Object.entries(batteryTargets),
-  ]);
+  );
 };

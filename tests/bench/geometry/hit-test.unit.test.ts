@@ -47,8 +47,7 @@ describe('hitting a lead or a part', () => {
   it('finds every longer lead at the middle of its way', () => {
     for (const lead of scene.leads.filter(({ isInCord }) => !isInCord)) {
       const middle = lead.path[Math.floor(lead.path.length / 2)]!;
-      if (lead.path.length > 4)
-        expect(hitLead(scene, middle, 4)?.ref).toBe(lead.ref);
+      if (lead.path.length > 4) expect(hitLead(scene, middle, 4)?.ref).toBe(lead.ref);
     }
   });
 

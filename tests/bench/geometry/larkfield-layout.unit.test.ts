@@ -4,12 +4,14 @@ import { boxesOverlap, distanceToBox } from '../../../src/bench/geometry/bench-b
 import { benchSize } from '../../../src/bench/geometry/bench-furniture.ts';
 import { distance } from '../../../src/bench/geometry/bench-point.ts';
 import type { SceneTerminal } from '../../../src/bench/geometry/bench-scene.ts';
-import { targetPoints } from '../../../src/bench/geometry/draw-bench.ts';
 import { distanceToChain, flatten, smoothPath } from '../../../src/bench/geometry/smooth-path.ts';
 import { definition, drawing, layout, sceneOf, withLeads } from '../../support/larkfield.ts';
 
 const everyPair = <T>(items: readonly T[]): [T, T][] =>
   items.flatMap((a, i) => items.slice(i + 1).map((b): [T, T] => [a, b]));
+
+/** Every target of the oven and the battery, and where it is. */
+const places = [...drawing.targets].map(([target, { at }]) => [target, at] as const);
 
 const allEnds = definition.leads.flatMap(({ ref }) => [`${ref}/a`, `${ref}/b`]);
 
@@ -26,7 +28,7 @@ describe('the layout of the Larkfield LC-28', () => {
   });
 
   it('keeps every two targets at least 26 units apart, so that 24 px targets never overlap at zoom 1', () => {
-    for (const [[a, at], [b, bt]] of everyPair([...targetPoints(layout)]))
+    for (const [[a, at], [b, bt]] of everyPair(places))
       expect(distance(at, bt), `${a} and ${b}`).toBeGreaterThanOrEqual(26);
   });
 
@@ -42,7 +44,7 @@ describe('the layout of the Larkfield LC-28', () => {
     for (const lead of sceneOf().leads) {
       const chain = flatten(smoothPath(lead.path), 24);
       const own = lead.ends.map(({ seatedOn }) => seatedOn);
-      for (const [target, at] of targetPoints(layout))
+      for (const [target, at] of places)
         if (!own.includes(target))
           expect(distanceToChain(at, chain), `${lead.ref} over ${target}`).toBeGreaterThan(9);
     }
@@ -51,7 +53,7 @@ describe('the layout of the Larkfield LC-28', () => {
   it('keeps every target and every lead on the bench', () => {
     const onBench = ([x, y]: readonly [number, number]): boolean =>
       x > 12 && y > 12 && x < benchSize[0] - 12 && y < benchSize[1] - 12;
-    for (const [target, at] of targetPoints(layout)) expect(onBench(at), target).toBe(true);
+    for (const [target, at] of places) expect(onBench(at), target).toBe(true);
     for (const lead of sceneOf().leads)
       expect(flatten(smoothPath(lead.path)).every(onBench), lead.ref).toBe(true);
   });
@@ -62,7 +64,7 @@ describe('the labels of the Larkfield LC-28', () => {
   const labels = [...terminalLabels, ...partLabels];
 
   it('names every target in full and every part', () => {
-    for (const target of targetPoints(layout).keys())
+    for (const target of drawing.targets.keys())
       expect(terminalLabels.get(target)?.text).toBe(target);
     for (const { ref, kind } of definition.parts)
       if (kind !== 'chassis') expect(partLabels.get(ref)?.text).toContain(ref);
@@ -75,7 +77,7 @@ describe('the labels of the Larkfield LC-28', () => {
 
   it('never lets a label cover a target', () => {
     for (const [name, { box }] of labels)
-      for (const [target, at] of targetPoints(layout))
+      for (const [target, at] of places)
         expect(distanceToBox(at, box), `${name} over ${target}`).toBeGreaterThanOrEqual(8);
   });
 

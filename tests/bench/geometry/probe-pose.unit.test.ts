@@ -4,10 +4,9 @@ import { benchSize } from '../../../src/bench/geometry/bench-furniture.ts';
 import { along, distance, type BenchPoint } from '../../../src/bench/geometry/bench-point.ts';
 import { probeAngle, probeLength } from '../../../src/bench/geometry/probe-pose.ts';
 import { distanceToChain } from '../../../src/bench/geometry/smooth-path.ts';
-import { targetPoints } from '../../../src/bench/geometry/draw-bench.ts';
-import { layout } from '../../support/larkfield.ts';
+import { drawing } from '../../support/larkfield.ts';
 
-const targets = [...targetPoints(layout).values()];
+const targets = [...drawing.targets.values()].map(({ at }) => at);
 
 describe('how a probe is held', () => {
   it('comes from below in the open, the red one from the right, the black one from the left', () => {

@@ -1,6 +1,6 @@
 import { act, fireEvent, render } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
-import { fitCamera, toScreen } from '../../../src/bench/camera/camera.ts';
+import { fitCamera, toScreen, type Camera } from '../../../src/bench/camera/camera.ts';
 import { benchSize } from '../../../src/bench/geometry/bench-furniture.ts';
 import { along, type BenchPoint } from '../../../src/bench/geometry/bench-point.ts';
 import type { BenchScene } from '../../../src/bench/geometry/bench-scene.ts';
@@ -15,8 +15,8 @@ const camera = fitCamera(view, benchSize);
 
 const mount = async (scene: BenchScene) => {
   const handlers = { onPointer: vi.fn(), onWheel: vi.fn(), onPinch: vi.fn() };
-  const draw = (next: BenchScene) => (
-    <BenchCanvas scene={next} camera={camera} {...view} {...handlers} />
+  const draw = (next: BenchScene, seenBy = camera) => (
+    <BenchCanvas scene={next} camera={seenBy} {...view} {...handlers} />
   );
   const page = render(draw(scene));
   await frames();
@@ -25,6 +25,7 @@ const mount = async (scene: BenchScene) => {
     ...handlers,
     page,
     content,
+    look: (seenBy: Camera) => page.rerender(draw(scene, seenBy)),
     show: async (next: BenchScene) => {
       page.rerender(draw(next));
       await frames();
@@ -162,6 +163,25 @@ describe('what is drawn', () => {
   it('is a picture only: hidden from assistive technology', async () => {
     const bench = await mount(sceneOf());
     expect(bench.content.closest('[aria-hidden="true"]')).not.toBeNull();
+  });
+});
+
+describe('the camera', () => {
+  it('moves the finished picture during a gesture and draws it anew at rest', async () => {
+    const bench = await mount(sceneOf());
+    const style = (): string => (bench.content as HTMLElement).style.transform;
+    expect(style()).toBe('');
+    bench.look({ zoom: camera.zoom * 2, x: -30, y: 12 });
+    // The first picture lies at x 0, y 0: twice its size, then shifted.
+    expect(style()).toBe('translate(-30px, 12px) scale(2)');
+    const [x, y] = placeOf('F1.1');
+    const face = (): number[] => {
+      const context = bench.content.querySelectorAll('canvas')[layers.terminals]!.getContext('2d')!;
+      return [...context.getImageData(Math.round(x * 2 - 30), Math.round(y * 2 + 12), 1, 1).data];
+    };
+    expect(face()).not.toEqual([255, 253, 246, 255]);
+    await vi.waitFor(() => expect(style()).toBe(''), 4000);
+    expect(face()).toEqual([255, 253, 246, 255]);
   });
 });
 

@@ -1,7 +1,7 @@
 import type { BenchPoint } from '../../geometry/bench-point.ts';
 import { material, shade } from '../../../styles/tokens.ts';
 import { box, chain, disc, fill, rule, stroke } from '../paint/outline.ts';
-import { apart, linear, raised, type Pen } from '../paint/pen.ts';
+import { apart, cast, linear, type Pen } from '../paint/pen.ts';
 
 /** A crocodile clip biting on a point; `angle`: radians, from its jaws back along its lead. */
 export const paintClip = (
@@ -24,15 +24,15 @@ export const paintClip = (
       ]);
       pen.closePath();
     };
-    raised(pen, 3, shade.drop, () => {
+    cast(pen, 2.4, () => {
       jaws();
-      fill(pen, material.tin[2]);
+      fill(pen, shade.soft);
     });
     jaws();
     fill(pen, linear(pen, [0, -5, 0, 5], material.tin));
     stroke(pen, material.tin[3], 0.7);
     for (let i = 0; i < 5; i++) rule(pen, [i * 2.2, -1.4, i * 2.2, 1.4], material.tin[3], 0.8);
-    raised(pen, 3, shade.drop, () => box(pen, [13, -6, 26, 12], 5, tones[1]!));
+    cast(pen, 2.4, () => box(pen, [13, -6, 26, 12], 5, shade.soft));
     box(
       pen,
       [13, -6, 26, 12],

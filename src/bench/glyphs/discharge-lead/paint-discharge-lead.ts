@@ -6,7 +6,7 @@ import { paintClip } from '../battery/paint-clip.ts';
 import { paintWire } from '../lead/paint-curve.ts';
 import { write } from '../paint/lettering.ts';
 import { box, chain, fill, rule, stroke } from '../paint/outline.ts';
-import { apart, linear, raised, type Pen } from '../paint/pen.ts';
+import { apart, cast, linear, type Pen } from '../paint/pen.ts';
 
 /** Way of the wand from its tip, radians: towards the hand below it. */
 const wandAngle = 0.62;
@@ -45,7 +45,7 @@ export const paintDischargeLead = (
 };
 
 const paintWand = (pen: Pen, isTurned: boolean): void => {
-  raised(pen, 5, shade.drop, () => box(pen, [40, -9, wandLength - 44, 18], 9, material.film[1]));
+  cast(pen, 4, () => box(pen, [20, -8, wandLength - 24, 18], 9, shade.soft));
   chain(pen, [
     [0, 0],
     [9, -2.6],
