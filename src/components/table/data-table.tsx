@@ -16,26 +16,34 @@ interface Props<Row> {
 const show = <Row,>(column: Column<Row>, row: Row) =>
   column.cell ? column.cell(row) : (column.value(row) ?? '–');
 
+/** On a narrow screen the first cell heads the block and the others stand below it in two columns. */
+const cellClasses = (isFirst: boolean, isNumber: boolean): string =>
+  [
+    'text-left font-normal md:table-cell md:px-3 md:py-2.5 md:align-middle',
+    isFirst ? 'col-span-2 block' : 'block min-w-0',
+    isNumber ? 'md:text-right md:font-mono md:text-sm' : '',
+  ].join(' ');
+
 const TableRow = <Row,>({ columns, row }: { columns: readonly Column<Row>[]; row: Row }) => (
   <tr
     role="row"
-    className="block border-b border-line px-3 py-2 last:border-b-0 md:table-row md:p-0 md:hover:bg-paper"
+    className="grid grid-cols-2 gap-x-4 gap-y-2 border-b border-line px-3 py-3 last:border-b-0 md:table-row md:hover:bg-paper"
   >
     {columns.map((column, index) => {
-      const Cell = index === 0 ? 'th' : 'td';
+      const isFirst = index === 0;
+      const Cell = isFirst ? 'th' : 'td';
       return (
         <Cell
           key={column.id}
-          role={index === 0 ? 'rowheader' : 'cell'}
-          scope={index === 0 ? 'row' : undefined}
-          className={[
-            'grid grid-cols-[112px_1fr] gap-2 py-1 text-left font-normal md:table-cell md:align-middle md:px-3 md:py-2.5',
-            column.isNumber ? 'md:text-right md:font-mono md:text-sm' : '',
-          ].join(' ')}
+          role={isFirst ? 'rowheader' : 'cell'}
+          scope={isFirst ? 'row' : undefined}
+          className={cellClasses(isFirst, column.isNumber ?? false)}
         >
-          <span aria-hidden className="text-sm text-ink-2 md:hidden">
-            {column.header}
-          </span>
+          {isFirst ? null : (
+            <span aria-hidden className="block text-xs text-ink-2 md:hidden">
+              {column.header}
+            </span>
+          )}
           <span className="min-w-0">{show(column, row)}</span>
         </Cell>
       );

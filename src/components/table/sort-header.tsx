@@ -22,10 +22,14 @@ export const SortHeader = ({ id, header, isNumber, sort, onSort }: Props) => {
       <button
         type="button"
         onClick={() => onSort({ column: id, isDescending: isSorted && !sort.isDescending })}
-        className="inline-flex min-h-8 items-center gap-1 rounded text-sm font-semibold text-ink hover:text-act"
+        className="inline-flex min-h-8 items-center gap-1 rounded text-left text-sm leading-tight font-semibold text-ink hover:text-act"
       >
         {header}
-        <Icon aria-hidden size={14} className={isSorted ? 'text-act' : 'text-ink-2'} />
+        <Icon
+          aria-hidden
+          size={14}
+          className={`shrink-0 ${isSorted ? 'text-act' : 'text-ink-2'}`}
+        />
       </button>
     </th>
   );
