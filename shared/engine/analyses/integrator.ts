@@ -24,6 +24,7 @@ export interface Integrator {
   /** dy/dt by stage; the first is that of the state itself */ readonly rates: Float64Array[];
   /** the solution at the start of the step, to fall back to */ readonly startX: Float64Array;
   readonly startJunctions: Float64Array;
+  /** S of each junction there */ readonly startConductances: Float64Array;
   /** A of each inductor at the start of the step */ readonly startCurrents: Float64Array;
   readonly history: Float64Array;
   /** largest size each voltage (V) and current (A) has had so far */ readonly sizes: Float64Array;
@@ -54,6 +55,7 @@ export function createIntegrator(machine: Machine, tableau: Tableau): Integrator
     rates: Array.from({ length: tableau.stages }, () => new Float64Array(count)),
     startX: machine.system.x.slice(),
     startJunctions: new Float64Array(machine.junctions.length),
+    startConductances: new Float64Array(machine.junctions.length),
     startCurrents: new Float64Array(machine.inductors.length),
     history: new Float64Array(count),
     sizes: new Float64Array(count),
@@ -119,6 +121,22 @@ export function acceptStep(integrator: Integrator): void {
   keepStart(integrator);
 }
 
+/** S; a junction below this carries nothing that a winding would notice losing. */
+const CONDUCTING = 1e-6;
+
+/**
+ * Whether a junction in the step just tried has turned on or off. The current of a winding then has
+ * a corner inside the step, and the method's own idea of its voltage at the end is of no use.
+ */
+export function hasJunctionTurned({ machine, startConductances }: Integrator): boolean {
+  if (machine.inductors.length === 0) return false;
+  return machine.junctions.some(({ conductance }, j) => {
+    const before = startConductances[j]!;
+    const greater = Math.max(before, conductance);
+    return greater > CONDUCTING && Math.min(before, conductance) < 1e-3 * greater;
+  });
+}
+
 /** Goes back to the start of the step just tried. */
 export function refuseStep({ machine, startX, startJunctions }: Integrator): void {
   machine.system.x.set(startX);
@@ -133,6 +151,7 @@ function keepStart(integrator: Integrator): void {
   startX.set(machine.system.x);
   for (let j = 0; j < startJunctions.length; j += 1) {
     startJunctions[j] = machine.junctions[j]!.voltage;
+    integrator.startConductances[j] = machine.junctions[j]!.conductance;
   }
   for (let j = 0; j < startCurrents.length; j += 1) {
     startCurrents[j] = inductorCurrent(machine, j);

@@ -7,6 +7,7 @@ import {
   ABSOLUTE_VOLTS,
   INSTANT,
   acceptStep,
+  hasJunctionTurned,
   refuseStep,
   settle,
   stepError,
@@ -172,6 +173,7 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
     walk.refusals = 0;
     return refuse(length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2)));
   }
+  const hasTurned = hasJunctionTurned(integrator);
   acceptStep(integrator);
   walk.refusals = 0;
   walk.overdrive = overdrive;
@@ -181,7 +183,9 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   const basis = Math.max(length, Math.min(walk.wanted, 2 * length));
   const next = Math.max(nextStep(basis, error, tableau.errorPower), plan.patience * walk.offset);
   walk.wanted = Math.min(walk.longest, next);
-  return turn <= 1 ? 'turning' : 'accepted';
+  if (turn <= 1) return 'turning';
+  if (!hasTurned || walk.offset >= walk.end) return 'accepted';
+  return settle(integrator, walk.base + walk.offset) ?? 'accepted';
 }
 
 /** The rates at the start were those of a circuit that had just turned a corner: finds them anew. */
