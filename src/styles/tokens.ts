@@ -108,15 +108,15 @@ export const material = {
 
 /** A lead's insulation: its light, body and shade. */
 export const insulation = {
-  black: ['#6d777b', '#2a3033', '#0d1012'],
-  white: ['#ffffff', '#dcded8', '#9a9d96'],
-  blue: ['#86b6e6', '#2c6ba6', '#153d66'],
-  brown: ['#b98a63', '#7a4c2a', '#452712'],
-  red: ['#ff8d7f', '#c0281e', '#6f110b'],
-  green: ['#83c796', '#2f8049', '#164a27'],
-  yellow: ['#fff0a6', '#e0b62a', '#8d6c0d'],
-  grey: ['#d3dadb', '#8a9598', '#4f595c'],
-  orange: ['#ffc48c', '#dd7a28', '#87430d'],
+  black: ['#7e898d', '#2a3033', '#0d1012'],
+  white: ['#ffffff', '#dcded8', '#656a62'],
+  blue: ['#a3caf2', '#2c6ba6', '#123453'],
+  brown: ['#d3aa86', '#7a4c2a', '#3b210f'],
+  red: ['#ffa59a', '#c0281e', '#66100a'],
+  green: ['#93d3a5', '#2f8049', '#0d3319'],
+  yellow: ['#fff0a6', '#e0b62a', '#7b5e07'],
+  grey: ['#d3dadb', '#8a9598', '#414a50'],
+  orange: ['#ffc48c', '#dd7a28', '#6c3007'],
 } as const;
 
 /** Light and shade laid over materials: light comes from the upper left. */

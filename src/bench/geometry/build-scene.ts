@@ -29,7 +29,9 @@ export const buildScene = (drawing: BenchDrawing, oven: OvenState, hand: BenchHa
     isCordIn: hand.isCordIn,
     cord: cordPath(
       parts.find(({ kind }) => kind === 'plug'),
-      leads,
+      leads.flatMap(({ ref, isInCord }) =>
+        isInCord ? [drawing.layout.leads[ref]?.via ?? []] : [],
+      ),
       drawing.layout.chassis,
     ),
     parts,

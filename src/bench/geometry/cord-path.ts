@@ -1,14 +1,13 @@
 import { isInBox, type BenchBox } from './bench-box.ts';
 import type { BenchPoint } from './bench-point.ts';
-import type { SceneLead, ScenePart } from './bench-scene.ts';
+import type { ScenePart } from './bench-scene.ts';
 
-/** The cord's way: from the plug's lower edge along the middle of the leads inside it to just inside the chassis. */
+/** The cord's way: from the plug's lower edge along the middle of the ways of its leads to just inside the chassis. */
 export const cordPath = (
   plug: Pick<ScenePart, 'at' | 'size'> | undefined,
-  leads: readonly Pick<SceneLead, 'path' | 'isInCord'>[],
+  ways: readonly (readonly BenchPoint[])[],
   chassis: BenchBox,
 ): BenchPoint[] => {
-  const ways = leads.filter(({ isInCord }) => isInCord).map(({ path }) => path.slice(1, -1));
   const first = ways[0];
   if (plug === undefined || first === undefined) return [];
   const middle = first.map((_, i): BenchPoint => {

@@ -19,14 +19,19 @@ export const sceneLeads = (
     const b = sceneEnd(drawing, places, oven, hand, lead, 1);
     const way = drawing.layout.leads[lead.ref];
     if (a === null || b === null || way === undefined) return [];
-    const isHome = [a.seatedOn === lead.ends[0], b.seatedOn === lead.ends[1]] as const;
+    const inCord = isInCord(drawing, lead);
+    // A lead inside the cord cannot leave it.
+    const isHome = [
+      inCord || a.seatedOn === lead.ends[0],
+      inCord || b.seatedOn === lead.ends[1],
+    ] as const;
     return [
       {
         ref: lead.ref,
         path: leadPath(a.at, way.via, b.at, isHome),
         insulation: lead.insulation,
         isHighVoltage: lead.isHighVoltage ?? false,
-        isInCord: isInCord(drawing, lead),
+        isInCord: inCord,
         ends: [a, b],
       },
     ];

@@ -25,22 +25,31 @@ const paintOne = (
   tones: readonly [string, string, string],
 ): void => {
   if (from === undefined) return;
-  const isFar = clip[0] > 140;
-  const back: BenchPoint = isFar ? [clip[0] - 40, clip[1] + 14] : [clip[0], clip[1] - 30];
-  const way: BenchPoint[] = isFar
-    ? [
-        from,
-        [from[0] + 30, from[1] + 8],
-        [(from[0] + clip[0]) / 2, (from[1] + clip[1]) / 2 + 40],
-        back,
-      ]
-    : [
-        from,
-        [128, from[1] + 18],
-        [129, (from[1] + clip[1]) / 2],
-        [clip[0] + 10, clip[1] - 50],
-        back,
-      ];
+  const way = clip[0] > 140 ? aroundOven(from, clip) : besideBattery(from, clip);
+  const back = way.at(-1) ?? from;
   paintWire(pen, [...way, clip], 4, tones, shade.soft);
   paintClip(pen, clip, Math.atan2(back[1] - clip[1], back[0] - clip[0]), tones);
 };
+
+/** Along the front of the oven and up to the clip from below, so that the lead hides as little as it can. */
+const aroundOven = (from: BenchPoint, clip: BenchPoint): BenchPoint[] => {
+  const turn = Math.max(200, clip[0] - 70);
+  return [
+    from,
+    [128, from[1] + 44],
+    [131, 650],
+    [170, 704],
+    [(170 + turn) / 2, 710],
+    [turn, 690],
+    [clip[0] - 34, (clip[1] + 690) / 2],
+    [clip[0] - 12, clip[1] + 40],
+  ];
+};
+
+const besideBattery = (from: BenchPoint, clip: BenchPoint): BenchPoint[] => [
+  from,
+  [128, from[1] + 18],
+  [129, (from[1] + clip[1]) / 2],
+  [clip[0] + 10, clip[1] - 50],
+  [clip[0], clip[1] - 30],
+];
