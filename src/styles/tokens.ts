@@ -111,12 +111,12 @@ export const insulation = {
   black: ['#7e898d', '#2a3033', '#0d1012'],
   white: ['#ffffff', '#dcded8', '#656a62'],
   blue: ['#a3caf2', '#2c6ba6', '#123453'],
-  brown: ['#d3aa86', '#7a4c2a', '#3b210f'],
+  brown: ['#e0bd9d', '#7a4c2a', '#3b210f'],
   red: ['#ffa59a', '#c0281e', '#66100a'],
   green: ['#93d3a5', '#2f8049', '#0d3319'],
   yellow: ['#fff0a6', '#e0b62a', '#7b5e07'],
-  grey: ['#d3dadb', '#8a9598', '#414a50'],
-  orange: ['#ffc48c', '#dd7a28', '#6c3007'],
+  grey: ['#d3dadb', '#8a9598', '#343c42'],
+  orange: ['#ffc48c', '#dd7a28', '#5a2605'],
 } as const;
 
 /** Light and shade laid over materials: light comes from the upper left. */
