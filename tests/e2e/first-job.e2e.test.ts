@@ -82,7 +82,7 @@ describe('a trainee', () => {
       .getByRole('button', { name: /^hand in/i })
       .first()
       .click();
-    await page.getByRole('dialog').getByRole('button', { name: 'Hand in' }).click();
+    await page.getByRole('alertdialog').getByRole('button', { name: 'Hand in' }).click();
     await page.waitForURL('**/attempts/**');
     await page.getByText('You found the cause, and nobody was put at risk.').waitFor();
     await page.getByText('make safe').first().waitFor();
@@ -189,7 +189,7 @@ describe('an instructor', () => {
     await page.goto(address);
     await page.getByRole('button', { name: 'Publish version 1' }).click();
     await page
-      .getByRole('dialog')
+      .getByRole('alertdialog')
       .getByRole('button', { name: /publish/i })
       .click();
     await page.getByText(/published as version 1/).waitFor();

@@ -27,7 +27,8 @@ export function benchOn(page: Page): E2eBench {
   const bench: E2eBench = {
     action: (name) => page.getByRole('button', { name, exact: true }).click(),
     uses: async (name, ...targets) => {
-      await tool(name).first().click();
+      const button = tool(name).first();
+      if ((await button.getAttribute('aria-pressed')) !== 'true') await button.click();
       for (const target of targets) await tap(target);
     },
     chooses: async (target, choice) => {
