@@ -17,6 +17,12 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
   let taken = '';
   let isReading = false;
   let isOver = false;
+  /** the bench after our own reading was recorded: nothing about it is news to the display */
+  let own: BenchState | null = null;
+  const hasChanged = (since: BenchState): boolean => {
+    const { state } = bench.getState();
+    return state !== since && state !== own;
+  };
 
   const arrive = (view: MeterView | null, atMs: number): void => {
     bench.getState().show(view);
@@ -25,7 +31,7 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
     const key = readingKey(bench.getState(), view);
     if (!view.isSettled || key === taken) return;
     taken = key;
-    bench.getState().run({ type: 'TakeReading', data: {} }, atMs);
+    if (bench.getState().run({ type: 'TakeReading', data: {} }, atMs)) own = bench.getState().state;
   };
   const tick = async (): Promise<void> => {
     const { state, clock, setup } = bench.getState();
@@ -43,12 +49,12 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
       isReading = false;
     }
     // What the bench has become meanwhile is read at once, not a third of a second later.
-    if (bench.getState().state !== state && isConnected(bench.getState().state)) await tick();
+    if (hasChanged(state) && isConnected(bench.getState().state)) await tick();
   };
   void tick();
   const timer = setInterval(() => void tick(), readingPeriod);
   const stop = bench.subscribe((now, before) => {
-    if (now.state !== before.state) void tick();
+    if (now.state !== before.state && hasChanged(before.state)) void tick();
   });
   return () => {
     isOver = true;

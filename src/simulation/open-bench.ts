@@ -80,7 +80,7 @@ async function onTheBench(options: OpenBenchOptions, found: Found): Promise<Open
     clock,
     condition: attempt.content.condition,
     state: start.state,
-    events: [...record, ...start.waiting],
+    events: [...record.map(withoutRecord), ...start.waiting],
     save: start.save,
     onEvents: (events) => out?.add(events),
   });
