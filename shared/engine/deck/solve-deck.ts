@@ -2,6 +2,7 @@ import { operatingPoint } from '../analyses/operating-point.ts';
 import { phasor } from '../analyses/phasor.ts';
 import { transient } from '../analyses/transient.ts';
 import type { Circuit, EngineFailure, Result } from '../circuit/circuit.ts';
+import { floatingNode } from '../circuit/loops-and-islands.ts';
 import type { Deck } from './deck.ts';
 import { holdIslands } from './hold-islands.ts';
 
@@ -27,7 +28,13 @@ const RELATIVE_TOLERANCE = 3e-7;
 export function solveDeck(deck: Deck): Result<DeckAnswer> {
   const circuit = holdIslands(deck.circuit);
   const answer: DeckAnswer = {};
+  const startsFromRest =
+    deck.asksOperatingPoint ||
+    deck.frequencies !== undefined ||
+    deck.transient?.useInitialConditions === false;
   const failure =
+    // before the islands are held: a current into one would find its way through that
+    (startsFromRest ? floatingNode(deck.circuit, 'steady') : undefined) ??
     (deck.asksOperatingPoint ? answerOp(circuit, answer) : undefined) ??
     answerTran(circuit, deck, answer) ??
     answerAc(circuit, deck, answer);

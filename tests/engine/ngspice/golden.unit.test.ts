@@ -17,17 +17,21 @@ describe('golden decks, solved by ngspice 39 beforehand', () => {
     expect(all.filter((deck) => deck.transient !== undefined).length).toBeGreaterThan(15);
   });
 
-  it.each(names)('%s', (name) => {
-    const deck = soundDeck(textOf(name));
-    const solved = solveDeck(deck);
-    if (!solved.ok) expect.fail(solved.failure.message);
-    const reference = JSON.parse(
-      readFileSync(join(folder, name, 'expected.json'), 'utf8'),
-    ) as DeckAnswer;
-    const all = departures(deck.circuit, solved.value, reference);
-    expect(all.length).toBeGreaterThan(0);
-    expect(all.filter(({ ratio }) => !(ratio <= 1))).toEqual([]);
-  });
+  it.each(names)(
+    '%s',
+    (name) => {
+      const deck = soundDeck(textOf(name));
+      const solved = solveDeck(deck);
+      if (!solved.ok) expect.fail(solved.failure.message);
+      const reference = JSON.parse(
+        readFileSync(join(folder, name, 'expected.json'), 'utf8'),
+      ) as DeckAnswer;
+      const all = departures(deck.circuit, solved.value, reference);
+      expect(all.length).toBeGreaterThan(0);
+      expect(all.filter(({ ratio }) => !(ratio <= 1))).toEqual([]);
+    },
+    60_000,
+  );
 });
 
 function textOf(name: string): string {
