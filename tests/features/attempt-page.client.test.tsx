@@ -25,7 +25,7 @@ const handedIn = (): FakeApi =>
     .on(getEvents, { events: [...events] })
     .on(getOven, { definition: oven, layout });
 
-const timeline = () => screen.findByRole('region', { name: 'What you did' });
+const timeline = () => screen.findByRole('region', { name: 'Timeline' });
 
 describe('the debrief', () => {
   it('leads with one sentence, the score and the six skills', async () => {
@@ -51,12 +51,13 @@ describe('the debrief', () => {
     await timeline();
     await user.click(screen.getByRole('button', { name: /You discharged C1\.1/ }));
     await waitFor(() => expect(address()).toBe(`${path}?at=4`));
+    expect(screen.getByRole('region', { name: 'Replay' })).toHaveFocus();
     const moment = within(await timeline()).getByRole('button', {
       name: /Discharge tip on C1\.1/i,
     });
-    await waitFor(() => expect(moment).toHaveFocus());
-    expect(moment).toHaveAttribute('aria-current', 'true');
+    expect(moment).toHaveAttribute('aria-current', 'step');
     expect(moment).toHaveTextContent('00:44');
+    expect(moment).toHaveTextContent('+20');
   });
 
   it('offers no jump for what was never done', async () => {
@@ -74,8 +75,22 @@ describe('the debrief', () => {
   it('opens at the moment of the address', async () => {
     handedIn();
     await renderApp(`${path}?at=8`);
-    const moment = within(await timeline()).getByRole('button', { current: true });
+    const moment = within(await timeline()).getByRole('button', { current: 'step' });
     expect(moment).toHaveTextContent('D1.a–D1.k 0.4 Ω');
+    expect(screen.getByRole('region', { name: 'Replay' })).toHaveFocus();
+  });
+
+  it('shows the moments that counted, and every event on request', async () => {
+    handedIn();
+    const { user } = await renderApp(path);
+    const lines = () =>
+      within(screen.getByRole('region', { name: 'Timeline' })).getAllByRole('button');
+    await timeline();
+    // Marks point at events 1, 4, 5, 8 and 9.
+    expect(lines()).toHaveLength(5);
+    await user.click(screen.getByRole('checkbox', { name: /Show all 10 events/ }));
+    expect(lines()).toHaveLength(10);
+    expect(lines()[0]).toHaveTextContent('job begun');
   });
 
   it('names what was truly wrong', async () => {

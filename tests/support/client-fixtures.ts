@@ -67,7 +67,7 @@ export const summary = (n: number, more: Partial<AttemptSummary> = {}): AttemptS
   startedAt: when,
   handedInAt: '2025-03-04T09:52:00.000Z',
   benchMs: 1_322_000,
-  events: 9,
+  events: 10,
   score: 71.5,
   outcome: 'You found the shorted diode and left the capacitor unproved.',
   ...more,
@@ -110,6 +110,13 @@ const reading = (
 });
 
 export const events: readonly RecordedEvent[] = [
+  happened(0, 0, 'AttemptBegan', {
+    engine: 1,
+    seed: 417,
+    charge: {},
+    opened: [],
+    isDisplayLit: false,
+  }),
   happened(1, 0, 'CordPulled', {}),
   happened(2, 14_000, 'CoverRemoved', {}),
   happened(3, 31_000, 'DischargeClipFitted', { target: 'CH.2' }),

@@ -14,6 +14,13 @@ vi.setConfig({ testTimeout: 30_000 });
 /** jsdom lays nothing out, so there is nothing to scroll. */
 window.scrollTo = () => undefined;
 
+/** Nor does anything come near to view, until a test says so. */
+class NothingNear {
+  observe(): void {}
+  disconnect(): void {}
+}
+Object.assign(window, { IntersectionObserver: NothingNear });
+
 /** The code of a lazy page is fetched before the clock of a test runs. */
 const fetchCode = async (path: string): Promise<void> => {
   for (const { route } of matchRoutes(routes, path.split('?')[0] ?? path) ?? [])

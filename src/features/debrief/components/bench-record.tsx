@@ -1,30 +1,63 @@
+import { lazy, Suspense, useEffect, useState, type RefObject } from 'react';
 import type { Mark } from '../../../../shared/assessment/debrief.ts';
+import type { Attempt } from '../../../../shared/contracts/attempts.ts';
+import type { RecordedEvent } from '../../../../shared/bench/event.ts';
 import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
-import { Failed } from '../../../components/failed.tsx';
 import { Loading } from '../../../components/loading.tsx';
-import type { useEvents } from '../api/use-events.ts';
+import { WhenNear } from '../../../components/when-near.tsx';
 import { ReadingsTable } from './readings-table.tsx';
 import { Timeline } from './timeline.tsx';
 
+// The canvas is most of the code of this page, and below the first screen.
+const ReplayPanel = lazy(async () => {
+  const { ReplayPanel: loaded } = await import('../../../bench/replay/replay-panel.tsx');
+  return { default: loaded };
+});
+
+const meanwhile = (
+  <div className="min-h-[480px]">
+    <Loading what="the replay" rows={2} />
+  </div>
+);
+
 interface Props {
-  events: ReturnType<typeof useEvents>;
+  attempt: Attempt;
+  events: readonly RecordedEvent[];
   marks: readonly Mark[];
   serviceData: readonly ServiceMeasurement[];
   moment: number | null;
-  goTo: (sequence: number) => void;
+  /** shows a moment where the person looks already */ seek: (sequence: number) => void;
+  /** shows a moment and brings the replay into view */ jump: (sequence: number) => void;
+  replay: RefObject<HTMLElement | null>;
 }
 
-/** What happened on the bench, and what was measured. */
-export const BenchRecord = ({ events, marks, serviceData, moment, goTo }: Props) => {
-  if (events.isPending) return <Loading what="the timeline" />;
-  if (events.isError)
-    return (
-      <Failed what="The timeline" problem={events.error} retry={() => void events.refetch()} />
-    );
+/** What happened on the bench, watched again and in words, and what was measured. */
+export const BenchRecord = (props: Props) => {
+  const { attempt, events, marks, serviceData, moment, seek, jump, replay } = props;
+  // The address that opened this page named a moment: begin there.
+  const [opensAtMoment] = useState(moment !== null);
+  useEffect(() => {
+    if (opensAtMoment) replay.current?.focus();
+  }, [opensAtMoment, replay]);
   return (
     <>
-      <Timeline events={events.data} marks={marks} moment={moment} goTo={goTo} />
-      <ReadingsTable events={events.data} serviceData={serviceData} goTo={goTo} />
+      <section
+        ref={replay}
+        tabIndex={-1}
+        aria-labelledby="replay"
+        className="grid scroll-mt-4 gap-3 outline-none"
+      >
+        <h2 id="replay" className="text-xl font-bold">
+          Replay
+        </h2>
+        <WhenNear meanwhile={meanwhile}>
+          <Suspense fallback={meanwhile}>
+            <ReplayPanel attempt={attempt} events={events} at={moment ?? 0} onSeek={seek} />
+          </Suspense>
+        </WhenNear>
+      </section>
+      <Timeline events={events} marks={marks} moment={moment} goTo={jump} />
+      <ReadingsTable events={events} serviceData={serviceData} goTo={jump} />
     </>
   );
 };

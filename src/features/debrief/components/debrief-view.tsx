@@ -1,5 +1,5 @@
-import { lazy, Suspense } from 'react';
 import { useQuery } from '@tanstack/react-query';
+import { lazy, Suspense, useCallback, useRef } from 'react';
 import type { Attempt } from '../../../../shared/contracts/attempts.ts';
 import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
 import { Failed } from '../../../components/failed.tsx';
@@ -28,26 +28,43 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
   const debrief = useQuery(debriefQuery(attempt.id));
   const events = useEvents(attempt.id);
   const oven = useOven(attempt.content.oven);
-  const [moment, goTo] = useMoment();
+  const [moment, seek] = useMoment();
+  const replay = useRef<HTMLElement>(null);
+  const jump = useCallback(
+    (sequence: number): void => {
+      seek(sequence);
+      replay.current?.focus();
+    },
+    [seek],
+  );
   if (debrief.isPending) return <Loading what="the debrief" />;
   if (debrief.isError)
     return (
       <Failed what="The debrief" problem={debrief.error} retry={() => void debrief.refetch()} />
     );
-  const marks = debrief.data.skills.flatMap((skill) => skill.marks);
+  const { skills, faults } = debrief.data;
   return (
     <>
       <Outcome debrief={debrief.data} />
-      <Skills skills={debrief.data.skills} moment={moment} goTo={goTo} />
+      <Skills skills={skills} moment={moment} goTo={jump} />
       <Suspense fallback={<Loading what="the timeline" />}>
-        <TrueFaults faults={debrief.data.faults} definition={oven.data?.definition} />
-        <BenchRecord
-          events={events}
-          marks={marks}
-          serviceData={oven.data?.definition.serviceData ?? noServiceData}
-          moment={moment}
-          goTo={goTo}
-        />
+        <TrueFaults faults={faults} definition={oven.data?.definition} />
+        {events.isPending ? (
+          <Loading what="the timeline" />
+        ) : events.isError ? (
+          <Failed what="The timeline" problem={events.error} retry={() => void events.refetch()} />
+        ) : (
+          <BenchRecord
+            attempt={attempt}
+            events={events.data}
+            marks={skills.flatMap((skill) => skill.marks)}
+            serviceData={oven.data?.definition.serviceData ?? noServiceData}
+            moment={moment}
+            seek={seek}
+            jump={jump}
+            replay={replay}
+          />
+        )}
       </Suspense>
     </>
   );

@@ -1,16 +1,10 @@
-import { useEffect, useRef } from 'react';
+import { useState } from 'react';
 import { describeEvent } from '../../../../shared/bench/describe.ts';
 import type { RecordedEvent } from '../../../../shared/bench/event.ts';
 import type { Mark } from '../../../../shared/assessment/debrief.ts';
 import { benchClock } from '../../../components/bench-clock.ts';
+import { Checkbox } from '../../../components/checkbox.tsx';
 import { pointsText } from '../points-text.ts';
-
-interface Props {
-  events: readonly RecordedEvent[];
-  marks: readonly Mark[];
-  moment: number | null;
-  goTo: (sequence: number) => void;
-}
 
 interface LineProps {
   event: RecordedEvent;
@@ -19,49 +13,70 @@ interface LineProps {
   goTo: (sequence: number) => void;
 }
 
-const Line = ({ event, marks, isMoment, goTo }: LineProps) => {
-  const line = useRef<HTMLButtonElement>(null);
-  // A mark was pressed, or the address named this moment: the focus brings it into view.
-  useEffect(() => {
-    if (isMoment) line.current?.focus();
-  }, [isMoment]);
-  return (
-    <li>
-      <button
-        ref={line}
-        type="button"
-        aria-current={isMoment || undefined}
-        onClick={() => goTo(event.sequence)}
-        className="grid min-h-8 w-full grid-cols-[64px_1fr] gap-x-3 rounded px-3 py-1 text-left hover:bg-act-tint aria-[current=true]:bg-act-tint sm:grid-cols-[72px_1fr_auto]"
+const Line = ({ event, marks, isMoment, goTo }: LineProps) => (
+  <li className="[contain-intrinsic-height:32px] [content-visibility:auto]">
+    <button
+      type="button"
+      aria-current={isMoment ? 'step' : undefined}
+      onClick={() => goTo(event.sequence)}
+      className="grid min-h-8 w-full grid-cols-[64px_1fr] gap-x-3 rounded px-3 py-1 text-left hover:bg-act-tint aria-[current=step]:bg-act-tint sm:grid-cols-[72px_1fr_auto]"
+    >
+      <span className="pt-px font-mono text-sm text-ink-2">{benchClock(event.benchMs)}</span>
+      <span
+        className={`first-letter:uppercase ${event.type === 'HazardHappened' ? 'font-semibold text-danger' : ''}`}
       >
-        <span className="font-mono text-sm text-ink-2">{benchClock(event.benchMs)}</span>
-        <span className="first-letter:uppercase">{describeEvent(event)}</span>
-        {marks.length === 0 ? null : (
-          <span className="col-start-2 font-mono text-sm font-semibold sm:col-start-3">
-            {marks.map(({ points }) => pointsText(points)).join(' ')}
-          </span>
-        )}
-      </button>
-    </li>
+        {describeEvent(event)}
+      </span>
+      {marks.length === 0 ? null : (
+        <span className="col-start-2 font-mono text-sm font-semibold sm:col-start-3">
+          {marks.map(({ points }) => pointsText(points)).join(' ')}
+        </span>
+      )}
+    </button>
+  </li>
+);
+
+interface Props {
+  events: readonly RecordedEvent[];
+  marks: readonly Mark[];
+  moment: number | null;
+  goTo: (sequence: number) => void;
+}
+
+/** What happened on the bench, in words, by bench time: first the moments that counted, all on request. */
+export const Timeline = ({ events, marks, moment, goTo }: Props) => {
+  const [isWhole, setIsWhole] = useState(false);
+  const counted = new Set(marks.map(({ sequence }) => sequence));
+  const shown = isWhole
+    ? events
+    : events.filter(({ type, sequence }) => type === 'HazardHappened' || counted.has(sequence));
+  return (
+    <section aria-labelledby="timeline" className="grid gap-3">
+      <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
+        <h2 id="timeline" className="text-xl font-bold">
+          Timeline
+        </h2>
+        <Checkbox
+          label={`Show all ${events.length} events, not only those that counted`}
+          checked={isWhole}
+          onChange={({ target }) => setIsWhole(target.checked)}
+        />
+      </div>
+      {shown.length === 0 ? (
+        <p className="text-ink-2">No moment of this attempt earned or cost a mark.</p>
+      ) : (
+        <ol className="grid max-h-[560px] overflow-y-auto rounded-md border border-line bg-sheet py-2">
+          {shown.map((event) => (
+            <Line
+              key={event.sequence}
+              event={event}
+              marks={marks.filter(({ sequence }) => sequence === event.sequence)}
+              isMoment={moment === event.sequence}
+              goTo={goTo}
+            />
+          ))}
+        </ol>
+      )}
+    </section>
   );
 };
-
-/** All that happened on the bench, in words, by bench time. */
-export const Timeline = ({ events, marks, moment, goTo }: Props) => (
-  <section aria-labelledby="timeline" className="grid gap-3">
-    <h2 id="timeline" className="text-xl font-bold">
-      What you did
-    </h2>
-    <ol className="grid max-h-[560px] overflow-y-auto rounded-md border border-line bg-sheet py-2">
-      {events.map((event) => (
-        <Line
-          key={event.sequence}
-          event={event}
-          marks={marks.filter(({ sequence }) => sequence === event.sequence)}
-          isMoment={moment === event.sequence}
-          goTo={goTo}
-        />
-      ))}
-    </ol>
-  </section>
-);
