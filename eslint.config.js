@@ -12,12 +12,19 @@ export default tseslint.config(
     files: ['**/*.{ts,tsx}'],
     languageOptions: { parserOptions: { projectService: true } },
     rules: {
-      '@typescript-eslint/switch-exhaustiveness-check': ['error', { considerDefaultExhaustiveForUnions: false }],
+      '@typescript-eslint/switch-exhaustiveness-check': [
+        'error',
+        { considerDefaultExhaustiveForUnions: false },
+      ],
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/consistent-type-imports': 'error',
       '@typescript-eslint/naming-convention': [
         'error',
-        { selector: 'interface', format: ['PascalCase'], custom: { regex: '^I[A-Z]', match: false } },
+        {
+          selector: 'interface',
+          format: ['PascalCase'],
+          custom: { regex: '^I[A-Z]', match: false },
+        },
       ],
     },
   },
@@ -27,18 +34,31 @@ export default tseslint.config(
       'no-warning-comments': ['error', { terms: ['todo', 'fixme', 'xxx'] }],
       'no-restricted-syntax': [
         'error',
-        { selector: 'ExportAllDeclaration', message: 'No barrels: import from the file that has it.' },
+        {
+          selector: 'ExportAllDeclaration',
+          message: 'No barrels: import from the file that has it.',
+        },
       ],
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_' },
+      ],
     },
   },
   {
     files: ['shared/**/*.ts', 'server/**/*.ts', 'src/**/*.ts'],
-    rules: { 'max-lines-per-function': ['error', { max: 60, skipBlankLines: true, skipComments: true }] },
+    rules: {
+      'max-lines-per-function': ['error', { max: 60, skipBlankLines: true, skipComments: true }],
+    },
   },
   { files: ['shared/engine/index.ts'], rules: { 'no-restricted-syntax': 'off' } },
   { files: ['src/**/*.tsx'], ...hooks.configs.flat.recommended },
-  { files: ['src/**/*.tsx'], rules: { 'max-lines-per-function': ['error', { max: 120, skipBlankLines: true, skipComments: true }] } },
+  {
+    files: ['src/**/*.tsx'],
+    rules: {
+      'max-lines-per-function': ['error', { max: 120, skipBlankLines: true, skipComments: true }],
+    },
+  },
   { files: ['server/**', 'tests/**', '*.{js,ts}'], languageOptions: { globals: globals.node } },
   { files: ['**/*.cjs'], languageOptions: { globals: globals.commonjs, sourceType: 'commonjs' } },
 );
