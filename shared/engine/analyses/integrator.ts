@@ -225,13 +225,15 @@ export function stepError(integrator: Integrator, length: number, relative: numb
     for (let j = 0; j < history.length; j += 1) history[j]! += weight * rates[stage]![j]!;
   }
   residual.fill(0);
-  capacitors.forEach(({ branch }, j) => {
+  for (let j = 0; j < capacitors.length; j += 1) {
+    const { branch } = capacitors[j]!;
     residual[netlist.nodeCount + branch] = alpha[branch]! * history[j]!;
-  });
-  inductors.forEach(({ branch }, j) => {
+  }
+  for (let j = 0; j < inductors.length; j += 1) {
+    const { branch } = inductors[j]!;
     const flux = history[capacitors.length + j]!;
     residual[netlist.nodeCount + branch] = (-alpha[branch]! * flux) / (length * tableau.gamma);
-  });
+  }
   solveFactored(factors, residual, step);
   step[netlist.size] = 0;
   let worst = 0;

@@ -154,24 +154,20 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   const { machine, tableau } = integrator;
   if (walk.refusals === KINK) return startAfresh(integrator, walk, length) ?? 'refused';
   const shortest = Math.max(INSTANT, 4 * Number.EPSILON * walk.offset);
-  const refuse = (wanted: number): 'refused' => {
-    refuseStep(integrator);
-    walk.refusals += 1;
-    walk.wanted = wanted;
-    return 'refused';
-  };
   const middle = walk.base + walk.end / 2;
   if (!tryStep(integrator, walk.base + walk.offset, length, middle)) {
-    return length <= shortest ? 'unsolved' : refuse(length / 8);
+    return length <= shortest ? 'unsolved' : refuse(integrator, walk, length / 8);
   }
   const error = stepError(integrator, length, plan.relativeTolerance);
   const enough = Math.max(shortest, plan.patience * walk.offset);
-  if (error > 1 && length > enough) return refuse(nextStep(length, error, tableau.errorPower));
+  if (error > 1 && length > enough) {
+    return refuse(integrator, walk, nextStep(length, error, tableau.errorPower));
+  }
   const overdrive = overdrives(machine);
   const turn = turningAt(walk.overdrive, overdrive);
   if (turn < 1 - TURN_PRECISION && length * turn > shortest) {
     walk.refusals = 0;
-    return refuse(length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2)));
+    return refuse(integrator, walk, length * Math.max(0.01, turn * (1 + TURN_PRECISION / 2)));
   }
   const hasTurned = hasJunctionTurned(integrator);
   acceptStep(integrator);
@@ -186,6 +182,13 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   if (turn <= 1) return 'turning';
   if (!hasTurned || walk.offset >= walk.end) return 'accepted';
   return settle(integrator, walk.base + walk.offset) ?? 'accepted';
+}
+
+function refuse(integrator: Integrator, walk: Walk, wanted: number): 'refused' {
+  refuseStep(integrator);
+  walk.refusals += 1;
+  walk.wanted = wanted;
+  return 'refused';
 }
 
 /** The rates at the start were those of a circuit that had just turned a corner: finds them anew. */

@@ -103,21 +103,14 @@ function refine(machine: Machine): boolean {
   return currentLawError(machine) < 10 * KIRCHHOFF;
 }
 
-const largestAt = new WeakMap<Machine, Float64Array>();
-
 /**
  * The largest error of Kirchhoff's current law, over all nodes, as a share of the largest current
  * at that node. Expects the residual to be fresh.
  */
 export function currentLawError(machine: Machine): number {
   const { system, netlist } = machine;
-  const { nodeCount, from, to, size } = netlist;
-  const { x, residual, injected } = system;
-  let largest = largestAt.get(machine);
-  if (largest === undefined) {
-    largest = new Float64Array(size + 1);
-    largestAt.set(machine, largest);
-  }
+  const { nodeCount, from, to } = netlist;
+  const { x, residual, injected, largest } = system;
   const ground = system.groundConductance * REFERENCE;
   for (let node = 0; node < nodeCount; node += 1) {
     largest[node] = Math.max(Math.abs(injected[node]!), ground * Math.abs(x[node]!));

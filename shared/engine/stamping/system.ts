@@ -30,6 +30,7 @@ export interface System extends Layout {
   /** unknowns; index `size` is ground */ readonly x: Float64Array;
   readonly residual: Float64Array;
   readonly step: Float64Array;
+  /** room for the largest current at each node */ readonly largest: Float64Array;
 }
 
 /** Ohm. The middle, in decades, of 3 milliohm and 1e12 ohm: currents and voltages then weigh alike. */
@@ -52,6 +53,7 @@ export function createSystem(netlist: Netlist, groundConductance: number): Syste
     x: new Float64Array(size + 1),
     residual: new Float64Array(size + 1),
     step: new Float64Array(size + 1),
+    largest: new Float64Array(size + 1),
   };
   setGroundConductance(system, groundConductance);
   return system;
