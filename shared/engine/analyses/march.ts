@@ -1,38 +1,12 @@
 import type { EngineFailure } from '../circuit/circuit.ts';
-import { waveCorners, waveStepLimit } from '../circuit/wave-value.ts';
-import { switchOverdrive } from '../devices/switch.ts';
 import { fitStep, nextStep } from '../integration/step-control.ts';
-import {
-  ABSOLUTE_AMPERES,
-  ABSOLUTE_VOLTS,
-  INSTANT,
-  acceptStep,
-  hasJunctionTurned,
-  refuseStep,
-  settle,
-  stepError,
-  tryStep,
-  type Integrator,
-} from './integrator.ts';
-import type { Machine } from './machine.ts';
+import { firstStep } from './first-step.ts';
+import type { Integrator } from './integrator.ts';
 import { notConverged } from './newton.ts';
-
-/** Where to go and how carefully. Times in s, on the sources' clock. */
-export interface Plan {
-  readonly from: number;
-  readonly to: number;
-  /** moments at which something jumps that the sources do not know of */
-  readonly breaks: readonly number[];
-  /** every multiple of this is landed on; 0 for none */ readonly grid: number;
-  readonly maxStep: number;
-  /**
-   * Share of the time since the last break below which no step is forced, for the sake of rings that
-   * nobody will see: they are then damped, charge and flux being kept. 0 to follow everything.
-   */
-  readonly patience: number;
-  /** of each capacitor's voltage and inductor's current, in one step */
-  readonly relativeTolerance: number;
-}
+import { landing, longestStep, segmentEnds, type Plan } from './plan.ts';
+import { stepError } from './step-error.ts';
+import { INSTANT, acceptStep, hasJunctionTurned, refuseStep, settle, tryStep } from './steps.ts';
+import { overdrives, turningAt } from './switch-turns.ts';
 
 /** Who watches: the machine holds the solution of the moment spoken of. */
 export interface Watch {
@@ -81,27 +55,6 @@ export function march(integrator: Integrator, plan: Plan, watch: Watch): EngineF
   }
 }
 
-function segmentEnds({ sources }: Machine, plan: Plan): number[] {
-  const { from, to } = plan;
-  const inside = plan.breaks.filter((time) => time > from && time < to);
-  for (const { element, fixed } of sources) {
-    if (fixed === undefined) inside.push(...waveCorners(element.wave, from, to));
-  }
-  inside.sort((p, q) => p - q);
-  const ends: number[] = [];
-  let last = from;
-  for (const time of [...inside, to]) {
-    // corners that rounding alone keeps apart are one
-    if (time - last <= 1e-12 * Math.abs(time)) {
-      if (ends.length > 0) ends[ends.length - 1] = last = time;
-      continue;
-    }
-    ends.push(time);
-    last = time;
-  }
-  return ends;
-}
-
 /** Where a segment stands. Offsets and lengths in s. */
 interface Walk {
   readonly base: number;
@@ -133,7 +86,10 @@ function marchSegment(
     refusals: 0,
   };
   while (walk.offset < walk.end) {
-    const length = fitStep(walk.wanted, landing(plan, segment, walk.offset) - walk.offset);
+    const length = fitStep(
+      walk.wanted,
+      landing(plan, walk.base, walk.end, walk.offset) - walk.offset,
+    );
     budget.steps -= 1;
     const outcome = walkStep(integrator, plan, walk, length);
     if (outcome === 'unsolved' || budget.steps < 0) {
@@ -209,43 +165,3 @@ const KINK = 4;
 
 /** A switch turns within this share of the step in which its control crosses. */
 const TURN_PRECISION = 1e-4;
-
-const overdrives = ({ system, switches }: Machine): number[] =>
-  switches.map((state) => switchOverdrive(system, state));
-
-/** Share of the step at which the first control crosses; Infinity when none does. */
-function turningAt(before: readonly number[], after: readonly number[]): number {
-  let first = Infinity;
-  after.forEach((late, at) => {
-    const early = Math.min(0, before[at]!);
-    if (late > 0) first = Math.min(first, early / (early - late));
-  });
-  return first;
-}
-
-function landing(plan: Plan, segment: Segment, offset: number): number {
-  if (plan.grid <= 0) return segment.length;
-  const next = Math.floor((segment.base + offset) / plan.grid + 1 + 1e-6) * plan.grid;
-  return Math.min(segment.length, next - segment.base);
-}
-
-function longestStep({ sources }: Machine, plan: Plan): number {
-  let longest = plan.maxStep;
-  for (const { element, fixed } of sources) {
-    if (fixed === undefined) longest = Math.min(longest, waveStepLimit(element.wave));
-  }
-  return longest;
-}
-
-/** A step in which no state moves by more than a twentieth of itself, at the rates of the start. */
-function firstStep({ machine, state, rates }: Integrator): number {
-  const { capacitors, inductors } = machine;
-  let length = Infinity;
-  state.forEach((value, j) => {
-    const inductor = inductors[j - capacitors.length];
-    const least = inductor === undefined ? ABSOLUTE_VOLTS : ABSOLUTE_AMPERES * inductor.value;
-    const rate = Math.abs(rates[0]![j]!);
-    if (rate > 0) length = Math.min(length, (0.05 * (Math.abs(value) + 1e6 * least)) / rate);
-  });
-  return Math.max(10 * INSTANT, length);
-}

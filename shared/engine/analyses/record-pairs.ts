@@ -3,12 +3,13 @@ import { setCapacitorHistory } from '../devices/capacitor.ts';
 import { setInductorHistory } from '../devices/inductor.ts';
 import { createFactors, factor, solveFactored, type Factors } from '../linear/factors.ts';
 import { createSystem, type System } from '../stamping/system.ts';
-import { INSTANT, type Integrator } from './integrator.ts';
+import type { Integrator } from './integrator.ts';
 import type { Machine } from './machine.ts';
 import type { Watch } from './march.ts';
 import { setSourceSlopes } from './set-source-slopes.ts';
 import { stampFixed } from './stamp-at-rest.ts';
 import { stampStage } from './stamp-stage.ts';
+import { INSTANT } from './steps.ts';
 
 /** Sampled voltages: values[p] are those of the p-th pair, one for each time. */
 export interface Trace {

@@ -1,5 +1,6 @@
 import type { Storage } from '../circuit/circuit.ts';
-import { inductorCurrent, type Integrator } from './integrator.ts';
+import { inductorCurrent } from './inductor-current.ts';
+import type { Integrator } from './integrator.ts';
 import type { Machine } from './machine.ts';
 
 /** Sets the state of every capacitor and inductor from what it held, its own start, or nothing. */

@@ -108,7 +108,8 @@ function watchOver(
       const isInside = middle > window.from && middle < window.to;
       for (const one of all) {
         if (isInside) gather(one, length, weights);
-        const end = one.atStage[weights.length - 1]!;
+        // what stands now, which is the last stage unless a junction turned and it was found anew
+        const end = one.value();
         if (isInside) meetPeak(one, end);
         one.atStage[0] = end;
       }
