@@ -60,6 +60,19 @@ describe('the debrief', () => {
     expect(moment).toHaveTextContent('+20');
   });
 
+  it('makes one line of marks that say the same, with a button for each moment', async () => {
+    handedIn();
+    const { user, address } = await renderApp(path);
+    await timeline();
+    const skills = within(screen.getByRole('region', { name: 'Six skills' }));
+    expect(skills.getByText('You waited until the reading stood.')).toBeInTheDocument();
+    expect(skills.getByText('+30')).toBeInTheDocument();
+    await user.click(
+      skills.getByRole('button', { name: 'You waited until the reading stood. At 04:04' }),
+    );
+    await waitFor(() => expect(address()).toBe(`${path}?at=8`));
+  });
+
   it('offers no jump for what was never done', async () => {
     handedIn();
     await renderApp(path);
@@ -86,8 +99,8 @@ describe('the debrief', () => {
     const lines = () =>
       within(screen.getByRole('region', { name: 'Timeline' })).getAllByRole('button');
     await timeline();
-    // Marks point at events 1, 4, 5, 8 and 9.
-    expect(lines()).toHaveLength(5);
+    // Marks point at events 1, 4, 5, 7, 8 and 9.
+    expect(lines()).toHaveLength(6);
     await user.click(screen.getByRole('checkbox', { name: /Show all 10 events/ }));
     expect(lines()).toHaveLength(10);
     expect(lines()[0]).toHaveTextContent('job begun');

@@ -153,7 +153,10 @@ export const debrief: Debrief = {
     {
       skill: 'measure',
       score: 90,
-      marks: [{ points: 30, why: 'You measured the diode on the right range.', sequence: 8 }],
+      marks: [
+        { points: 15, why: 'You waited until the reading stood.', sequence: 7 },
+        { points: 15, why: 'You waited until the reading stood.', sequence: 8 },
+      ],
     },
     { skill: 'reason', score: 85, marks: [{ points: 25, why: 'You named D1.', sequence: 9 }] },
     { skill: 'repair and verify', score: null, marks: [] },

@@ -2,10 +2,8 @@ import { lazy, Suspense, useEffect, useState, type RefObject } from 'react';
 import type { Mark } from '../../../../shared/assessment/debrief.ts';
 import type { Attempt } from '../../../../shared/contracts/attempts.ts';
 import type { RecordedEvent } from '../../../../shared/bench/event.ts';
-import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
 import { Loading } from '../../../components/loading.tsx';
 import { WhenNear } from '../../../components/when-near.tsx';
-import { ReadingsTable } from './readings-table.tsx';
 import { Timeline } from './timeline.tsx';
 
 // The canvas is most of the code of this page, and below the first screen.
@@ -24,16 +22,15 @@ interface Props {
   attempt: Attempt;
   events: readonly RecordedEvent[];
   marks: readonly Mark[];
-  serviceData: readonly ServiceMeasurement[];
   moment: number | null;
   /** shows a moment where the person looks already */ seek: (sequence: number) => void;
   /** shows a moment and brings the replay into view */ jump: (sequence: number) => void;
   replay: RefObject<HTMLElement | null>;
 }
 
-/** What happened on the bench, watched again and in words, and what was measured. */
+/** What happened on the bench, watched again and in words. */
 export const BenchRecord = (props: Props) => {
-  const { attempt, events, marks, serviceData, moment, seek, jump, replay } = props;
+  const { attempt, events, marks, moment, seek, jump, replay } = props;
   // The address that opened this page named a moment: begin there.
   const [opensAtMoment] = useState(moment !== null);
   useEffect(() => {
@@ -57,7 +54,6 @@ export const BenchRecord = (props: Props) => {
         </WhenNear>
       </section>
       <Timeline events={events} marks={marks} moment={moment} goTo={jump} />
-      <ReadingsTable events={events} serviceData={serviceData} goTo={jump} />
     </>
   );
 };

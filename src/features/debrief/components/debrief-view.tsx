@@ -16,6 +16,10 @@ const BenchRecord = lazy(async () => {
   const { BenchRecord: loaded } = await import('./bench-record.tsx');
   return { default: loaded };
 });
+const ReadingsTable = lazy(async () => {
+  const { ReadingsTable: loaded } = await import('./readings-table.tsx');
+  return { default: loaded };
+});
 const TrueFaults = lazy(async () => {
   const { TrueFaults: loaded } = await import('./true-faults.tsx');
   return { default: loaded };
@@ -37,6 +41,8 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
     },
     [seek],
   );
+  const timeOf = (sequence: number): number | undefined =>
+    events.data?.find((event) => event.sequence === sequence)?.benchMs;
   if (debrief.isPending) return <Loading what="the debrief" />;
   if (debrief.isError)
     return (
@@ -46,9 +52,8 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
   return (
     <>
       <Outcome debrief={debrief.data} />
-      <Skills skills={skills} moment={moment} goTo={jump} />
+      <Skills skills={skills} moment={moment} timeOf={timeOf} goTo={jump} />
       <Suspense fallback={<Loading what="the timeline" />}>
-        <TrueFaults faults={faults} definition={oven.data?.definition} />
         {events.isPending ? (
           <Loading what="the timeline" />
         ) : events.isError ? (
@@ -58,13 +63,20 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
             attempt={attempt}
             events={events.data}
             marks={skills.flatMap((skill) => skill.marks)}
-            serviceData={oven.data?.definition.serviceData ?? noServiceData}
             moment={moment}
             seek={seek}
             jump={jump}
             replay={replay}
           />
         )}
+        <TrueFaults faults={faults} definition={oven.data?.definition} />
+        {events.isSuccess ? (
+          <ReadingsTable
+            events={events.data}
+            serviceData={oven.data?.definition.serviceData ?? noServiceData}
+            goTo={jump}
+          />
+        ) : null}
       </Suspense>
     </>
   );

@@ -1,36 +1,6 @@
-import type { Mark, SkillResult } from '../../../../shared/assessment/debrief.ts';
-import { pointsText } from '../points-text.ts';
-
-interface MarkProps {
-  mark: Mark;
-  moment: number | null;
-  goTo: (sequence: number) => void;
-}
-
-const markClasses = 'grid w-full grid-cols-[36px_1fr] gap-x-2 rounded px-2 py-1 text-left';
-
-const MarkLine = ({ mark, moment, goTo }: MarkProps) => {
-  const { sequence } = mark;
-  const content = (
-    <>
-      <span className="text-right font-mono text-sm font-semibold">{pointsText(mark.points)}</span>
-      <span className={mark.sequence === null ? '' : 'underline decoration-1 underline-offset-2'}>
-        {mark.why}
-      </span>
-    </>
-  );
-  if (sequence === null) return <div className={markClasses}>{content}</div>;
-  return (
-    <button
-      type="button"
-      onClick={() => goTo(sequence)}
-      aria-current={moment === sequence || undefined}
-      className={`${markClasses} min-h-8 text-act hover:bg-act-tint aria-[current=true]:bg-act-tint`}
-    >
-      {content}
-    </button>
-  );
-};
+import type { SkillResult } from '../../../../shared/assessment/debrief.ts';
+import { markGroups } from '../mark-groups.ts';
+import { MarkLine, type Jump } from './mark-line.tsx';
 
 const Bar = ({ score }: { score: number }) => (
   <svg aria-hidden viewBox="0 0 100 6" preserveAspectRatio="none" className="h-1.5 w-full">
@@ -39,8 +9,8 @@ const Bar = ({ score }: { score: number }) => (
   </svg>
 );
 
-const Skill = ({ result, ...at }: { result: SkillResult } & Omit<MarkProps, 'mark'>) => (
-  <li className="grid content-start gap-2">
+const Skill = ({ result, ...jump }: { result: SkillResult } & Jump) => (
+  <li className="mb-7 grid break-inside-avoid gap-2">
     <div className="flex items-baseline justify-between gap-3">
       <h3 className="text-lg font-bold first-letter:uppercase">{result.skill}</h3>
       <p className="font-mono text-lg font-semibold">
@@ -56,9 +26,9 @@ const Skill = ({ result, ...at }: { result: SkillResult } & Omit<MarkProps, 'mar
       <p className="text-ink-2">This attempt gave nothing to judge it by.</p>
     ) : (
       <ul className="-mx-2 grid gap-0.5">
-        {result.marks.map((mark, index) => (
-          <li key={index}>
-            <MarkLine mark={mark} {...at} />
+        {markGroups(result.marks).map((group) => (
+          <li key={group.why}>
+            <MarkLine group={group} {...jump} />
           </li>
         ))}
       </ul>
@@ -66,19 +36,15 @@ const Skill = ({ result, ...at }: { result: SkillResult } & Omit<MarkProps, 'mar
   </li>
 );
 
-interface Props extends Omit<MarkProps, 'mark'> {
-  skills: readonly SkillResult[];
-}
-
-/** The six skills; every mark that points at a moment is a button that goes there. */
-export const Skills = ({ skills, ...at }: Props) => (
+/** The six skills, with every mark and the moments that earned it. */
+export const Skills = ({ skills, ...jump }: { skills: readonly SkillResult[] } & Jump) => (
   <section aria-labelledby="skills" className="grid gap-4">
     <h2 id="skills" className="text-xl font-bold">
       Six skills
     </h2>
-    <ul className="grid gap-x-10 gap-y-7 md:grid-cols-2">
+    <ul className="-mb-7 gap-x-10 md:columns-2">
       {skills.map((result) => (
-        <Skill key={result.skill} result={result} {...at} />
+        <Skill key={result.skill} result={result} {...jump} />
       ))}
     </ul>
   </section>

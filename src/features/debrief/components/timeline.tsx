@@ -14,7 +14,7 @@ interface LineProps {
 }
 
 const Line = ({ event, marks, isMoment, goTo }: LineProps) => (
-  <li className="[contain-intrinsic-height:32px] [content-visibility:auto]">
+  <li>
     <button
       type="button"
       aria-current={isMoment ? 'step' : undefined}
