@@ -1,12 +1,10 @@
 import { operatingPoint } from '../analyses/operating-point.ts';
-import { phasor } from '../analyses/phasor.ts';
+import { phasor, type Complex } from '../analyses/phasor.ts';
 import { transient } from '../analyses/transient.ts';
 import type { Circuit, EngineFailure, Result } from '../circuit/circuit.ts';
 import { floatingNode } from '../circuit/loops-and-islands.ts';
 import type { Deck } from './deck.ts';
 import { holdIslands } from './hold-islands.ts';
-
-export type Complex = readonly [number, number];
 
 /** What a deck asked for. Keys are `v(node)` in V and `i(source)` in A, positive into its + node. */
 export interface DeckAnswer {

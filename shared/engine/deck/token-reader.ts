@@ -48,6 +48,8 @@ export class TokenReader {
   /** A node's name; `gnd` is ground, as other programs have it. */
   node(what: string): string {
     const name = this.word(what);
+    // not a key that a plain record can have
+    if (name === '__proto__') this.fail(`${what} cannot be ${quote(name)}`);
     return name === 'gnd' ? '0' : name;
   }
 

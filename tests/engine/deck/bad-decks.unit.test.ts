@@ -21,6 +21,7 @@ describe('a line that is wrong', () => {
     ['= a 0 1', 'the name of an element expected'],
     ['R1', 'the first node of r1 is missing'],
     ['R1 a', 'the second node of r1 is missing'],
+    ['R1 a __proto__ 1', 'the second node of r1 cannot be "__proto__"'],
     ['R1 a 0', 'the resistance of r1 is missing'],
     ['R1 a 0 1k5', '"1k5" is not a number'],
     ['R1 a 0 10q', '"10q" has an unknown suffix "q"'],

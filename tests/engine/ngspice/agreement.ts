@@ -1,5 +1,6 @@
 import type { Circuit } from '../../../shared/engine/circuit/circuit.ts';
-import type { Complex, DeckAnswer } from '../../../shared/engine/deck/solve-deck.ts';
+import type { Complex } from '../../../shared/engine/analyses/phasor.ts';
+import type { DeckAnswer } from '../../../shared/engine/deck/solve-deck.ts';
 
 /** How far a signal is from the reference where it is furthest; a ratio above 1 is too far. */
 export interface Departure {

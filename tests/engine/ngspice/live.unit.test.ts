@@ -7,6 +7,7 @@ import { expectedOf, soundDeck } from './expected.ts';
 import {
   randomDiodes,
   randomMesh,
+  randomNetwork,
   randomRectifier,
   randomWindings,
   type RandomCircuit,
@@ -17,7 +18,8 @@ import { referenceJob } from './reference-job.ts';
 const FAMILIES: readonly (readonly [string, (seed: number) => RandomCircuit, number])[] = [
   ['mesh', randomMesh, 100],
   ['diodes', randomDiodes, 100],
-  ['windings', randomWindings, 40],
+  ['windings', randomWindings, 30],
+  ['network', randomNetwork, 30],
   ['rectifier', randomRectifier, 20],
 ];
 

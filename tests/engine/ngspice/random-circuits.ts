@@ -223,3 +223,71 @@ export function randomRectifier(seed: number): RandomCircuit {
   ];
   return { circuit: { elements }, analyses: ['.tran 0.37m 40m'], longestStep: '2u' };
 }
+
+/**
+ * Resistors, capacitors and inductors anywhere, among them capacitors in loops with a source and
+ * inductors in series with a current source: every current those force must come out as well.
+ */
+export function randomNetwork(seed: number): RandomCircuit {
+  const draws = new Draws(seed);
+  const size = draws.whole(3, 8);
+  const node = (index: number): string => (index === 0 ? '0' : `m${index}`);
+  const any = (): readonly [string, string] => {
+    const from = draws.whole(0, size);
+    return [node(from), node((from + draws.whole(1, size)) % (size + 1))];
+  };
+  const elements: Element[] = [];
+  for (let index = 1; index <= size; index += 1) {
+    const onto = node(draws.whole(0, index - 1));
+    elements.push(resistor(`tree ${index}`, node(index), onto, draws.decades(30, 3e3)));
+  }
+  for (let index = 1; index <= draws.whole(1, 4); index += 1) {
+    const capacitance = draws.decades(1e-8, 1e-5);
+    elements.push({ kind: 'capacitor', name: `c${index}`, nodes: any(), capacitance });
+  }
+  for (let index = 1; index <= draws.whole(1, 3); index += 1) {
+    const inductor = { kind: 'inductor', inductance: draws.decades(1e-3, 1) } as const;
+    const seriesResistance = draws.value(1, 30);
+    elements.push({ ...inductor, name: `l${index}`, nodes: any(), seriesResistance });
+  }
+  const capacitance = draws.decades(1e-8, 1e-6);
+  elements.push({ kind: 'capacitor', name: 'across', nodes: ['s', node(1)], capacitance });
+  elements.push(resistor('lead', 's', node(draws.whole(1, size)), draws.decades(10, 1e3)));
+  elements.push({
+    kind: 'voltage-source',
+    name: 'v1',
+    nodes: ['s', '0'],
+    ac: { magnitude: draws.value(1, 10), phaseDegrees: draws.value(-180, 180) },
+    wave: {
+      shape: 'pulse',
+      low: draws.value(-10, 10),
+      high: draws.value(-10, 10),
+      delay: draws.value(1e-3, 4e-3),
+      rise: draws.decades(3e-5, 1e-3),
+      fall: draws.decades(3e-5, 1e-3),
+      width: draws.value(2e-3, 6e-3),
+      period: draws.value(9e-3, 20e-3),
+    },
+  });
+  elements.push({
+    kind: 'current-source',
+    name: 'i1',
+    nodes: ['0', 'j'],
+    wave: {
+      shape: 'sine',
+      offset: draws.value(-0.01, 0.01),
+      amplitude: draws.value(0, 0.02),
+      frequency: draws.value(50, 400),
+      delay: 0,
+      damping: draws.value(0, 50),
+      phaseDegrees: draws.value(-180, 180),
+    },
+  });
+  const inductance = draws.decades(1e-3, 0.1);
+  elements.push({ kind: 'inductor', name: 'in line', nodes: ['j', node(size)], inductance });
+  return {
+    circuit: { elements },
+    analyses: ['.op', '.ac dec 2 10 100k', '.tran 0.21m 21m'],
+    longestStep: '1u',
+  };
+}
