@@ -7,6 +7,7 @@ import type { AttemptRules } from './attempts/attempt-rules.ts';
 import type { AttemptStore } from './attempts/attempt.ts';
 import { attemptsRoutes } from './attempts/attempts-routes.ts';
 import { BenchKeeper } from './attempts/bench-keeper.ts';
+import type { Judge } from './attempts/judge.ts';
 import { ReadService } from './attempts/read-service.ts';
 import { StartService } from './attempts/start-service.ts';
 import type { ApiRoute } from './http/api-route.ts';
@@ -29,6 +30,7 @@ export interface RouteDeps {
   ovens: OvenLibrary;
   passwords: Passwords;
   rules: AttemptRules;
+  judge: Judge;
   clock: () => Date;
   drawSeed: () => number;
   isDatabaseUp: () => Promise<boolean>;
@@ -37,6 +39,7 @@ export interface RouteDeps {
 /** The table of all routes of the API. */
 export function makeRoutes(deps: RouteDeps): ApiRoute[] {
   const { accounts, sessions, people, scenarios, attempts, ovens, passwords, rules, clock } = deps;
+  const { engineVersion } = rules;
   const benches = new BenchKeeper(rules, ovens);
   return [
     ...healthRoutes(deps.isDatabaseUp),
@@ -47,9 +50,9 @@ export function makeRoutes(deps: RouteDeps): ApiRoute[] {
       new JobsService(scenarios, ovens),
     ),
     ...attemptsRoutes({
-      start: new StartService({ ...deps, benches }),
+      start: new StartService({ ...deps, engineVersion, benches }),
       read: new ReadService(attempts),
-      append: new AppendService(attempts, rules, benches, clock),
+      append: new AppendService({ ...deps, engineVersion, benches }),
     }),
     ...peopleRoutes(people),
   ];

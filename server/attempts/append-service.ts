@@ -7,9 +7,9 @@ import type { appendEvents } from '../../shared/contracts/attempts.ts';
 import type { Caller } from '../http/caller.ts';
 import { done, refused, type Outcome, type Refused } from '../outcome.ts';
 import { isOwner } from './attempt-access.ts';
-import type { AttemptRules } from './attempt-rules.ts';
 import type { AttemptState, AttemptStore, LockedAttempt } from './attempt.ts';
 import type { Bench, BenchKeeper } from './bench-keeper.ts';
+import type { Judge } from './judge.ts';
 
 export type Batch = z.output<typeof appendEvents.body>;
 
@@ -63,16 +63,26 @@ interface Appended {
   /** null: nothing was new */ bench: Bench | null;
 }
 
+export interface AppendServiceDeps {
+  attempts: AttemptStore;
+  judge: Judge;
+  /** of the rules that judge */ engineVersion: number;
+  benches: BenchKeeper;
+  clock: () => Date;
+}
+
 /** Takes events into the record: stored and judged first, acknowledged after. */
 export class AppendService {
   readonly #store: AttemptStore;
-  readonly #rules: AttemptRules;
+  readonly #judge: Judge;
+  readonly #engineVersion: number;
   readonly #benches: BenchKeeper;
   readonly #clock: () => Date;
 
-  constructor(store: AttemptStore, rules: AttemptRules, benches: BenchKeeper, clock: () => Date) {
-    this.#store = store;
-    this.#rules = rules;
+  constructor({ attempts, judge, engineVersion, benches, clock }: AppendServiceDeps) {
+    this.#store = attempts;
+    this.#judge = judge;
+    this.#engineVersion = engineVersion;
     this.#benches = benches;
     this.#clock = clock;
   }
@@ -133,7 +143,7 @@ export class AppendService {
     const { attempt } = locked;
     const bench = await this.#benches.standing(locked);
     if (!bench) return refused('not-found', `The oven ${attempt.content.oven} is not available.`);
-    const verified = this.#rules.verify(bench.setup, bench.state, events);
+    const verified = await this.#judge.verify(bench, bench.state, events);
     if (!verified.ok) return refuseEvents(verified, events, batch.events.length - events.length);
     const at = this.#clock();
     const recorded = record(events, attempt.next, at);
@@ -147,21 +157,21 @@ export class AppendService {
       checkpoint: isCheckpointDue(attempt, next)
         ? {
             sequence: next - 1,
-            engineVersion: this.#rules.engineVersion,
+            engineVersion: this.#engineVersion,
             state: verified.state,
           }
         : null,
     });
-    return done({ next, bench: { setup: bench.setup, state: verified.state } });
+    return done({ next, bench: { ...bench, state: verified.state } });
   }
 
   async #assess(
     locked: LockedAttempt,
-    { setup }: Bench,
+    bench: Bench,
     recorded: readonly RecordedEvent[],
   ): Promise<Debrief> {
     const earlier = await locked.eventsFrom(0);
-    return this.#rules.assess(setup, [...earlier, ...recorded]);
+    return this.#judge.assess(bench, [...earlier, ...recorded]);
   }
 }
 

@@ -1,11 +1,10 @@
 import type { BenchState } from '../../shared/bench/bench-state.ts';
-import type { Setup } from '../../shared/bench/setup.ts';
 import type { OvenLibrary } from '../ovens/oven-library.ts';
 import type { AttemptRules } from './attempt-rules.ts';
 import type { LockedAttempt, PinnedAttempt } from './attempt.ts';
+import type { BenchSetup } from './judge.ts';
 
-export interface Bench {
-  setup: Setup;
+export interface Bench extends BenchSetup {
   state: BenchState;
 }
 
@@ -32,9 +31,11 @@ export class BenchKeeper {
   }
 
   /** The fixed side of an attempt; null when its oven could not be read at start. */
-  setUp({ content, seed }: Pick<PinnedAttempt, 'content' | 'seed'>): Setup | null {
+  setUp({ content, seed }: Pick<PinnedAttempt, 'content' | 'seed'>): BenchSetup | null {
     const oven = this.#ovens.find(content.oven);
-    return oven && this.#rules.setUp(oven.definition, content, seed);
+    if (!oven) return null;
+    const { definition } = oven;
+    return { definition, content, seed, setup: this.#rules.setUp(definition, content, seed) };
   }
 
   /** The bench as the attempt stands; null when its oven could not be read at start. */
@@ -42,11 +43,11 @@ export class BenchKeeper {
     const { attempt } = locked;
     const kept = this.#kept.get(attempt.id);
     if (kept?.next === attempt.next) return kept;
-    const setup = this.setUp(attempt);
-    if (!setup) return null;
+    const bench = this.setUp(attempt);
+    if (!bench) return null;
     const checkpoint = await locked.newestCheckpoint(this.#rules.engineVersion);
     const events = await locked.eventsFrom(checkpoint ? checkpoint.sequence + 1 : 0);
-    return { setup, state: this.#rules.fold(setup, events, checkpoint?.state ?? null) };
+    return { ...bench, state: this.#rules.fold(bench.setup, events, checkpoint?.state ?? null) };
   }
 
   /** Call after the events are stored, never before. */

@@ -5,9 +5,9 @@ import { newSecret, secretHash } from '../accounts/secret-hash.ts';
 import type { Caller, Member, SignedInCaller } from '../http/caller.ts';
 import { done, refused, type Outcome } from '../outcome.ts';
 import type { PublishedScenario, ScenarioStore } from '../scenarios/scenario.ts';
-import type { AttemptRules } from './attempt-rules.ts';
 import type { AttemptRecord, AttemptStore, Owner } from './attempt.ts';
 import type { BenchKeeper } from './bench-keeper.ts';
+import type { Judge } from './judge.ts';
 import { presentAttempt } from './present-attempt.ts';
 
 export interface Visit {
@@ -24,7 +24,8 @@ interface Start {
 export interface StartServiceDeps {
   attempts: AttemptStore;
   scenarios: ScenarioStore;
-  rules: AttemptRules;
+  judge: Judge;
+  /** of the rules that judge */ engineVersion: number;
   benches: BenchKeeper;
   clock: () => Date;
   /** a whole number from 0 to 2^31 - 1 */ drawSeed: () => number;
@@ -109,12 +110,12 @@ export class StartService {
   }
 
   async #begin(owner: Owner, start: Start): Promise<Outcome<AttemptRecord>> {
-    const { rules, benches, attempts, clock, drawSeed } = this.#deps;
+    const { judge, engineVersion, benches, attempts, clock, drawSeed } = this.#deps;
     const { content, scenario, versionId } = start;
     const seed = drawSeed();
-    const setup = benches.setUp({ content, seed });
-    if (!setup) return refused('not-found', `The oven ${content.oven} is not available.`);
-    const { event, state } = rules.begin(setup);
+    const bench = benches.setUp({ content, seed });
+    if (!bench) return refused('not-found', `The oven ${content.oven} is not available.`);
+    const { event, state } = await judge.begin(bench);
     const startedAt = clock();
     const record = await attempts.create({
       id: randomUUID(),
@@ -123,12 +124,12 @@ export class StartService {
       scenarioVersion: versionId,
       seed,
       content,
-      engineVersion: rules.engineVersion,
+      engineVersion,
       startedAt,
       first: { ...event, sequence: 0, recordedAt: startedAt.toISOString() },
       state,
     });
-    benches.keep(record.id, record.next, { setup, state });
+    benches.keep(record.id, record.next, { ...bench, state });
     return done(record);
   }
 }

@@ -3,6 +3,7 @@ import { AppendService } from '../../server/attempts/append-service.ts';
 import { attemptRules, type AttemptRules } from '../../server/attempts/attempt-rules.ts';
 import type { AttemptRecord, AttemptStore } from '../../server/attempts/attempt.ts';
 import { BenchKeeper } from '../../server/attempts/bench-keeper.ts';
+import { directJudge } from '../../server/attempts/judge.ts';
 import type { Caller } from '../../server/http/caller.ts';
 import type { OvenLibrary } from '../../server/ovens/oven-library.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
@@ -40,7 +41,14 @@ export async function openDesk(
 ): Promise<Desk> {
   const store = new MemoryAttempts();
   const clock = () => new Date('2026-01-05T08:30:00Z');
-  const service = () => new AppendService(store, rules, new BenchKeeper(rules, ovens), clock);
+  const service = () =>
+    new AppendService({
+      attempts: store,
+      judge: directJudge(rules),
+      engineVersion: rules.engineVersion,
+      benches: new BenchKeeper(rules, ovens),
+      clock,
+    });
   const append = service();
   const hands = handsAtHum(seed);
   const [first] = hands.events();

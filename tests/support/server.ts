@@ -2,6 +2,7 @@ import request, { type Test } from 'supertest';
 import { Passwords } from '../../server/accounts/passwords.ts';
 import { createApp, type AppDeps } from '../../server/app.ts';
 import { attemptRules } from '../../server/attempts/attempt-rules.ts';
+import { directJudge } from '../../server/attempts/judge.ts';
 import { makeDatabase, type Database } from '../../server/database/data-source.ts';
 import { isDatabaseUp } from '../../server/database/is-up.ts';
 import { openDatabase } from '../../server/database/open-database.ts';
@@ -79,6 +80,7 @@ export async function openTestServer(more: Partial<AppDeps> = {}): Promise<TestS
     ovens: await readAllOvens(),
     passwords,
     rules: attemptRules,
+    judge: directJudge(attemptRules),
     clock: () => new Date(),
     drawSeed: () => testSeed,
     isDatabaseUp: () => isDatabaseUp(database),

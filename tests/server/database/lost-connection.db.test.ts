@@ -9,6 +9,7 @@ import { hum } from '../../support/server-content.ts';
 import { silent } from '../../support/database.ts';
 import { openGate, type Gate } from '../../support/server-gate.ts';
 import { openTestServer, testSeed, type TestServer } from '../../support/server.ts';
+import { directJudge } from '../../../server/attempts/judge.ts';
 import { attemptRules } from '../../../server/attempts/attempt-rules.ts';
 
 let server: TestServer;
@@ -81,7 +82,7 @@ test('a connection cut in the middle of an append stores nothing, and sent again
       return attemptRules.verify(...args);
     },
   };
-  const { as } = gatedServer({ rules });
+  const { as } = gatedServer({ rules, judge: directJudge(rules) });
   const id = await begin(as);
   const events = handsAtHum(testSeed).does('OpenDoor', {});
   const body = { writer: await server.personId('tom'), epoch: 0, from: 1, events };
