@@ -11,6 +11,8 @@ export interface Integrator {
   readonly state: Float64Array;
   readonly nextState: Float64Array;
   /** dy/dt by stage; the first is that of the state itself */ readonly rates: Float64Array[];
+  /** V by which the rates of flux in the first stage may be off, for want of digits in the flux */
+  rateNoise: number;
   /** the solution at the start of the step, to fall back to */ readonly startX: Float64Array;
   readonly startJunctions: Float64Array;
   /** S of each junction there */ readonly startConductances: Float64Array;
@@ -29,6 +31,7 @@ export function createIntegrator(machine: Machine, tableau: Tableau): Integrator
     state: new Float64Array(count),
     nextState: new Float64Array(count),
     rates: Array.from({ length: tableau.stages }, () => new Float64Array(count)),
+    rateNoise: 0,
     startX: machine.system.x.slice(),
     startJunctions: new Float64Array(machine.junctions.length),
     startConductances: new Float64Array(machine.junctions.length),

@@ -134,7 +134,7 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   // a step cut short by a landing says little against the one that was wanted
   const basis = Math.max(length, Math.min(walk.wanted, 2 * length));
   const next = Math.max(nextStep(basis, error, tableau.errorPower), plan.patience * walk.offset);
-  walk.wanted = Math.min(walk.longest, next);
+  walk.wanted = Math.min(walk.longest, Math.max(shortest, next));
   if (turn <= 1) return 'turning';
   if (!hasTurned || walk.offset >= walk.end) return 'accepted';
   return settle(integrator, walk.base + walk.offset) ?? 'accepted';
@@ -143,7 +143,7 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
 function refuse(integrator: Integrator, walk: Walk, wanted: number): 'refused' {
   refuseStep(integrator);
   walk.refusals += 1;
-  walk.wanted = wanted;
+  walk.wanted = Math.max(INSTANT, wanted);
   return 'refused';
 }
 

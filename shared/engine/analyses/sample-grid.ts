@@ -9,15 +9,20 @@ export interface GridSamples {
   currents: Record<string, number[]>;
 }
 
-/** Keeps every node and every voltage source's and inductor's current at multiples of `step` from `first`. */
+/**
+ * Keeps every node and every voltage source's and inductor's current at multiples of `step` from
+ * `first`. `begin` takes what the machine holds as the sample at 0, in place of the moment after it.
+ */
 export function sampleGrid(
   machine: Machine,
   step: number,
   first: number,
-): { samples: GridSamples; watch: Watch } {
+): { samples: GridSamples; watch: Watch; begin(): void } {
   const { netlist, system } = machine;
   const samples: GridSamples = { time: [], voltages: { '0': [] }, currents: {} };
-  if (step <= 0) return { samples: { time: [], voltages: {}, currents: {} }, watch: {} };
+  if (step <= 0) {
+    return { samples: { time: [], voltages: {}, currents: {} }, watch: {}, begin: () => undefined };
+  }
   const kept: { values: number[]; at: number; unit: number }[] = [];
   netlist.nodeNames.forEach((name, node) => {
     samples.voltages[name] = [];
@@ -35,11 +40,13 @@ export function sampleGrid(
     for (const { values, at, unit } of kept) values.push(system.x[at]! / unit);
   };
   let lastIndex = -1;
+  const begin = (): void => {
+    lastIndex = 0;
+    put(0);
+  };
   const watch: Watch = {
     onMoment: (time) => {
-      if (time !== 0 || lastIndex >= 0) return;
-      lastIndex = 0;
-      put(0);
+      if (time === 0 && lastIndex < 0) begin();
     },
     onStep: (base, offset) => {
       const index = Math.round((base + offset) / step);
@@ -49,5 +56,5 @@ export function sampleGrid(
       put(index * step);
     },
   };
-  return { samples, watch };
+  return { samples, watch, begin };
 }

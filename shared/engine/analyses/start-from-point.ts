@@ -1,6 +1,13 @@
-import type { Circuit, Element, EngineFailure, NodeName } from '../circuit/circuit.ts';
+import type {
+  Circuit,
+  Element,
+  EngineFailure,
+  NodeName,
+  OperatingPoint,
+} from '../circuit/circuit.ts';
 import type { Integrator } from './integrator.ts';
-import { createMachine, type EngineOptions } from './machine.ts';
+import { REFERENCE } from '../stamping/system.ts';
+import { createMachine, type EngineOptions, type Machine } from './machine.ts';
 import { solveAtRest } from './operating-point.ts';
 import { readPoint } from './read-point.ts';
 import { loadStorage } from './storage.ts';
@@ -29,8 +36,17 @@ export function startFromPoint(
     voltages[name] = point.voltages[nodes[0]]! - point.voltages[nodes[1]]!;
   }
   loadStorage(integrator, { voltages, currents: point.currents });
+  takeOver(integrator.machine, point);
   integrator.machine.switches.forEach((state, at) => (state.isOn = made.value.switches[at]!.isOn));
   return undefined;
+}
+
+/** Leaves the point as the machine's own solution. */
+function takeOver({ netlist, system }: Machine, point: OperatingPoint): void {
+  netlist.nodeNames.forEach((name, node) => (system.x[node] = point.voltages[name]!));
+  netlist.branches.forEach(({ name }, k) => {
+    system.x[netlist.nodeCount + k] = point.currents[name]! * REFERENCE;
+  });
 }
 
 function withHeldNodes(circuit: Circuit, initial: Readonly<Record<NodeName, number>>): Circuit {

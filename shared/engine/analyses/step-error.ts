@@ -18,6 +18,7 @@ export function stepError(integrator: Integrator, length: number, relative: numb
     const weight = length * tableau.errorWeights[stage]!;
     for (let j = 0; j < history.length; j += 1) history[j]! += weight * rates[stage]![j]!;
   }
+  ignoreNoise(integrator, length);
   residual.fill(0);
   for (let j = 0; j < capacitors.length; j += 1) {
     const { branch } = capacitors[j]!;
@@ -44,6 +45,19 @@ export function stepError(integrator: Integrator, length: number, relative: numb
     worst = Math.max(worst, error / (ABSOLUTE_AMPERES + relative * size));
   }
   return Number.isNaN(worst) ? Infinity : worst;
+}
+
+/** Takes off the estimate what rounding alone puts on it: perfect coupling turns that into current. */
+function ignoreNoise({ machine, tableau, history, rateNoise }: Integrator, length: number): void {
+  const { errorWeights } = tableau;
+  let noise = Math.abs(errorWeights[0]!) * rateNoise;
+  for (let stage = 1; stage < errorWeights.length; stage += 1) {
+    noise += Math.abs(errorWeights[stage]!) * machine.voltageNoise;
+  }
+  for (let j = machine.capacitors.length; j < history.length; j += 1) {
+    const size = Math.max(0, Math.abs(history[j]!) - length * noise);
+    history[j] = Math.sign(history[j]!) * size;
+  }
 }
 
 /** A current that has fallen to a ten-thousandth of what it was need not keep all its digits. */

@@ -33,6 +33,7 @@ export function settle(integrator: Integrator, time: number): EngineFailure | un
   if (failure !== undefined) return failure;
   readRates(integrator, rates[0]!, INSTANT);
   for (let j = 0; j < state.length; j += 1) state[j]! += INSTANT * rates[0]![j]!;
+  integrator.rateNoise = machine.voltageNoise;
   keepStart(integrator);
   return undefined;
 }
@@ -78,6 +79,7 @@ export function acceptStep(integrator: Integrator): void {
   const { state, nextState, rates, tableau } = integrator;
   state.set(nextState);
   rates[0]!.set(rates[tableau.stages - 1]!);
+  integrator.rateNoise = integrator.machine.voltageNoise;
   keepStart(integrator);
 }
 

@@ -63,6 +63,7 @@ export function transient(circuit: Circuit, options: TransientOptions): Result<T
   const unfit = start(integrator, circuit, options);
   if (unfit !== undefined) return { ok: false, failure: unfit };
   const grid = sampleGrid(machine, options.step ?? 0, options.start ?? 0);
+  if (isFromPoint(options)) grid.begin();
   const observe = options.observe;
   const window = observe && { from: observe.from ?? 0, to: observe.to ?? options.stop };
   const gatherer = observe && window && summarise(integrator, observe, window);
@@ -91,13 +92,14 @@ function start(
   circuit: Circuit,
   options: TransientOptions,
 ): EngineFailure | undefined {
-  const { storage, initialVoltages, useInitialConditions } = options;
-  if (storage === undefined && !useInitialConditions) {
-    return startFromPoint(integrator, circuit, options);
-  }
+  if (isFromPoint(options)) return startFromPoint(integrator, circuit, options);
+  const { storage, initialVoltages } = options;
   loadStorage(integrator, withNodeVoltages(integrator.machine, storage, initialVoltages ?? {}));
   return undefined;
 }
+
+const isFromPoint = ({ storage, useInitialConditions }: TransientOptions): boolean =>
+  storage === undefined && !useInitialConditions;
 
 /** A capacitor with no initial voltage of its own takes that between its nodes, where both are told. */
 function withNodeVoltages(
