@@ -9,8 +9,9 @@ import { makeSetup } from '../../shared/bench/setup.ts';
 import type { AppliedFault } from '../../shared/oven/fault.ts';
 import { ovenDefinition } from '../../shared/oven/oven.ts';
 
-const file = new URL('../../scenarios/ovens/larkfield-lc-28.json', import.meta.url);
-export const lc28 = ovenDefinition.parse(JSON.parse(readFileSync(file, 'utf8')));
+// From the project's folder, where every test runner starts: jsdom's URLs are none to Node.
+const file = readFileSync('scenarios/ovens/larkfield-lc-28.json', 'utf8');
+export const lc28 = ovenDefinition.parse(JSON.parse(file));
 
 export const setupWith = (
   faults: readonly AppliedFault[] = [],

@@ -52,8 +52,13 @@ export const Mirror = ({ groups, isShown, onHide, onReveal, onLeave }: Props) =>
   const step = (direction: Direction): void => {
     if (!stop) return;
     const by = direction === 'down' ? 1 : direction === 'up' ? -1 : 0;
-    if (isShown && by !== 0) focusOn(entries[entries.indexOf(stop) + by]);
-    else focusOn(neighbour(stop, entries, direction));
+    if (isShown && by !== 0) return stepInList(by);
+    // Parts and leads lie under and between the terminals: they are reached in the list and by name.
+    const terminals = entries.filter(({ kind }) => kind === 'target');
+    focusOn(neighbour(stop, terminals, direction));
+  };
+  const stepInList = (by: number): void => {
+    if (stop) focusOn(entries[entries.indexOf(stop) + by]);
   };
 
   const onKeyDown = (event: KeyboardEvent): void => {
@@ -66,6 +71,10 @@ export const Mirror = ({ groups, isShown, onHide, onReveal, onLeave }: Props) =>
     if (direction) {
       handled();
       return step(direction);
+    }
+    if (event.key === 'PageDown' || event.key === 'PageUp') {
+      handled();
+      return stepInList(event.key === 'PageDown' ? 1 : -1);
     }
     if (event.key === 'Home' || event.key === 'End') {
       handled();

@@ -23,6 +23,9 @@ export function chipsFor(
     state.isCordIn ? { tone: 'caution', text: 'cord in' } : { tone: 'safe', text: 'cord out' },
     state.isCoverOn ? { tone: 'plain', text: 'cover on' } : { tone: 'caution', text: 'cover off' },
     { tone: 'plain', text: state.oven.isDoorClosed ? 'door closed' : 'door open' },
+    state.isCordIn
+      ? { tone: 'plain', text: state.isDisplayLit ? 'display lit' : 'display dark' }
+      : null,
     ...provedDead(definition, events).map(({ part, atMs }): Chip => ({
       tone: 'safe',
       text: `${part} proved 0 V at ${benchClock(atMs)}`,

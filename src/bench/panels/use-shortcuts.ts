@@ -15,6 +15,7 @@ export const shortcuts: readonly Shortcut[] = [
   { key: 'D', name: 'Take the discharge lead: its clip first, then its tip' },
   { key: 'Esc', name: 'Put down what is in the hand, close what is open' },
   { key: 'Arrows', name: 'Go to the neighbouring terminal' },
+  { key: 'Page', name: 'Page down or up: the next or previous terminal, part or lead in the list' },
   { key: 'Enter', name: 'Tap the terminal' },
   { key: '/', name: 'Go to a terminal by name: / C 1 . 2' },
   { key: '?', name: 'Show this list' },

@@ -75,7 +75,12 @@ describe('chips', () => {
     chipsFor(oven, state, events).map(({ text, tone }) => `${text} ${tone}`);
 
   it('say what can be seen', () => {
-    expect(texts(fresh)).toEqual(['cord in caution', 'cover on plain', 'door closed plain']);
+    expect(texts({ ...fresh, isDisplayLit: true })).toEqual([
+      'cord in caution',
+      'cover on plain',
+      'door closed plain',
+      'display lit plain',
+    ]);
     expect(texts(open)).toEqual(['cord out safe', 'cover off caution', 'door closed plain']);
   });
 
