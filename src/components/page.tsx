@@ -26,7 +26,7 @@ export const Page = ({ title, lead, actions, isNarrow = false, children }: Props
   const heading = useFocusAfterNavigation();
   return (
     <div
-      className={`mx-auto grid w-full gap-6 px-4 py-6 sm:px-6 sm:py-8 ${isNarrow ? 'max-w-[720px]' : 'max-w-[1200px]'}`}
+      className={`mx-auto grid w-full gap-8 px-4 py-6 sm:px-6 sm:py-8 ${isNarrow ? 'max-w-[720px]' : 'max-w-[1200px]'}`}
     >
       <title>{`${title} – Coldbench`}</title>
       <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-3">

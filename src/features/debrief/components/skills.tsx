@@ -42,7 +42,7 @@ export const Skills = ({ skills, ...jump }: { skills: readonly SkillResult[] } &
     <h2 id="skills" className="text-xl font-bold">
       Six skills
     </h2>
-    <ul className="-mb-7 gap-x-10 md:columns-2">
+    <ul className="gap-x-10 md:columns-2">
       {skills.map((result) => (
         <Skill key={result.skill} result={result} {...jump} />
       ))}

@@ -16,7 +16,7 @@ export const WhatYouDo = () => (
     <h2 id="what-you-do" className="text-xl font-bold">
       What you do on the bench
     </h2>
-    <ol className="grid gap-x-10 gap-y-3 md:grid-cols-2">
+    <ol className="grid gap-x-10 gap-y-3 md:grid-flow-col md:grid-cols-2 md:grid-rows-4">
       {steps.map(([name, what], index) => (
         <li key={name} className="grid grid-cols-[28px_1fr] gap-x-2">
           <span aria-hidden className="pt-px font-mono text-sm font-semibold text-ink-2">
