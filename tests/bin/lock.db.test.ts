@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { existsSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { afterEach, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, describe, expect, it } from 'vitest';
 import { createChildren } from '../../server/bin/lib/children.mjs';
 import { takeLock } from '../../server/bin/lib/lock.mjs';
 import { identify, recordOf } from '../../server/bin/lib/processes.mjs';
@@ -18,6 +18,7 @@ const leaveLock = (holder: { pid: number; identity: string }, children: unknown[
 
 describe('the lock of a data folder', () => {
   afterEach(() => rmSync(file, { force: true }));
+  afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
   it('is refused while the launcher that holds it runs', async () => {
     leaveLock(recordOf(process.pid));
