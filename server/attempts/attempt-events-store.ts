@@ -37,7 +37,8 @@ export async function eventsFrom(
   return rows.map(eventOf);
 }
 
-const insertEvents = `
+/** $1 attempt, $2 events as JSON */
+export const insertEvents = `
   INSERT INTO attempt_event (attempt_id, sequence, type, version, data, bench_ms, recorded_at)
   SELECT $1, sequence, type, version, data, "benchMs", "recordedAt"
     FROM jsonb_to_recordset($2::jsonb) AS event (sequence integer, type text, version smallint,

@@ -2,7 +2,7 @@ import type { EntityManager } from 'typeorm';
 import type { ScenarioContent } from '../../shared/scenario/scenario.ts';
 import {
   eventsFrom,
-  insertEventsOf,
+  insertEvents,
   newestCheckpoint,
   saveCheckpoint,
 } from './attempt-events-store.ts';
@@ -29,9 +29,11 @@ const select = `
          bench_ms AS "benchMs", status
     FROM attempt WHERE id = $1 FOR UPDATE`;
 
-const project = `
+/** Events and projection in one journey to the database. */
+const addAndProject = `
+  WITH added AS (${insertEvents})
   UPDATE attempt
-     SET next_sequence = $2, bench_ms = $3, writer = $4,
+     SET next_sequence = $7, bench_ms = $3, writer = $4,
          status = CASE WHEN $5::timestamptz IS NULL THEN status ELSE 'handed in' END,
          handed_in_at = COALESCE($5::timestamptz, handed_in_at), debrief = COALESCE($6, debrief)
    WHERE id = $1`;
@@ -48,10 +50,9 @@ async function advance(
   { id, next }: AttemptState,
   { events, benchMs, writer, handedIn, checkpoint }: Advance,
 ): Promise<void> {
-  await insertEventsOf(manager, id, events);
   const debrief = handedIn && JSON.stringify(handedIn.debrief);
-  const values = [id, next + events.length, benchMs, writer, handedIn?.at ?? null, debrief];
-  await manager.query(project, values);
+  const end = [handedIn?.at ?? null, debrief, next + events.length];
+  await manager.query(addAndProject, [id, JSON.stringify(events), benchMs, writer, ...end]);
   if (checkpoint) await saveCheckpoint(manager, id, checkpoint);
 }
 

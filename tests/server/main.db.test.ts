@@ -92,12 +92,14 @@ test('it starts on an empty database, answers, and on SIGTERM ends what is under
   await expect(fetch(`${url}/api/health`)).rejects.toThrow();
 });
 
-test('a second start finds everything in place, and SIGINT stops it as well', async () => {
+test('a second start finds everything in place, judges in its other thread, and stops on SIGINT', async () => {
   const server = start(usual());
   const url = await address(server);
   const ovens = (await (await fetch(`${url}/api/ovens`)).json()) as { ovens: unknown[] };
   expect(ovens.ovens.length).toBeGreaterThan(0);
   expect(server.output()).not.toContain('brought up to date');
+  const visit = await fetch(`${url}/api/try`, { method: 'POST' });
+  expect(await visit.json()).toMatchObject({ attempt: { next: 1, status: 'on the bench' } });
   server.process.kill('SIGINT');
   expect(await server.ended).toEqual([0, null]);
 });
