@@ -1,7 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useEffect, useRef, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { BenchContext } from '../../simulation/bench-context.ts';
+import { BenchContext, useBench } from '../../simulation/bench-context.ts';
 import type { OpenedBench } from '../../simulation/open-bench.ts';
 import { useMeterTick } from '../../simulation/use-meter-tick.ts';
 import { Announcer } from '../mirror/announcer.tsx';
@@ -31,7 +31,10 @@ interface Props {
 const dockWidth = 860;
 
 const Workplace = ({ opened }: { opened: OpenedBench }) => {
-  const [isRunOpen, setIsRunOpen] = useState(false);
+  // Pulling the cord ends what the panel tells of: it closes.
+  const isCordIn = useBench(({ state }) => state.isCordIn);
+  const [openedWithCord, setOpenedWithCord] = useState<'in' | 'out' | null>(null);
+  const isRunOpen = openedWithCord === (isCordIn ? 'in' : 'out');
   const [isListOpen, setIsListOpen] = useState(false);
   const [isHelpOpen, setIsHelpOpen] = useState(false);
   const place = useRef<HTMLElement>(null);
@@ -57,14 +60,14 @@ const Workplace = ({ opened }: { opened: OpenedBench }) => {
         <Mat
           layout={opened.layout}
           isRunOpen={isRunOpen}
-          onRunClose={() => setIsRunOpen(false)}
+          onRunClose={() => setOpenedWithCord(null)}
           isListOpen={isListOpen}
           onListClose={() => setIsListOpen(false)}
           onLeave={() => focusIn('[role="toolbar"] button')}
         />
         <ActionBar
           isRunOpen={isRunOpen}
-          onRun={() => setIsRunOpen(!isRunOpen)}
+          onRun={() => setOpenedWithCord(isRunOpen ? null : isCordIn ? 'in' : 'out')}
           isListOpen={isListOpen}
           onList={() => setIsListOpen(!isListOpen)}
         />

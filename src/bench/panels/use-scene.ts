@@ -25,7 +25,7 @@ export function useScene(
     const data = notice?.kind === 'hazard' ? hazard.safeParse(notice.event.data) : null;
     return data?.success ? data.data.at : null;
   }, [notice]);
-  const run = isRunShown ? (state.runs.at(-1) ?? null) : null;
+  const run = isRunShown && state.isCordIn ? (state.runs.at(-1) ?? null) : null;
   return useMemo(
     () =>
       buildScene(
