@@ -29,16 +29,13 @@ export interface NgspiceAnswer {
   ac?: { frequency: number[]; signals: ComplexSignals };
 }
 
-/**
- * ngspice 39 has the constants of CODATA 2014, where k/q is 3.394e-7 below the exact one; at this
- * temperature in degrees Celsius its thermal voltage is that of 300 K here, 25.8519998 mV.
- */
-export const NGSPICE_TEMPERATURE = 26.850101827;
+/** Degrees Celsius: 300 K, the temperature of every junction of the engine. */
+const TEMPERATURE = '26.85';
 
 const PROGRAM = '/usr/bin/ngspice';
 const OPTIONS = {
-  temp: String(NGSPICE_TEMPERATURE),
-  tnom: String(NGSPICE_TEMPERATURE),
+  temp: TEMPERATURE,
+  tnom: TEMPERATURE,
   gmin: '1e-12',
   reltol: '1e-7',
   abstol: '1e-17',

@@ -62,7 +62,7 @@ function originOf(name: string, text: string, { commands, options }: NgspiceJob)
     ...about,
     '',
     '`expected.json` was made by ngspice 39 (Debian `ngspice`), with the options of',
-    '`tests/support/ngspice.ts` and its temperature set so that its thermal voltage is ours at 300 K:',
+    '`tests/support/ngspice.ts`, every junction at 300 K:',
     '',
     ...commands.map((command) => `    ${command}`),
     ...(told === '' ? [] : [`    .options ${told}`]),
