@@ -15,6 +15,12 @@ const errorOf = (line: string): DeckError => {
   return errors[0]!;
 };
 
+/** s this process worked since: what it waited for others counts for nothing. */
+const secondsOfWork = (began: NodeJS.CpuUsage): number => {
+  const { user, system } = process.cpuUsage(began);
+  return (user + system) / 1e6;
+};
+
 describe('a line that is wrong', () => {
   it.each([
     ['Q1 a b c model', 'unknown element "q1"'],
@@ -136,10 +142,10 @@ describe('a deck that is wrong as a whole', () => {
   });
 
   it('is far too long, and that is said soon', () => {
-    const began = performance.now();
+    const began = process.cpuUsage();
     const line = 'R1 a 0 1\n';
     const errors = errorsOf(`t\n${line.repeat(1_200_000)}`);
-    expect(performance.now() - began).toBeLessThan(1000);
+    expect(secondsOfWork(began)).toBeLessThan(1);
     expect(errors).toEqual([
       {
         line: Math.floor((LARGEST_DECK - 2) / line.length) + 2,
@@ -149,8 +155,8 @@ describe('a deck that is wrong as a whole', () => {
   });
 
   it('has an error on every line, and still answers soon', () => {
-    const began = performance.now();
+    const began = process.cpuUsage();
     expect(errorsOf(`t\n${'R1 a 0 1q\n'.repeat(45_000)}`).length).toBeGreaterThan(44_000);
-    expect(performance.now() - began).toBeLessThan(2000);
+    expect(secondsOfWork(began)).toBeLessThan(1.5);
   });
 });
