@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { closeSync, mkdtempSync, openSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Circuit } from '../../../shared/engine/circuit/circuit.ts';
@@ -12,6 +12,8 @@ export interface NgspiceTime {
   readonly matrix: number;
 }
 
+/** ms */
+const PATIENCE = 120_000;
 const MATRIX = ['load', 'synchronize', 'reorder', 'factor', 'solve'];
 
 /**
@@ -38,12 +40,15 @@ export function ngspiceTime(circuit: Circuit, command: string, times: number): N
       '',
     ];
     writeFileSync(join(folder, 'deck.cir'), text.join('\n'));
-    const run = spawnSync('ngspice', ['-b', 'deck.cir'], {
+    // to a file: its progress alone can be hundreds of megabytes
+    const log = openSync(join(folder, 'log'), 'w');
+    spawnSync('ngspice', ['-b', 'deck.cir'], {
       cwd: folder,
-      encoding: 'utf8',
-      maxBuffer: 1 << 28,
+      stdio: ['ignore', log, log],
+      timeout: PATIENCE,
     });
-    const said = `${run.stdout}${run.stderr}`;
+    closeSync(log);
+    const said = readFileSync(join(folder, 'log'), 'utf8');
     const seconds = (what: string): number => {
       const found = new RegExp(`^${what} = ([\\d.e+-]+)`, 'm').exec(said);
       if (found === null) throw new Error(`ngspice did not say its ${what}:\n${said.slice(-2000)}`);
