@@ -150,11 +150,11 @@ function fuseTime(oven: DrawnOven, state: OvenState, ref: string, ran: Electrica
   return meltingTime(ran.current(`${ref}:element`), melting * (fitted / rating) ** 2, fitted);
 }
 
-/** V by element name; below a volt nobody is concerned. */
+/** V by element name; below 30 V nobody is concerned. */
 const chargeLeft = ({ storage }: Electrical): Record<string, number> =>
   Object.fromEntries(
     Object.entries(storage.voltages)
-      .filter(([, volts]) => Math.abs(volts) > 1)
+      .filter(([, volts]) => Math.abs(volts) > 30)
       .map(([element, volts]) => [element, round(volts, 0.01)]),
   );
 
