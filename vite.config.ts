@@ -16,11 +16,12 @@ export default defineConfig({
   ssr: { external: true },
   test: {
     projects: [
-      project('unit', 'unit.test.ts'),
+      project('unit', 'unit.test.ts', { testTimeout: 60_000 }),
       {
         plugins: [react()],
         ...project('client', 'client.test.tsx', {
           environment: 'jsdom',
+          testTimeout: 30_000,
           setupFiles: ['tests/support/client-setup.ts'],
         }),
       },
