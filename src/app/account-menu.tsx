@@ -1,4 +1,4 @@
-import { Link } from 'react-router-dom';
+import { Link, NavLink } from 'react-router-dom';
 import type { SignedIn } from '../../shared/contracts/accounts.ts';
 import { Disclosure } from '../components/disclosure.tsx';
 import { menuItemClasses } from '../components/menu-item-classes.ts';
@@ -38,9 +38,9 @@ export const AccountMenu = ({ signedIn }: { signedIn: SignedIn }) => {
       </p>
       <div className="border-t border-line pt-1.5 md:hidden">
         {placesOf[signedIn.role].map(({ to, name }) => (
-          <Link key={to} to={to} className={menuItemClasses}>
+          <NavLink key={to} to={to} className={menuItemClasses}>
             {name}
-          </Link>
+          </NavLink>
         ))}
       </div>
       <Others signedIn={signedIn} />

@@ -8,7 +8,9 @@ import { homeOf, placesOf } from './navigation.ts';
 
 const placeClasses =
   'flex h-[52px] items-center border-b-[3px] border-transparent px-3 pt-[3px] font-semibold text-ink-2 ' +
-  'hover:text-act aria-[current=page]:border-act aria-[current=page]:text-ink';
+  'hover:text-act aria-[current=page]:border-act aria-[current=page]:text-ink ' +
+  // Forced colours draw a transparent border too, and every page would look like the current one.
+  'forced-colors:border-[Canvas] forced-colors:aria-[current=page]:border-[Highlight]';
 
 const Visitor = () => (
   <>

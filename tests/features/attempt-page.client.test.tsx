@@ -1,5 +1,5 @@
 import { screen, waitFor, within } from '@testing-library/react';
-import { describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it } from 'vitest';
 import { whoAmI } from '../../shared/contracts/accounts.ts';
 import { getAttempt, getDebrief, getEvents } from '../../shared/contracts/attempts.ts';
 import { getOven } from '../../shared/contracts/ovens.ts';
@@ -27,6 +27,13 @@ const handedIn = (): FakeApi =>
 
 const timeline = () => screen.findByRole('region', { name: 'Timeline' });
 
+// Fetched when the page asks for them; here before the clock of a test runs.
+beforeAll(async () => {
+  await import('../../src/features/debrief/components/bench-record.tsx');
+  await import('../../src/features/debrief/components/readings-table.tsx');
+  await import('../../src/features/debrief/components/true-faults.tsx');
+}, 60_000);
+
 describe('the debrief', () => {
   it('leads with one sentence, the score and the six skills', async () => {
     handedIn();
@@ -51,7 +58,7 @@ describe('the debrief', () => {
     await timeline();
     await user.click(screen.getByRole('button', { name: /You discharged C1\.1/ }));
     await waitFor(() => expect(address()).toBe(`${path}?at=4`));
-    expect(screen.getByRole('region', { name: 'Replay' })).toHaveFocus();
+    expect(screen.getByRole('group', { name: 'Replay' })).toHaveFocus();
     const moment = within(await timeline()).getByRole('button', {
       name: /Discharge tip on C1\.1/i,
     });
@@ -90,7 +97,7 @@ describe('the debrief', () => {
     await renderApp(`${path}?at=8`);
     const moment = within(await timeline()).getByRole('button', { current: 'step' });
     expect(moment).toHaveTextContent('D1.a–D1.k 0.4 Ω');
-    expect(screen.getByRole('region', { name: 'Replay' })).toHaveFocus();
+    expect(screen.getByRole('group', { name: 'Replay' })).toHaveFocus();
   });
 
   it('shows the moments that counted, and every event on request', async () => {

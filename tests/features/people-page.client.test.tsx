@@ -49,6 +49,7 @@ describe('people', () => {
     await user.click(within(dialog).getByRole('button', { name: 'Leave as trainee' }));
     await waitFor(() => expect(screen.queryByRole('alertdialog')).not.toBeInTheDocument());
     expect(screen.getByLabelText('Role of Mina Okafor')).toHaveValue('trainee');
+    await waitFor(() => expect(screen.getByLabelText('Role of Mina Okafor')).toHaveFocus());
     expect(api.callsOf(changeRole)).toHaveLength(0);
   });
 

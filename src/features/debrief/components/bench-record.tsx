@@ -38,9 +38,10 @@ export const BenchRecord = (props: Props) => {
   }, [opensAtMoment, replay]);
   return (
     <>
-      <section
+      <div
         ref={replay}
         tabIndex={-1}
+        role="group"
         aria-labelledby="replay"
         className="grid scroll-mt-4 gap-3 outline-none"
       >
@@ -52,7 +53,7 @@ export const BenchRecord = (props: Props) => {
             <ReplayPanel attempt={attempt} events={events} at={moment ?? 0} onSeek={seek} />
           </Suspense>
         </WhenNear>
-      </section>
+      </div>
       <Timeline events={events} marks={marks} moment={moment} goTo={jump} />
     </>
   );
