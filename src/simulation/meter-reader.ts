@@ -26,30 +26,37 @@ export interface MeterAnswer {
   view: MeterView | null;
 }
 
-/** In a thread of its own: running the whole oven through time must not hold up a pointer. */
+/** In a thread of its own, begun at the first question: running the whole oven through time must not hold up a pointer. */
 export function workerReader(setup: Setup, makeWorker: () => Worker): MeterReader {
-  const worker = makeWorker();
-  const waiting = new Map<
-    number,
-    { resolve: (view: MeterView | null) => void; reject: (why: unknown) => void }
-  >();
+  const waiting = new Map<number, Waiting>();
+  let worker: Worker | null = null;
   let last = 0;
-  worker.addEventListener('message', ({ data }: MessageEvent<MeterAnswer>) => {
-    waiting.get(data.id)?.resolve(data.view);
-    waiting.delete(data.id);
-  });
-  worker.addEventListener('error', (event) => {
-    for (const { reject } of waiting.values()) reject(new Error(event.message));
-    waiting.clear();
-  });
-  worker.postMessage(setup);
+  const begin = (): Worker => {
+    const begun = makeWorker();
+    begun.addEventListener('message', ({ data }: MessageEvent<MeterAnswer>) => {
+      waiting.get(data.id)?.resolve(data.view);
+      waiting.delete(data.id);
+    });
+    begun.addEventListener('error', (event) => {
+      for (const { reject } of waiting.values()) reject(new Error(event.message));
+      waiting.clear();
+    });
+    begun.postMessage(setup);
+    return begun;
+  };
   return {
     read: (state, atMs) =>
       new Promise((resolve, reject) => {
+        worker ??= begin();
         last += 1;
         waiting.set(last, { resolve, reject });
         worker.postMessage({ id: last, state, atMs } satisfies MeterQuestion);
       }),
-    stop: () => worker.terminate(),
+    stop: () => worker?.terminate(),
   };
+}
+
+interface Waiting {
+  resolve: (view: MeterView | null) => void;
+  reject: (why: unknown) => void;
 }

@@ -4,7 +4,7 @@ import { benchServer } from './bench-server.ts';
 import { newWriterId } from './new-writer-id.ts';
 import { openBench, type Opened } from './open-bench.ts';
 import { memoryOutboxStore, openOutboxStore } from './outbox-store.ts';
-import { lockAttempt } from './writer-lock.ts';
+import { lockAttempt, type WriterLock } from './writer-lock.ts';
 
 export type BenchDoor =
   | { kind: 'loading' }
@@ -31,18 +31,28 @@ export function useOpenBench(attempt: string): {
     const here: Opening = { attempt, round: how.round, steal: how.steal };
     let isOver = false;
     let close = (): void => undefined;
+    let release = (): void => undefined;
     const arrive = (door: BenchDoor): void => {
       if (door.kind === 'open') close = door.close;
       if (isOver) close();
       else setReached({ opening: here, door });
     };
-    open(here).then(arrive, (error: unknown) =>
+    // Whoever has left already takes no lock, and gives one back that comes too late.
+    const lock = async (): Promise<WriterLock | null> => {
+      if (isOver) return null;
+      const held = await lockAttempt(attempt, { steal: how.steal, locks: webLocks() });
+      release = () => held?.release();
+      if (isOver) release();
+      return held;
+    };
+    open(attempt, lock).then(arrive, (error: unknown) =>
       arrive(
         error instanceof Problem ? { kind: 'failed', problem: error } : { kind: 'broken', error },
       ),
     );
     return () => {
       isOver = true;
+      release();
       close();
     };
   }, [attempt, how]);
@@ -55,13 +65,16 @@ export function useOpenBench(attempt: string): {
   };
 }
 
-const open = async ({ attempt, steal }: Opening): Promise<Opened> =>
+/** Missing where a page is served without TLS. */
+const webLocks = (): LockManager | undefined => navigator.locks as LockManager | undefined;
+
+const open = async (attempt: string, lock: () => Promise<WriterLock | null>): Promise<Opened> =>
   openBench({
     attempt,
     writer: newWriterId(),
     server: benchServer,
     store: await openOutboxStore().catch(memoryOutboxStore),
-    lock: () => lockAttempt(attempt, { steal, locks: navigator.locks as LockManager | undefined }),
+    lock,
     realNow: () => performance.now(),
     now: () => Date.now(),
   });

@@ -27,6 +27,12 @@ const fonts = Object.assign(new EventTarget(), { load: () => Promise.resolve([])
 window.matchMedia ??= matchMedia;
 window.ResizeObserver ??= StillResizeObserver;
 if (!('fonts' in document)) Object.defineProperty(document, 'fonts', { value: fonts });
+HTMLDialogElement.prototype.showModal ??= function show(this: HTMLDialogElement) {
+  this.open = true;
+};
+HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
+  this.open = false;
+};
 Element.prototype.setPointerCapture ??= () => undefined;
 Element.prototype.releasePointerCapture ??= () => undefined;
 
