@@ -18,9 +18,9 @@ import { referenceJob } from './reference-job.ts';
 const FAMILIES: readonly (readonly [string, (seed: number) => RandomCircuit, number])[] = [
   ['mesh', randomMesh, 100],
   ['diodes', randomDiodes, 100],
-  ['windings', randomWindings, 30],
-  ['network', randomNetwork, 30],
-  ['rectifier', randomRectifier, 20],
+  ['windings', randomWindings, 24],
+  ['network', randomNetwork, 24],
+  ['rectifier', randomRectifier, 14],
 ];
 
 const drawn = FAMILIES.flatMap(([family, draw, count]) =>

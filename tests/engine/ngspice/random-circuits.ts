@@ -164,7 +164,7 @@ export function randomWindings(seed: number): RandomCircuit {
   });
   return {
     circuit: { elements },
-    analyses: ['.ac dec 2 10 10k', '.tran 0.5m 40m'],
+    analyses: ['.ac dec 2 10 10k', '.tran 0.5m 20m'],
     longestStep: '5u',
   };
 }
@@ -221,7 +221,7 @@ export function randomRectifier(seed: number): RandomCircuit {
     },
     resistor('extra', 'x', '0', load * draws.uniform(0.3, 3)),
   ];
-  return { circuit: { elements }, analyses: ['.tran 0.37m 40m'], longestStep: '2u' };
+  return { circuit: { elements }, analyses: ['.tran 0.37m 25.9m'], longestStep: '2u' };
 }
 
 /**
@@ -287,7 +287,7 @@ export function randomNetwork(seed: number): RandomCircuit {
   elements.push({ kind: 'inductor', name: 'in line', nodes: ['j', node(size)], inductance });
   return {
     circuit: { elements },
-    analyses: ['.op', '.ac dec 2 10 100k', '.tran 0.21m 21m'],
+    analyses: ['.op', '.ac dec 2 10 100k', '.tran 0.21m 8.4m'],
     longestStep: '1u',
   };
 }
