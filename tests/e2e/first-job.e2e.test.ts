@@ -235,6 +235,8 @@ describe('a visitor', () => {
     await page.getByLabel('E-mail').fill('nora@quist.example');
     await page.getByLabel('Password').fill('a long enough one');
     await page.getByRole('button', { name: /create/i }).click();
+    await page.waitForURL('**/attempts/**');
+    await page.getByRole('link', { name: 'Go on with your attempt' }).click();
     await page.waitForURL(address);
     await page
       .getByText(/cord out/)

@@ -54,7 +54,7 @@ export function benchOn(page: Page): E2eBench {
           ),
         [display.source],
       );
-      await bench.action('Write on job sheet');
+      await page.getByRole('button', { name: /^Write on job sheet/ }).click();
     },
     display: async () => (await page.getByTestId('digits').first().textContent()) ?? '',
     log: async (line) => {
