@@ -25,7 +25,7 @@ interface Props {
   moment: number | null;
   /** shows a moment where the person looks already */ seek: (sequence: number) => void;
   /** shows a moment and brings the replay into view */ jump: (sequence: number) => void;
-  replay: RefObject<HTMLElement | null>;
+  replay: RefObject<HTMLDivElement | null>;
 }
 
 /** What happened on the bench, watched again and in words. */

@@ -33,7 +33,7 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
   const events = useEvents(attempt.id);
   const oven = useOven(attempt.content.oven);
   const [moment, seek] = useMoment();
-  const replay = useRef<HTMLElement>(null);
+  const replay = useRef<HTMLDivElement>(null);
   const jump = useCallback(
     (sequence: number): void => {
       seek(sequence);
