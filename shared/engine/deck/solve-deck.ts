@@ -20,10 +20,16 @@ export interface DeckAnswer {
  */
 const OTHERS_THERMAL_VOLTAGE = (300 * 1.38064852e-23) / 1.6021766208e-19;
 
-/** As the programs a deck is compared with have it: no conductance on the nodes, their junction law. */
+/**
+ * S on every node, where other programs have none: 1e-7 of what 1 TOhm carries. With nothing at all
+ * a node at the end of a lead carries only rounding, and Kirchhoff's law cannot be asserted of that.
+ */
+const NEXT_TO_NOTHING = 1e-19;
+
+/** As the programs a deck is compared with have it. */
 const LIKE_OTHERS = {
   junctionLaw: 'spice',
-  groundConductance: 0,
+  groundConductance: NEXT_TO_NOTHING,
   thermalVoltage: OTHERS_THERMAL_VOLTAGE,
 } as const;
 
