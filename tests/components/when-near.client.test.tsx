@@ -1,4 +1,4 @@
-import { act, render, screen } from '@testing-library/react';
+import { act, fireEvent, render, screen } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import { WhenNear } from '../../src/components/when-near.tsx';
 
@@ -27,12 +27,31 @@ afterEach(() => vi.unstubAllGlobals());
 describe('WhenNear', () => {
   it('renders nothing costly until it comes near, and then keeps it', () => {
     const seen = watchers();
-    render(<WhenNear meanwhile="on its way">the bench</WhenNear>);
-    expect(screen.getByText('on its way')).toBeInTheDocument();
+    render(<WhenNear what="the bench">bench and meter</WhenNear>);
+    expect(screen.getByRole('button', { name: 'Show the bench' })).toBeInTheDocument();
     act(() => seen.tell[0]?.([{ isIntersecting: false }]));
-    expect(screen.queryByText('the bench')).not.toBeInTheDocument();
+    expect(screen.queryByText('bench and meter')).not.toBeInTheDocument();
     act(() => seen.tell[0]?.([{ isIntersecting: true }]));
-    expect(screen.getByText('the bench')).toBeInTheDocument();
+    expect(screen.getByText('bench and meter')).toBeInTheDocument();
     expect(seen.disconnected).toBe(1);
+  });
+
+  it('renders at once what is wanted, and keeps it when it is wanted no more', () => {
+    watchers();
+    const { rerender } = render(
+      <WhenNear isWanted what="the bench">
+        bench and meter
+      </WhenNear>,
+    );
+    expect(screen.getByText('bench and meter')).toBeInTheDocument();
+    rerender(<WhenNear what="the bench">bench and meter</WhenNear>);
+    expect(screen.getByText('bench and meter')).toBeInTheDocument();
+  });
+
+  it('renders on request', () => {
+    watchers();
+    render(<WhenNear what="the bench">bench and meter</WhenNear>);
+    fireEvent.click(screen.getByRole('button', { name: 'Show the bench' }));
+    expect(screen.getByText('bench and meter')).toBeInTheDocument();
   });
 });

@@ -1,5 +1,5 @@
 import { screen, waitFor, within } from '@testing-library/react';
-import { beforeAll, describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it, vi } from 'vitest';
 import { whoAmI } from '../../shared/contracts/accounts.ts';
 import { getAttempt, getDebrief, getEvents } from '../../shared/contracts/attempts.ts';
 import { getOven } from '../../shared/contracts/ovens.ts';
@@ -26,6 +26,15 @@ const handedIn = (): FakeApi =>
     .on(getOven, { definition: oven, layout });
 
 const timeline = () => screen.findByRole('region', { name: 'Timeline' });
+
+// The bench on its canvas has tests of its own; here it matters which moment it is given.
+vi.mock('../../src/bench/replay/replay-panel.tsx', () => ({
+  ReplayPanel: ({ at, onSeek }: { at: number; onSeek: (at: number) => void }) => (
+    <button type="button" onClick={() => onSeek(at + 1)}>
+      One event on from {at}
+    </button>
+  ),
+}));
 
 // Fetched when the page asks for them; here before the clock of a test runs.
 beforeAll(async () => {
@@ -65,6 +74,18 @@ describe('the debrief', () => {
     expect(moment).toHaveAttribute('aria-current', 'step');
     expect(moment).toHaveTextContent('00:44');
     expect(moment).toHaveTextContent('+20');
+  });
+
+  it('shows the moment of the replay in the timeline and leaves the focus where it is', async () => {
+    handedIn();
+    const { user, address } = await renderApp(`${path}?at=3`);
+    await user.click(await screen.findByRole('button', { name: 'One event on from 3' }));
+    const next = await screen.findByRole('button', { name: 'One event on from 4' });
+    expect(next).toHaveFocus();
+    expect(address()).toBe(`${path}?at=4`);
+    expect(within(await timeline()).getByRole('button', { current: 'step' })).toHaveTextContent(
+      'discharge tip on C1.1',
+    );
   });
 
   it('makes one line of marks that say the same, with a button for each moment', async () => {

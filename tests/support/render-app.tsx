@@ -14,12 +14,22 @@ vi.setConfig({ testTimeout: 30_000 });
 /** jsdom lays nothing out, so there is nothing to scroll. */
 window.scrollTo = () => undefined;
 
-/** Nor does anything come near to view, until a test says so. */
-class NothingNear {
-  observe(): void {}
+/** And so everything is in view at once. */
+class AllInView {
+  readonly #tell: IntersectionObserverCallback;
+
+  constructor(tell: IntersectionObserverCallback) {
+    this.#tell = tell;
+  }
+
+  observe(target: Element): void {
+    const entry = { isIntersecting: true, target } as IntersectionObserverEntry;
+    this.#tell([entry], this as unknown as IntersectionObserver);
+  }
+
   disconnect(): void {}
 }
-Object.assign(window, { IntersectionObserver: NothingNear });
+Object.assign(window, { IntersectionObserver: AllInView });
 
 /** The code of a lazy page is fetched before the clock of a test runs. */
 const fetchCode = async (path: string): Promise<void> => {

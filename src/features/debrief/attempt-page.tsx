@@ -13,6 +13,8 @@ import { StillOnTheBench } from './components/still-on-the-bench.tsx';
 
 const link = 'font-semibold text-act underline underline-offset-2';
 
+const nameOf = ({ status }: Attempt): string => (status === 'handed in' ? 'Debrief' : 'Attempt');
+
 const Back = ({ attempt: { scenario, isTrial } }: { attempt: Attempt }) => {
   if (scenario === null) return null;
   return isTrial ? (
@@ -43,7 +45,7 @@ export const Component = () => {
   const query = useAttempt(id);
   return (
     <Page
-      title={query.data ? `Debrief: ${query.data.title}` : 'Debrief'}
+      title={query.data ? `${nameOf(query.data)}: ${query.data.title}` : 'Attempt'}
       lead={query.data ? <Lead attempt={query.data} /> : null}
     >
       {query.isPending ? (

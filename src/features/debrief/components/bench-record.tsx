@@ -3,10 +3,9 @@ import type { Mark } from '../../../../shared/assessment/debrief.ts';
 import type { Attempt } from '../../../../shared/contracts/attempts.ts';
 import type { RecordedEvent } from '../../../../shared/bench/event.ts';
 import { Loading } from '../../../components/loading.tsx';
-import { WhenNear } from '../../../components/when-near.tsx';
 import { Timeline } from './timeline.tsx';
 
-// The canvas is most of the code of this page, and below the first screen.
+// The canvas is most of the code of this page: the words need not wait for it.
 const ReplayPanel = lazy(async () => {
   const { ReplayPanel: loaded } = await import('../../../bench/replay/replay-panel.tsx');
   return { default: loaded };
@@ -48,11 +47,9 @@ export const BenchRecord = (props: Props) => {
         <h2 id="replay" className="text-xl font-bold">
           Replay
         </h2>
-        <WhenNear meanwhile={meanwhile}>
-          <Suspense fallback={meanwhile}>
-            <ReplayPanel attempt={attempt} events={events} at={moment ?? 0} onSeek={seek} />
-          </Suspense>
-        </WhenNear>
+        <Suspense fallback={meanwhile}>
+          <ReplayPanel attempt={attempt} events={events} at={moment ?? 0} onSeek={seek} />
+        </Suspense>
       </div>
       <Timeline events={events} marks={marks} moment={moment} goTo={jump} />
     </>

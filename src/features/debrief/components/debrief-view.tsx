@@ -4,6 +4,7 @@ import type { Attempt } from '../../../../shared/contracts/attempts.ts';
 import type { ServiceMeasurement } from '../../../../shared/oven/oven.ts';
 import { Failed } from '../../../components/failed.tsx';
 import { Loading } from '../../../components/loading.tsx';
+import { WhenNear } from '../../../components/when-near.tsx';
 import { useOven } from '../../ovens/api/use-oven.ts';
 import { debriefQuery } from '../api/debrief-query.ts';
 import { useEvents } from '../api/use-events.ts';
@@ -53,31 +54,37 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
     <>
       <Outcome debrief={debrief.data} />
       <Skills skills={skills} moment={moment} timeOf={timeOf} goTo={jump} />
-      <Suspense fallback={<Loading what="the timeline" />}>
-        {events.isPending ? (
-          <Loading what="the timeline" />
-        ) : events.isError ? (
-          <Failed what="The timeline" problem={events.error} retry={() => void events.refetch()} />
-        ) : (
-          <BenchRecord
-            attempt={attempt}
-            events={events.data}
-            marks={skills.flatMap((skill) => skill.marks)}
-            moment={moment}
-            seek={seek}
-            jump={jump}
-            replay={replay}
-          />
-        )}
-        <TrueFaults faults={faults} definition={oven.data?.definition} />
-        {events.isSuccess ? (
-          <ReadingsTable
-            events={events.data}
-            serviceData={oven.data?.definition.serviceData ?? noServiceData}
-            goTo={jump}
-          />
-        ) : null}
-      </Suspense>
+      <WhenNear what="the replay, the timeline and the readings" isWanted={moment !== null}>
+        <Suspense fallback={<Loading what="the timeline" rows={8} />}>
+          {events.isPending ? (
+            <Loading what="the timeline" />
+          ) : events.isError ? (
+            <Failed
+              what="The timeline"
+              problem={events.error}
+              retry={() => void events.refetch()}
+            />
+          ) : (
+            <BenchRecord
+              attempt={attempt}
+              events={events.data}
+              marks={skills.flatMap((skill) => skill.marks)}
+              moment={moment}
+              seek={seek}
+              jump={jump}
+              replay={replay}
+            />
+          )}
+          <TrueFaults faults={faults} definition={oven.data?.definition} />
+          {events.isSuccess ? (
+            <ReadingsTable
+              events={events.data}
+              serviceData={oven.data?.definition.serviceData ?? noServiceData}
+              goTo={jump}
+            />
+          ) : null}
+        </Suspense>
+      </WhenNear>
     </>
   );
 };
