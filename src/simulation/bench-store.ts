@@ -121,6 +121,8 @@ function acting(
         : isStillNews
           ? notice
           : null,
+      // What happened comes before what was being looked at.
+      ...(hazard ? { selection: null } : {}),
     });
     onEvents(ran.events);
     return true;

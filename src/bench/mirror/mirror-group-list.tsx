@@ -1,49 +1,41 @@
 import { memo } from 'react';
-import type { MirrorEntry, MirrorGroup } from './mirror-entries.ts';
+import type { MirrorGroup } from './mirror-entries.ts';
 
-interface Props {
-  group: MirrorGroup;
-  /** the one entry that the tab key reaches */ stop: string | null;
-  onActivate: (entry: MirrorEntry) => void;
-  onFocus: (entry: MirrorEntry) => void;
+interface ButtonProps {
+  /** what the list above finds it by, on a click or a focus */ target: string;
+  name: string;
+  short: string;
+  isStop: boolean;
 }
 
-const MirrorButton = memo(function MirrorButton(props: {
-  entry: MirrorEntry;
-  isStop: boolean;
-  onActivate: (entry: MirrorEntry) => void;
-  onFocus: (entry: MirrorEntry) => void;
-}) {
-  const { entry, isStop, onActivate, onFocus } = props;
+/** Words alone, so that a change on the bench touches only the buttons that say something new. */
+const MirrorButton = memo(function MirrorButton({ target, name, short, isStop }: ButtonProps) {
   return (
     <button
       type="button"
-      data-mirror={entry.ref}
-      aria-label={entry.name}
+      data-mirror={target}
+      aria-label={name}
       tabIndex={isStop ? 0 : -1}
-      onClick={() => onActivate(entry)}
-      onFocus={() => onFocus(entry)}
       className="grid min-h-8 w-full grid-cols-[58px_1fr] items-center gap-2 rounded border border-bench-line px-2 py-1 text-left text-sm hover:border-bench-ink-2"
     >
-      <span className="font-mono text-xs font-semibold text-caution">{entry.ref}</span>
-      <span>{entry.short}</span>
+      <span className="font-mono text-xs font-semibold text-caution">{target}</span>
+      <span>{short}</span>
     </button>
   );
 });
 
-export const MirrorGroupList = ({ group, stop, onActivate, onFocus }: Props) => (
+interface Props {
+  group: MirrorGroup;
+  /** the one entry that the tab key reaches */ stop: string | null;
+}
+
+export const MirrorGroupList = ({ group, stop }: Props) => (
   <div role="group" aria-label={group.title} className="grid gap-1">
     <p aria-hidden className="text-xs text-bench-ink-2">
       {group.title}
     </p>
-    {group.entries.map((entry) => (
-      <MirrorButton
-        key={entry.ref}
-        entry={entry}
-        isStop={entry.ref === stop}
-        onActivate={onActivate}
-        onFocus={onFocus}
-      />
+    {group.entries.map(({ ref, name, short }) => (
+      <MirrorButton key={ref} target={ref} name={name} short={short} isStop={ref === stop} />
     ))}
   </div>
 );

@@ -43,10 +43,20 @@ export const Mirror = ({ groups, isShown, onHide, onReveal, onLeave }: Props) =>
       ?.querySelector<HTMLElement>(`[data-mirror="${CSS.escape(entry?.ref ?? '')}"]`)
       ?.focus({ preventScroll: !isShown });
 
-  const activate = ({ kind, ref }: MirrorEntry): void => {
+  const entryOf = (target: EventTarget): MirrorEntry | undefined => {
+    const button = target instanceof HTMLElement ? target.closest('[data-mirror]') : null;
+    return entries.find(({ ref }) => ref === button?.getAttribute('data-mirror'));
+  };
+  const activate = (entry: MirrorEntry | undefined): void => {
     const { tap, select } = bench.getState();
-    if (kind === 'target') tap(ref);
-    else select({ kind, ref });
+    if (entry?.kind === 'target') tap(entry.ref);
+    else if (entry) select({ kind: entry.kind, ref: entry.ref });
+  };
+  const arriveAt = (entry: MirrorEntry | undefined): void => {
+    if (!entry) return;
+    setCurrent(entry.ref);
+    bench.getState().focus(entry.ref);
+    onReveal(entry.at);
   };
 
   const step = (direction: Direction): void => {
@@ -103,6 +113,8 @@ export const Mirror = ({ groups, isShown, onHide, onReveal, onLeave }: Props) =>
           : 'sr-only'
       }
       onKeyDown={onKeyDown}
+      onClick={({ target }) => activate(entryOf(target))}
+      onFocus={({ target }) => arriveAt(entryOf(target))}
       onBlur={(event) => {
         if (!event.currentTarget.contains(event.relatedTarget)) bench.getState().focus(null);
       }}
@@ -118,17 +130,7 @@ export const Mirror = ({ groups, isShown, onHide, onReveal, onLeave }: Props) =>
       ) : null}
       <div className={isShown ? 'grid gap-3 overflow-y-auto p-3' : ''}>
         {groups.map((group) => (
-          <MirrorGroupList
-            key={group.id}
-            group={group}
-            stop={stop?.ref ?? null}
-            onActivate={activate}
-            onFocus={(entry) => {
-              setCurrent(entry.ref);
-              bench.getState().focus(entry.ref);
-              onReveal(entry.at);
-            }}
-          />
+          <MirrorGroupList key={group.id} group={group} stop={stop?.ref ?? null} />
         ))}
       </div>
       {typed.typed === '' ? null : (

@@ -7,7 +7,7 @@ import { ToolRow } from './tool-cards.tsx';
 /** Pinned at the bottom of a small screen: display, keys in a row that scrolls, tools in another. */
 export const CompactDock = () => (
   <div className="grid gap-1.5 border-t border-bench-line bg-mat-deep px-2 pt-2 pb-2.5">
-    <div className="grid grid-cols-[minmax(150px,200px)_1fr] gap-2">
+    <div className="grid grid-cols-[minmax(0,1fr)_174px] gap-2">
       <LiveLcd isSmall />
       <div className="grid min-w-0 content-between gap-1">
         <ProbeLine probe="red" />

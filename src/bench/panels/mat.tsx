@@ -3,6 +3,7 @@ import type { OvenLayout } from '../../../shared/oven/layout.ts';
 import { useBench, useBenchApi } from '../../simulation/bench-context.ts';
 import { toBench, toScreen } from '../camera/camera.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
+import { buildScene } from '../geometry/build-scene.ts';
 import { BenchCanvas } from '../layers/bench-canvas.tsx';
 import type { BenchPointerEvent } from '../layers/use-stage-events.ts';
 import { mirrorGroups } from '../mirror/mirror-entries.ts';
@@ -13,12 +14,13 @@ import { HazardNotice, RefusalNotice } from './notice-panel.tsx';
 import { placeBeside } from './place-beside.ts';
 import { placeOf } from './place-of.ts';
 import { RunPanel } from './run-panel.tsx';
+import { sceneHand } from './scene-hand.ts';
 import { SelectionPanel } from './selection-panel.tsx';
 import { StateChips } from './state-chips.tsx';
 import { useBenchCamera } from './use-bench-camera.ts';
 import { useBenchPointer } from './use-bench-pointer.ts';
 import { useBoxSize } from './use-box-size.ts';
-import { useScene } from './use-scene.ts';
+import { useDrawing, useScene } from './use-scene.ts';
 import { ZoomButtons } from './zoom-buttons.tsx';
 
 interface Props {
@@ -46,9 +48,19 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
   const name = useRef<HTMLDivElement>(null);
   const view = useBoxSize(box);
   const [handAt, setHandAt] = useState<BenchPoint | null>(null);
-  const scene = useScene(layout, isHolding ? handAt : null, isRunOpen);
+  const drawing = useDrawing(layout);
+  const scene = useScene(drawing, isHolding ? handAt : null, isRunOpen);
   const camera = useBenchCamera(view, !state.isCoverOn);
-  const groups = useMemo(() => mirrorGroups(definition, state, scene), [definition, state, scene]);
+  // Without what is hovered or carried: a moving pointer leaves the buttons alone.
+  const groups = useMemo(
+    () =>
+      mirrorGroups(
+        definition,
+        state,
+        buildScene(drawing, state.oven, sceneHand(definition, state)),
+      ),
+    [definition, state, drawing],
+  );
 
   const onMoved = (event: BenchPointerEvent): void => {
     const isGone =

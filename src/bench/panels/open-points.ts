@@ -38,7 +38,7 @@ export function openPoints(
       'Faulty part replaced',
       faulty.length > 0 && unreplaced.length === 0,
       faulty.length === 0
-        ? 'No part is judged faulty.'
+        ? 'No faulty part was replaced.'
         : `Judged faulty and still in the oven: ${unreplaced.join(', ')}.`,
     ),
     point('leads', 'Leads refitted', lifted.length === 0, `Still lifted: ${lifted.join(', ')}.`),

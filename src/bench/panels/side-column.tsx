@@ -28,7 +28,7 @@ export const SideColumn = ({ side, name, isOpen, onClose, children }: Props) => 
       onKeyDown={(event) => {
         if (event.key === 'Escape' && isOpen) onClose();
       }}
-      className={`min-h-0 overflow-y-auto border-line p-4 outline-none ${sides[side]} ${
+      className={`relative min-h-0 overflow-y-auto border-line p-4 outline-none ${sides[side]} ${
         isOpen
           ? 'max-[1099px]:fixed max-[1099px]:top-[52px] max-[1099px]:bottom-0 max-[1099px]:z-10 max-[1099px]:w-[340px] max-[1099px]:max-w-full max-[1099px]:shadow-xl'
           : 'max-[1099px]:hidden'

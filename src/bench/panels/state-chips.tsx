@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { useBench } from '../../simulation/bench-context.ts';
 import { chipsFor, type Chip } from './chips.ts';
+import { useWide } from './use-wide.ts';
 
 const lamps: Record<Chip['tone'], string> = {
   safe: 'bg-safe-lamp',
@@ -14,9 +15,12 @@ export const StateChips = () => {
   const state = useBench((store) => store.state);
   const events = useBench((store) => store.events);
   const chips = useMemo(() => chipsFor(definition, state, events), [definition, state, events]);
+  const isWide = useWide(700);
   return (
     <ul
       aria-label="State of the bench"
+      // Below 700 px it scrolls sideways, and the keyboard must be able to.
+      tabIndex={isWide ? undefined : 0}
       className="flex gap-2 max-[700px]:gap-1.5 max-[700px]:overflow-x-auto min-[700px]:flex-wrap"
     >
       {chips.map(({ tone, text }) => (
