@@ -156,6 +156,8 @@ describe('an instructor', () => {
       .first()
       .click();
     await page.waitForURL('**/attempts/**');
+    // The address of a moment brings its replay, wherever it stands on the page.
+    await page.goto(`${page.url()}?at=0`);
     await page
       .getByRole('group', { name: 'Replay' })
       .getByRole('button', { name: 'One event on' })
