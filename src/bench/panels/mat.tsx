@@ -12,6 +12,7 @@ import { HandHint, HoverName } from './hover-name.tsx';
 import { MatContext } from './mat-context.ts';
 import { HazardNotice, RefusalNotice } from './notice-panel.tsx';
 import { placeBeside } from './place-beside.ts';
+import { placeHover } from './place-hover.ts';
 import { placeOf } from './place-of.ts';
 import { RunPanel } from './run-panel.tsx';
 import { sceneHand } from './scene-hand.ts';
@@ -68,13 +69,8 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
       event.kind === 'cancel' ||
       (event.kind === 'up' && event.pointerType === 'touch');
     if (isHolding || handAt !== null) setHandAt(isGone ? null : event.at);
-    const label = name.current;
-    if (!label) return;
-    label.dataset['off'] = String(isGone || event.pointerType !== 'mouse');
-    const isRight = event.screen[0] + label.offsetWidth + 28 > view.width;
-    const x = event.screen[0] + (isRight ? -label.offsetWidth - 18 : 18);
-    const isLow = event.screen[1] > view.height - label.offsetHeight - 40;
-    label.style.transform = `translate(${x}px, ${event.screen[1] + (isLow ? -label.offsetHeight - 14 : 20)}px)`;
+    if (name.current)
+      placeHover(name.current, isGone || event.pointerType !== 'mouse' ? null : event.screen, view);
   };
   const pointer = useBenchPointer(scene, camera, onMoved);
 
