@@ -17,12 +17,7 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
   let taken = '';
   let isReading = false;
   let isOver = false;
-  /** the bench after our own reading was recorded: nothing about it is news to the display */
-  let own: BenchState | null = null;
-  const hasChanged = (since: BenchState): boolean => {
-    const { state } = bench.getState();
-    return state !== since && state !== own;
-  };
+  const hasChanged = (since: BenchState): boolean => !isSameCircuit(since, bench.getState().state);
 
   const arrive = (view: MeterView | null, atMs: number): void => {
     bench.getState().show(view);
@@ -31,7 +26,7 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
     const key = readingKey(bench.getState(), view);
     if (!view.isSettled || key === taken) return;
     taken = key;
-    if (bench.getState().run({ type: 'TakeReading', data: {} }, atMs)) own = bench.getState().state;
+    bench.getState().run({ type: 'TakeReading', data: {} }, atMs);
   };
   const tick = async (): Promise<void> => {
     const { state, clock, setup } = bench.getState();
@@ -44,7 +39,7 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
     try {
       const view = await reader.read(state, atMs);
       if (isOver) return;
-      if (bench.getState().state === state) arrive(view, atMs);
+      if (!hasChanged(state)) arrive(view, Math.max(atMs, bench.getState().state.benchMs));
     } finally {
       isReading = false;
     }
@@ -63,6 +58,17 @@ export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () 
     reader.stop();
   };
 }
+
+/** A reading written down, a verdict given: nothing about them is news to the display. */
+const isSameCircuit = (a: BenchState, b: BenchState): boolean =>
+  a.probes === b.probes &&
+  a.meter.setting === b.meter.setting &&
+  a.meter.relative === b.meter.relative &&
+  a.oven === b.oven &&
+  a.discharge === b.discharge &&
+  a.battery === b.battery &&
+  a.isCordIn === b.isCordIn &&
+  a.isHandedIn === b.isHandedIn;
 
 const isConnected = ({ probes, meter }: BenchState): boolean =>
   meter.setting !== 'off' && !meter.isDestroyed && probes.red !== null && probes.black !== null;

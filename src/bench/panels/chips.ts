@@ -22,7 +22,7 @@ export function chipsFor(
   const chips: (Chip | null)[] = [
     state.isCordIn ? { tone: 'caution', text: 'cord in' } : { tone: 'safe', text: 'cord out' },
     state.isCoverOn ? { tone: 'plain', text: 'cover on' } : { tone: 'caution', text: 'cover off' },
-    { tone: 'plain', text: state.oven.isDoorClosed ? 'door closed' : 'door open' },
+    state.oven.isDoorClosed ? null : { tone: 'plain', text: 'door open' },
     state.isCordIn
       ? { tone: 'plain', text: state.isDisplayLit ? 'display lit' : 'display dark' }
       : null,

@@ -22,7 +22,7 @@ const asThen = (
   ...Object.fromEntries(lifted.map((end) => [end, null])),
 });
 
-/** `beep 0.1 Ω`, `OL on 20 MΩ` */
+/** `94.8 Ω on 200 Ω`, `OL on 20 MΩ`, `0.1 Ω on beep, beeps` */
 export function readingText(reading: CapturedReading, settingName: string): string {
   const shown = reading.display === 'OL' ? 'OL' : `${reading.display} ${reading.unit}`;
   const more = [
@@ -30,5 +30,5 @@ export function readingText(reading: CapturedReading, settingName: string): stri
     reading.isRelative ? 'REL' : '',
     reading.isSettled ? '' : 'not settled',
   ].filter(Boolean);
-  return [shown, settingName, ...more].join(', ');
+  return [`${shown} on ${settingName}`, ...more].join(', ');
 }

@@ -48,7 +48,7 @@ describe('the job sheet', () => {
       }));
     });
     const row = screen.getByText('High-voltage transformer').closest('li');
-    expect(within(row ?? document.body).getByText(/94\.8 Ω, 200 Ω, REL/)).toBeInTheDocument();
+    expect(within(row ?? document.body).getByText(/94\.8 Ω on 200 Ω, REL/)).toBeInTheDocument();
     expect(within(row ?? document.body).getByText('T1.HV – T1.core')).toBeInTheDocument();
   });
 
