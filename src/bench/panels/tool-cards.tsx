@@ -117,7 +117,11 @@ const RowGroup = ({ title, children }: { title: string; children: ReactNode }) =
 
 /** The same in one row that scrolls, for a small screen. */
 export const ToolRow = () => (
-  <div role="toolbar" aria-label="Tools" className="flex gap-3 overflow-x-auto pb-0.5">
+  <div
+    role="toolbar"
+    aria-label="Tools"
+    className="flex gap-3 overflow-x-auto pb-0.5 [&_button]:h-8"
+  >
     <RowGroup title="Probes">
       <ProbeTools />
     </RowGroup>

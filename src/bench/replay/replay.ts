@@ -1,6 +1,7 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import type { RecordedEvent } from '../../../shared/bench/event.ts';
-import { evolve, untouched } from '../../../shared/bench/fold.ts';
+import { untouched } from '../../../shared/bench/fold.ts';
+import { apply } from '../../../shared/bench/run-command.ts';
 import type { Setup } from '../../../shared/bench/setup.ts';
 
 export interface Replay {
@@ -17,8 +18,10 @@ export interface Replay {
 export const checkpointEvery = 100;
 
 /**
- * An attempt as it was recorded, any moment of it. States are kept every 100 events as they are
- * reached, and never change what is on record: throw them away and the same ones come back.
+ * An attempt as it was recorded, any moment of it. The circuit is not run through time again: what was
+ * read and what happened stands in the record, and the picture asks for nothing else. So the states
+ * are right but for what is stored in capacitors. They are kept every 100 events as they are reached,
+ * and never change what is on record: throw them away and the same ones come back.
  */
 export function replay(setup: Setup, events: readonly RecordedEvent[]): Replay {
   const kept = new Map<number, BenchState>([[0, untouched(setup)]]);
@@ -30,7 +33,7 @@ export function replay(setup: Setup, events: readonly RecordedEvent[]): Replay {
     let { state } = start;
     for (let i = start.done; i < done; i += 1) {
       const event = events[i];
-      if (event) state = evolve(setup, state, event);
+      if (event) state = apply(setup, { ...state, benchMs: event.benchMs }, event);
       if ((i + 1) % checkpointEvery === 0) kept.set(i + 1, state);
     }
     near = { done, state };
