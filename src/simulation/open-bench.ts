@@ -1,7 +1,6 @@
 import type { StoreApi } from 'zustand/vanilla';
 import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { RecordedEvent, WireEvent } from '../../shared/bench/event.ts';
-import { fold } from '../../shared/bench/fold.ts';
 import { makeSetup, type Setup } from '../../shared/bench/setup.ts';
 import { verify } from '../../shared/bench/verify.ts';
 import type { Attempt } from '../../shared/contracts/attempts.ts';
@@ -9,6 +8,7 @@ import type { OvenLayout } from '../../shared/oven/layout.ts';
 import { benchClock } from './bench-clock.ts';
 import type { BenchServer } from './bench-server.ts';
 import { benchStore, type BenchStore } from './bench-store.ts';
+import { foldFromCheckpoint, keepCheckpoints } from './checkpoints.ts';
 import { outbox, type Outbox } from './outbox.ts';
 import type { OutboxStore } from './outbox-store.ts';
 import type { SaveState } from './save-state.ts';
@@ -96,6 +96,9 @@ async function onTheBench(options: OpenBenchOptions, found: Found): Promise<Open
           onState: (save) => bench.getState().setSave(save),
           now: options.now,
         });
+  const forget = out
+    ? keepCheckpoints(bench, { attempt: attempt.id, store: options.store })
+    : () => undefined;
   void out?.flush();
   void lock?.lost.then(() => {
     out?.stop();
@@ -110,6 +113,7 @@ async function onTheBench(options: OpenBenchOptions, found: Found): Promise<Open
     setAside: start.setAside,
     setStepsAside: () => options.store.setAside(attempt.id, whyClosed(bench.getState().save)),
     close: () => {
+      forget();
       out?.stop();
       lock?.release();
     },
@@ -134,7 +138,7 @@ async function standing(
   record: readonly RecordedEvent[],
   isWriter: boolean,
 ): Promise<Standing> {
-  const state = fold(setup, record.map(withoutRecord));
+  const state = await foldFromCheckpoint(setup, record.map(withoutRecord), { attempt, store });
   const last = record.at(-1);
   const saved: SaveState = { kind: 'saved', at: last ? Date.parse(last.recordedAt) : null };
   const only = { state, waiting: [], setAside: null };

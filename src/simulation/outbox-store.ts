@@ -1,5 +1,6 @@
 import { openDB } from 'idb';
 import type { DBSchema, IDBPDatabase } from 'idb';
+import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
 
 export interface WaitingStep {
@@ -8,6 +9,14 @@ export interface WaitingStep {
 }
 
 /** Steps not yet acknowledged, by attempt and sequence number; kept on this device until the server has them. */
+/** The bench after the first `sequence` events of a record: a cache, good for one engine and one history. */
+export interface Checkpoint {
+  engine: number;
+  sequence: number;
+  /** the event before it, to know the history again */ last: WireEvent;
+  state: BenchState;
+}
+
 export interface OutboxStore {
   /** false: the browser refuses storage, steps live as long as the page */ isKept: boolean;
   /** oldest first */ load: (attempt: string) => Promise<WaitingStep[]>;
@@ -15,6 +24,8 @@ export interface OutboxStore {
   /** forgets all below `next` */ acknowledge: (attempt: string, next: number) => Promise<void>;
   /** Steps that can never be stored leave the way free; they are kept apart, with why. */
   setAside: (attempt: string, why: string) => Promise<void>;
+  checkpoint: (attempt: string) => Promise<Checkpoint | null>;
+  keepCheckpoint: (attempt: string, checkpoint: Checkpoint) => Promise<void>;
 }
 
 interface Row extends WaitingStep {
@@ -27,15 +38,19 @@ interface Stored extends DBSchema {
     key: number;
     value: { attempt: string; why: string; at: string; steps: WaitingStep[] };
   };
+  checkpoints: { key: string; value: Checkpoint & { attempt: string } };
 }
 
 const all = Number.MAX_SAFE_INTEGER;
 
 export async function openOutboxStore(): Promise<OutboxStore> {
-  const database: IDBPDatabase<Stored> = await openDB<Stored>('coldbench', 1, {
-    upgrade: (fresh) => {
-      fresh.createObjectStore('steps', { keyPath: ['attempt', 'sequence'] });
-      fresh.createObjectStore('set-aside', { autoIncrement: true });
+  const database: IDBPDatabase<Stored> = await openDB<Stored>('coldbench', 2, {
+    upgrade: (made, before) => {
+      if (before < 1) {
+        made.createObjectStore('steps', { keyPath: ['attempt', 'sequence'] });
+        made.createObjectStore('set-aside', { autoIncrement: true });
+      }
+      if (before < 2) made.createObjectStore('checkpoints', { keyPath: 'attempt' });
     },
   });
   const below = (attempt: string, next: number): IDBKeyRange =>
@@ -62,6 +77,10 @@ export async function openOutboxStore(): Promise<OutboxStore> {
       await work.objectStore('steps').delete(below(attempt, all));
       await work.done;
     },
+    checkpoint: async (attempt) => (await database.get('checkpoints', attempt)) ?? null,
+    keepCheckpoint: async (attempt, checkpoint) => {
+      await database.put('checkpoints', { ...checkpoint, attempt });
+    },
   };
 }
 
@@ -70,6 +89,7 @@ const withoutAttempt = ({ sequence, event }: Row): WaitingStep => ({ sequence, e
 /** For a browser that refuses storage: steps live as long as the page. */
 export function memoryOutboxStore(): OutboxStore {
   let rows: Row[] = [];
+  const checkpoints = new Map<string, Checkpoint>();
   const isOf = (attempt: string) => (row: Row) => row.attempt === attempt;
   return {
     isKept: false,
@@ -84,6 +104,11 @@ export function memoryOutboxStore(): OutboxStore {
     },
     setAside: (attempt) => {
       rows = rows.filter((row) => row.attempt !== attempt);
+      return Promise.resolve();
+    },
+    checkpoint: (attempt) => Promise.resolve(checkpoints.get(attempt) ?? null),
+    keepCheckpoint: (attempt, checkpoint) => {
+      checkpoints.set(attempt, checkpoint);
       return Promise.resolve();
     },
   };

@@ -1,4 +1,5 @@
 import type { WireEvent } from '../../shared/bench/event.ts';
+import { isSameStep } from './is-same-step.ts';
 import type { WaitingStep } from './outbox-store.ts';
 
 export type Waiting =
@@ -25,17 +26,3 @@ export function waitingSteps(record: readonly WireEvent[], kept: readonly Waitin
   }
   return { kind: 'follow', events: rest.map(({ event }) => event) };
 }
-
-/** Both went through JSON once, so equal steps are equal texts but for the order of their fields. */
-const isSameStep = (a: WireEvent | undefined, b: WireEvent): boolean =>
-  a !== undefined &&
-  a.type === b.type &&
-  a.benchMs === b.benchMs &&
-  sorted(a.data) === sorted(b.data);
-
-const sorted = (value: unknown): string =>
-  JSON.stringify(value, (_key, held: unknown) =>
-    held !== null && typeof held === 'object' && !Array.isArray(held)
-      ? Object.fromEntries(Object.entries(held).sort(([a], [b]) => (a < b ? -1 : 1)))
-      : held,
-  );

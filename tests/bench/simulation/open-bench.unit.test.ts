@@ -90,6 +90,40 @@ describe('opening a bench', () => {
     expect(bench.getState().save).toEqual({ kind: 'saved', at: 5000 });
   });
 
+  it('folds from the checkpoint kept on this device, and only if it belongs to this record', async () => {
+    const { server } = withServer();
+    const store = memoryOutboxStore();
+    const half = await opened({ server: withServer({ known: 2 }).server, store });
+    const state = { ...half.bench.getState().state, inspected: ['C1'] };
+    const [, last] = record;
+    if (!last) throw new Error('no step');
+    await store.keepCheckpoint(attempt.id, { engine: 1, sequence: 2, last, state });
+    // The mark that only the checkpoint has shows that it was used.
+    expect((await opened({ server, store })).bench.getState().state.inspected).toEqual(['C1']);
+    await store.keepCheckpoint(attempt.id, {
+      engine: 1,
+      sequence: 2,
+      last: { ...last, benchMs: last.benchMs + 1 },
+      state,
+    });
+    expect((await opened({ server, store })).bench.getState().state.inspected).toEqual([]);
+    await store.keepCheckpoint(attempt.id, { engine: 0, sequence: 2, last, state });
+    expect((await opened({ server, store })).bench.getState().state.inspected).toEqual([]);
+  });
+
+  it('keeps a checkpoint once the server has many more steps', async () => {
+    const { server } = withServer();
+    const store = memoryOutboxStore();
+    const { bench, outbox } = await opened({ server, store });
+    for (let i = 0; i < 30; i += 1)
+      bench.getState().run({ type: i % 2 ? 'CloseDoor' : 'OpenDoor', data: {} }, 20_000 + i);
+    await outbox?.flush();
+    await outbox?.flush();
+    const kept = await store.checkpoint(attempt.id);
+    expect(kept?.sequence).toBe(record.length + 30);
+    expect(kept?.state).toEqual(bench.getState().state);
+  });
+
   it('sets steps aside that do not follow from the record, and says why', async () => {
     const { server, sent } = withServer();
     const store = memoryOutboxStore();

@@ -6,6 +6,8 @@ import {
   openOutboxStore,
   type OutboxStore,
 } from '../../../src/simulation/outbox-store.ts';
+import { untouched } from '../../../shared/bench/fold.ts';
+import { setupWith } from '../../support/bench.ts';
 import { step } from './events.ts';
 
 const stores: [string, () => Promise<OutboxStore>][] = [
@@ -46,6 +48,17 @@ describe.each(stores)('steps kept %s', (_name, open) => {
     expect(await store.load('a')).toEqual([]);
     await store.add('a', 7, [step('DoorOpened', 2)]);
     expect((await store.load('a')).map(({ event }) => event.type)).toEqual(['DoorOpened']);
+  });
+
+  it('have the newest checkpoint of each attempt beside them', async () => {
+    const store = await open();
+    const state = untouched(setupWith());
+    expect(await store.checkpoint('a')).toBeNull();
+    const checkpoint = { engine: 1, sequence: 7, last: step('CordPulled', 1), state };
+    await store.keepCheckpoint('a', checkpoint);
+    await store.keepCheckpoint('a', { ...checkpoint, sequence: 9 });
+    expect(await store.checkpoint('a')).toMatchObject({ sequence: 9, state });
+    expect(await store.checkpoint('b')).toBeNull();
   });
 });
 
