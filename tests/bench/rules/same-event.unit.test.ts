@@ -1,0 +1,20 @@
+import { describe, expect, it } from 'vitest';
+import { isSameEvent } from '../../../shared/bench/same-event.ts';
+
+const run = (charge: number, waterRise: number, hum = 'normal') => ({
+  type: 'OvenRun',
+  version: 1 as const,
+  benchMs: 104_700,
+  data: { ordered: 60, seconds: 60, hum, waterRise, opened: [], charge: { 'C1:foils': charge } },
+});
+
+describe('two accounts of one run', () => {
+  it('are the same though two JavaScript engines differ in the last bit: Node 20 and Chromium 156', () => {
+    expect(isSameEvent(run(-581.38, 11.6), run(-567.49, 11.56))).toBe(true);
+  });
+
+  it('are not the same when they are a tenth apart, or when something else was heard', () => {
+    expect(isSameEvent(run(-581.38, 11.6), run(-520, 11.6))).toBe(false);
+    expect(isSameEvent(run(-581.38, 11.6), run(-581.38, 11.6, 'loud'))).toBe(false);
+  });
+});
