@@ -10,6 +10,13 @@ const tolerance = 1e-2;
  * and Chromium 156 left 581 and 567 V on the capacitor of one and the same oven, at powers 0.3 % apart.
  */
 const runTolerance = 5e-2;
+/** W, K, A, and V on a capacitor: beside a run's own size this is nothing, beside none at all it is a difference. */
+const runSlack: Record<string, number> = {
+  microwavePower: 10,
+  waterRise: 0.1,
+  current: 0.1,
+  charge: 20,
+};
 
 /** Two machines' accounts of one event: equal, numbers nearly so, a display within one count. */
 export const isSameEvent = (a: WireEvent, b: WireEvent): boolean =>
@@ -18,6 +25,7 @@ export const isSameEvent = (a: WireEvent, b: WireEvent): boolean =>
   isSame(a.data, b.data, {
     key: 'data',
     slack: 0,
+    isRun: a.type === 'OvenRun',
     share: a.type === 'OvenRun' ? runTolerance : tolerance,
   });
 
@@ -25,10 +33,11 @@ interface Judging {
   /** the field under which the two stand */ key: string;
   /** absolute */ slack: number;
   /** relative */ share: number;
+  isRun: boolean;
 }
 
 function isSame(a: unknown, b: unknown, how: Judging): boolean {
-  const { key, slack, share } = how;
+  const { key, slack, share, isRun } = how;
   if (key === 'display' && typeof a === 'string' && typeof b === 'string')
     return isWithinCount(a, b);
   // They follow from the display, on which the judgement is made.
@@ -45,8 +54,9 @@ function isSame(a: unknown, b: unknown, how: Judging): boolean {
     return [...keys].every((one) =>
       isSame((a as Record<string, unknown>)[one], (b as Record<string, unknown>)[one], {
         key: one,
-        slack: worth,
+        slack: Math.max(worth, isRun ? (runSlack[one] ?? (key === 'charge' ? slack : 0)) : 0),
         share,
+        isRun,
       }),
     );
   }
