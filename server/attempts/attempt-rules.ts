@@ -30,6 +30,7 @@ export const attemptRules: AttemptRules = {
       meter: content.meter,
       seed,
       lastRunSecondsAgo: content.lastRunSecondsAgo,
+      condition: content.condition,
     }),
   begin,
   fold: (setup, events, from) => (from ? fold(setup, events, from) : fold(setup, events)),

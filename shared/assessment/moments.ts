@@ -2,6 +2,7 @@ import type { RecordedEvent } from '../bench/event.ts';
 import { evolve, untouched } from '../bench/fold.ts';
 import type { BenchState } from '../bench/bench-state.ts';
 import type { Setup } from '../bench/setup.ts';
+import { undonePlaces } from '../bench/undone.ts';
 import type { SkillResult, Mark, SkillName } from './debrief.ts';
 
 /** An event with the bench just before and just after it: what the rules of assessment read. */
@@ -9,6 +10,7 @@ export interface Moment {
   event: RecordedEvent;
   before: BenchState;
   after: BenchState;
+  /** taken back by a step back */ isUndone: boolean;
 }
 
 export interface Attempt {
@@ -24,18 +26,20 @@ export interface Skill {
 }
 
 export function toMoments(setup: Setup, events: readonly RecordedEvent[]): Attempt {
+  const undone = undonePlaces(events);
   let before = untouched(setup);
-  const moments = events.map((event) => {
+  const moments = events.map((event, place) => {
     const after = evolve(setup, before, event);
-    const moment = { event, before, after };
+    const moment = { event, before, after, isUndone: undone.has(place) };
     before = after;
     return moment;
   });
   return { setup, moments, end: before };
 }
 
+/** What was done and stands; a hazard is never taken back. */
 export const ofType = (attempt: Attempt, ...types: string[]): Moment[] =>
-  attempt.moments.filter(({ event }) => types.includes(event.type));
+  attempt.moments.filter(({ event, isUndone }) => !isUndone && types.includes(event.type));
 
 /** A mark for a moment; without one, for something never done. */
 export const mark = (points: number, why: string, moment?: Moment): Mark => ({

@@ -36,6 +36,7 @@ export interface Action<
   data: D;
   decide: (bench: Bench, input: z.infer<I>) => Decision<z.infer<D>>;
   evolve: (state: BenchState, data: z.infer<D>, setup: Setup) => BenchState;
+  /** It brings back a bench that was: what the tips meet, they had met before. */ isReturning?: true;
   /** for the bench log and the replay */ describe: (data: z.infer<D>) => string;
 }
 

@@ -36,4 +36,17 @@ export interface BenchState {
   runs: readonly RunOutcome[];
   hazards: readonly Hazard[];
   isHandedIn: boolean;
+  /** null: nothing to go back on, or not in this condition */ wayBack: WayBack | null;
+}
+
+/**
+ * The way back to before the last thing done. It is offered, in guided practice, from the hazard that
+ * this thing brought until the next thing is done. What the meter does of itself meanwhile is nobody's
+ * doing and leaves the offer standing.
+ */
+export interface WayBack {
+  /** the bench just before, its own way back forgotten */ before: BenchState;
+  /** what was done: the type of its event */ done: string;
+  /** when, ms of bench time */ atMs: number;
+  isOffered: boolean;
 }

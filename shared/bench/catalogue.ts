@@ -20,6 +20,7 @@ import { cleanSpot, inspectPart, replacePart } from './actions/parts.ts';
 import { placeProbe, removeProbe } from './actions/probes.ts';
 import { runOven } from './actions/run.ts';
 import { giveVerdict, handIn, stateCause, writeReport } from './actions/sheet.ts';
+import { stepBack } from './actions/step-back.ts';
 import {
   closeDoor,
   fitCover,
@@ -65,6 +66,7 @@ const actions = [
   replacePart,
   runOven,
   wait,
+  stepBack,
   giveVerdict,
   stateCause,
   writeReport,

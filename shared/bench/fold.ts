@@ -24,6 +24,7 @@ export const untouched = (setup: Setup): BenchState => ({
   runs: [],
   hazards: [],
   isHandedIn: false,
+  wayBack: null,
 });
 
 /** One event further: time first, then what happened. */

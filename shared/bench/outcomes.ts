@@ -41,6 +41,7 @@ export const hazardHappened = outcome({
   evolve: (state, data, setup) => ({
     ...afterHazard(setup, state, data),
     hazards: [...state.hazards, { ...data, benchMs: state.benchMs }],
+    wayBack: state.wayBack && { ...state.wayBack, isOffered: true },
   }),
   describe: (data) => `${hazardWords[data.kind]}${data.at ? ` at ${data.at}` : ''}`,
 });

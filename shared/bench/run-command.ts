@@ -1,12 +1,13 @@
 import type { Refusal } from './action.ts';
 import type { BenchState } from './bench-state.ts';
 import type { BenchCommand } from './catalogue.ts';
-import { actionByCommand, evolverByEvent } from './catalogue.ts';
+import { actionByCommand, actionByEvent, evolverByEvent } from './catalogue.ts';
 import type { WireEvent } from './event.ts';
 import type { HazardFound } from './hazards.ts';
 import { meterHazards } from './hazards.ts';
 import { passTime } from './pass-time.ts';
 import type { Setup } from './setup.ts';
+import { withWayBack } from './way-back.ts';
 
 export type Ran =
   { ok: true; events: WireEvent[]; state: BenchState } | { ok: false; refusal: Refusal };
@@ -33,7 +34,8 @@ export function runCommand(
   const hurt = decision.hazards.map((hazard) => wire('HazardHappened', hazard, atMs));
   const events = [primary, ...hurt];
   let after = events.reduce((bench, event) => apply(setup, bench, event), state);
-  for (const hazard of landed(setup, state, after)) {
+  const met = action.isReturning ? [] : landed(setup, state, after);
+  for (const hazard of met) {
     const event = wire('HazardHappened', hazard, atMs);
     events.push(event);
     after = apply(setup, after, event);
@@ -45,7 +47,9 @@ export function runCommand(
 export function apply(setup: Setup, state: BenchState, event: WireEvent): BenchState {
   const evolver = evolverByEvent.get(event.type);
   if (!evolver) throw new Error(`no evolver for ${event.type}`);
-  return evolver.evolve(state, evolver.data.parse(event.data), setup);
+  const after = evolver.evolve(state, evolver.data.parse(event.data), setup);
+  const action = actionByEvent.get(event.type);
+  return action && !action.isReturning ? withWayBack(setup, state, after, event) : after;
 }
 
 /** The tips meet something new: their own hazards come after the action. */

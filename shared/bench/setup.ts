@@ -7,7 +7,7 @@ import type { DrawnOven } from '../oven/oven-state.ts';
 import type { OvenDefinition } from '../oven/oven.ts';
 
 /** Written into every attempt: which rules and circuit engine judged it. */
-export const engineVersion = 1;
+export const engineVersion = 2;
 
 /** What does not change during an attempt: the drawn oven, its faults and the meter handed out. */
 export interface Setup {
@@ -18,6 +18,7 @@ export interface Setup {
   seed: number;
   /** s since the oven last ran when the attempt begins; null: not for days */
   lastRunSecondsAgo: number | null;
+  /** guided practice: after a hazard the bench offers the way back */ mayStepBack: boolean;
 }
 
 export interface SetupInput {
@@ -26,6 +27,7 @@ export interface SetupInput {
   meter: string;
   seed: number;
   lastRunSecondsAgo: number | null;
+  condition: 'guided' | 'unaided' | 'assessed';
 }
 
 /** The same seed draws the same oven and the same meter for ever. */
@@ -38,5 +40,6 @@ export function makeSetup(input: SetupInput): Setup {
     unit: drawMeter(meter, input.seed),
     seed: input.seed,
     lastRunSecondsAgo: input.lastRunSecondsAgo,
+    mayStepBack: input.condition === 'guided',
   };
 }

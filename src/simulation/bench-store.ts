@@ -6,6 +6,7 @@ import type { WireEvent } from '../../shared/bench/event.ts';
 import type { MeterView } from '../../shared/bench/reading.ts';
 import { runCommand } from '../../shared/bench/run-command.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
+import { isMetersOwn } from '../../shared/bench/way-back.ts';
 import type { Condition } from '../../shared/scenario/scenario.ts';
 import { tapWith } from '../bench/tools/catalogue.ts';
 import { takenOff } from '../bench/tools/taken-off.ts';
@@ -107,12 +108,13 @@ function acting(
     return false;
   };
   const run: BenchStore['run'] = (command, atMs) => {
-    const { state, events, save, notice } = get();
+    const { state, events, save, notice, hand } = get();
     if (isClosedTo(save)) return refuse(save.why);
     const ran = runCommand(setup, state, command, Math.max(atMs ?? clock.now(), state.benchMs));
     if (!ran.ok) return refuse(ran.refusal.message);
     const hazard = ran.events.find((event) => event.type === 'HazardHappened');
-    const isStillNews = notice?.kind === 'hazard' && command.type === 'TakeReading';
+    const isStillNews =
+      notice?.kind === 'hazard' && ran.events.every((event) => isMetersOwn(setup, state, event));
     set({
       state: ran.state,
       events: [...events, ...ran.events],
@@ -123,6 +125,7 @@ function acting(
           : null,
       // What happened comes before what was being looked at.
       ...(hazard ? { selection: null } : {}),
+      ...(command.type === 'StepBack' ? { hand: handAfter(hand, ran.state) } : {}),
     });
     onEvents(ran.events);
     return true;
@@ -137,6 +140,10 @@ function acting(
     operate: (seconds) => pass(seconds * 1000, { type: 'RunOven', data: { ordered: seconds } }),
   };
 }
+
+/** Stepping back empties the hand, but for a tip that is held where it was. */
+const handAfter = (hand: Hand, { discharge }: BenchState): Hand =>
+  hand.kind === 'discharge-tip' && discharge.tip ? hand : emptyHand;
 
 const nextId = (notice: Notice | null): number => (notice?.id ?? 0) + 1;
 

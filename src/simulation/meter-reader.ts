@@ -50,7 +50,9 @@ export function workerReader(setup: Setup, makeWorker: () => Worker): MeterReade
         worker ??= begin();
         last += 1;
         waiting.set(last, { resolve, reject });
-        worker.postMessage({ id: last, state, atMs } satisfies MeterQuestion);
+        // A display asks nothing of the way back, and copying it takes time.
+        const asked = { ...state, wayBack: null };
+        worker.postMessage({ id: last, state: asked, atMs } satisfies MeterQuestion);
       }),
     stop: () => worker?.terminate(),
   };

@@ -4,7 +4,7 @@ import { begin } from '../../shared/bench/begin.ts';
 import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { RecordedEvent, WireEvent } from '../../shared/bench/event.ts';
 import { runCommand } from '../../shared/bench/run-command.ts';
-import type { Setup } from '../../shared/bench/setup.ts';
+import type { Setup, SetupInput } from '../../shared/bench/setup.ts';
 import { makeSetup } from '../../shared/bench/setup.ts';
 import type { AppliedFault } from '../../shared/oven/fault.ts';
 import { ovenDefinition } from '../../shared/oven/oven.ts';
@@ -15,7 +15,7 @@ export const lc28 = ovenDefinition.parse(JSON.parse(file));
 
 export const setupWith = (
   faults: readonly AppliedFault[] = [],
-  more: Partial<{ seed: number; lastRunSecondsAgo: number | null; meter: string }> = {},
+  more: Partial<Omit<SetupInput, 'definition' | 'faults'>> = {},
 ): Setup =>
   makeSetup({
     definition: lc28,
@@ -23,6 +23,7 @@ export const setupWith = (
     meter: 'manual-2000',
     seed: 417,
     lastRunSecondsAgo: null,
+    condition: 'unaided',
     ...more,
   });
 

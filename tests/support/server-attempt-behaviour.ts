@@ -45,6 +45,7 @@ const state: BenchState = {
   runs: [],
   hazards: [],
   isHandedIn: false,
+  wayBack: null,
 };
 
 const debrief: Debrief = {

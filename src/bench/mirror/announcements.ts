@@ -25,13 +25,14 @@ export function announcementsFor(before: BenchStore, now: BenchStore): string[] 
   ];
 }
 
-function noticeWords(before: BenchStore, { notice }: BenchStore): string[] {
+function noticeWords(before: BenchStore, { notice, state }: BenchStore): string[] {
   if (!notice || notice.id === before.notice?.id) return [];
   if (notice.kind === 'refusal') return [notice.text];
   const data = hazard.safeParse(notice.event.data);
   if (!data.success) return [];
   const { title, happened, person } = hazardWords(data.data);
-  return [`Hazard. ${title}. ${happened} ${person}`];
+  const offer = state.wayBack?.isOffered ? ' You can step back.' : '';
+  return [`Hazard. ${title}. ${happened} ${person}${offer}`];
 }
 
 function eventWords(before: BenchStore, { events, setup }: BenchStore): string[] {

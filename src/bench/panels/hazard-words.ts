@@ -70,7 +70,7 @@ const byKind: Readonly<Record<HazardData['kind'], (data: HazardData) => HazardWo
     happened: `${volts(data)} stood between ${pair(data)}, more than this setting bears.`,
     person:
       'A meter that fails on high voltage can burst in your hand, and the arc runs along the leads.',
-    meter: 'It is dead, and stays dead for this attempt.',
+    meter: 'It is dead and shows nothing more.',
     first:
       'Never put a meter on high voltage. Discharge the capacitor through the discharge lead first, then prove it dead.',
   }),

@@ -14,6 +14,8 @@ const Row = ({ label, text }: { label: string; text: string }) => (
 
 const HazardPanel = ({ data, onClose }: { data: HazardData; onClose: () => void }) => {
   const isGuided = useBench(({ condition }) => condition === 'guided');
+  const isOffered = useBench(({ state }) => state.wayBack?.isOffered === true);
+  const run = useBench((store) => store.run);
   const words = hazardWords(data);
   return (
     <section
@@ -31,10 +33,21 @@ const HazardPanel = ({ data, onClose }: { data: HazardData; onClose: () => void 
         {isGuided ? <Row label="First" text={words.first} /> : null}
       </dl>
       <div className="flex flex-wrap items-center justify-between gap-3">
-        <p className="text-sm text-bench-ink-2">This is in the record.</p>
-        <BenchButton isMain onClick={onClose}>
-          Go on
-        </BenchButton>
+        <p className="text-sm text-bench-ink-2">
+          {isOffered
+            ? 'Step back, and the bench is as it was before this. It stays in the record.'
+            : 'This is in the record.'}
+        </p>
+        <div className="ml-auto flex gap-2">
+          {isOffered ? (
+            <BenchButton isMain onClick={() => run({ type: 'StepBack', data: {} })}>
+              Step back
+            </BenchButton>
+          ) : null}
+          <BenchButton isMain={!isOffered} onClick={onClose}>
+            Go on
+          </BenchButton>
+        </div>
       </div>
     </section>
   );

@@ -1,5 +1,6 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import type { WireEvent } from '../../../shared/bench/event.ts';
+import { withoutUndone } from '../../../shared/bench/undone.ts';
 import type { OvenDefinition } from '../../../shared/oven/oven.ts';
 import { liftedEnds } from '../../../shared/oven/targets.ts';
 
@@ -22,7 +23,7 @@ export function openPoints(
   const unreplaced = faulty.filter((part) => !state.replaced.includes(part));
   const inUse = toolsOn(state);
   const tested = definition.parts.filter(({ ref }) => isJudged(sheet.verdicts[ref])).length;
-  const isRun = isRunAfterRepair(events);
+  const isRun = isRunAfterRepair(withoutUndone(events));
   const written = sheet.report.repair.trim() !== '' && sheet.report.customer.trim() !== '';
   const point = (id: string, text: string, isDone: boolean, open: string): Point => ({
     id,

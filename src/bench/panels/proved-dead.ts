@@ -1,5 +1,6 @@
 import type { WireEvent } from '../../../shared/bench/event.ts';
 import { shownReading } from '../../../shared/bench/record.ts';
+import { withoutUndone } from '../../../shared/bench/undone.ts';
 import { terminalsOf } from '../../../shared/oven/targets.ts';
 import type { OvenDefinition } from '../../../shared/oven/oven.ts';
 
@@ -13,8 +14,9 @@ const deadBelow = 1;
  */
 export function provedDead(
   definition: OvenDefinition,
-  events: readonly WireEvent[],
+  record: readonly WireEvent[],
 ): { part: string; name: string; atMs: number }[] {
+  const events = withoutUndone(record);
   return definition.parts
     .filter(({ kind }) => kind === 'hv-capacitor')
     .flatMap(({ ref, name }) => {

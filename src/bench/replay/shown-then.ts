@@ -43,4 +43,5 @@ const changesDisplay = new Set([
   'CordPlugged',
   'CordPulled',
   'OvenRun',
+  'SteppedBack',
 ]);

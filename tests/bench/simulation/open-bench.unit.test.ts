@@ -1,5 +1,6 @@
 import { describe, expect, it, vi } from 'vitest';
 import type { WireEvent } from '../../../shared/bench/event.ts';
+import { engineVersion } from '../../../shared/bench/setup.ts';
 import type { Attempt } from '../../../shared/contracts/attempts.ts';
 import type { BenchServer } from '../../../src/simulation/bench-server.ts';
 import {
@@ -97,11 +98,11 @@ describe('opening a bench', () => {
     const state = { ...half.bench.getState().state, inspected: ['C1'] };
     const [, last] = record;
     if (!last) throw new Error('no step');
-    await store.keepCheckpoint(attempt.id, { engine: 1, sequence: 2, last, state });
+    await store.keepCheckpoint(attempt.id, { engine: engineVersion, sequence: 2, last, state });
     // The mark that only the checkpoint has shows that it was used.
     expect((await opened({ server, store })).bench.getState().state.inspected).toEqual(['C1']);
     await store.keepCheckpoint(attempt.id, {
-      engine: 1,
+      engine: engineVersion,
       sequence: 2,
       last: { ...last, benchMs: last.benchMs + 1 },
       state,
