@@ -4,6 +4,7 @@ import type { TargetRef } from '../oven/oven.ts';
 import type { BenchState } from './bench-state.ts';
 import { circuitOf, pairOf } from './pass-time.ts';
 import type { Setup } from './setup.ts';
+import { magnitude } from '../engine/elementary/magnitude.ts';
 
 /** V rms between two targets while the cord is in. Neutral is earthed at the supply. */
 export function liveVolts(
@@ -15,7 +16,7 @@ export function liveVolts(
   if (!solved) return 0;
   const [at, to] = pairOf(state, a, b).map(solved);
   if (!at || !to) return 0;
-  return Math.hypot(at[0] - to[0], at[1] - to[1]);
+  return magnitude(at[0] - to[0], at[1] - to[1]);
 }
 
 /** Phasors (V rms, re and im) of every node with mains at the plug; null when the cord is out. */

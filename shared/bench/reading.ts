@@ -8,6 +8,8 @@ import type { Passed } from './pass-time.ts';
 import { pairOf, passTime } from './pass-time.ts';
 import type { ShownReading } from './record.ts';
 import type { Setup } from './setup.ts';
+import { magnitude } from '../engine/elementary/magnitude.ts';
+import { sin } from '../engine/elementary/sine.ts';
 
 /** ms between two readings: three a second. */
 export const readingPeriod = 1000 / 3;
@@ -95,7 +97,7 @@ function withMains(setup: Setup, state: BenchState, trace: Trace): Trace {
   if (!solved || !red || !black) return trace;
   const [a, b] = pairOf(state, red, black).map(solved);
   if (!a || !b) return trace;
-  const peak = Math.SQRT2 * Math.hypot(a[0] - b[0], a[1] - b[1]);
+  const peak = Math.SQRT2 * magnitude(a[0] - b[0], a[1] - b[1]);
   if (peak < 1e-3) return trace;
   const { hertz } = setup.oven.definition.supply;
   const standing = trace.volts.at(-1) ?? 0;
@@ -103,6 +105,6 @@ function withMains(setup: Setup, state: BenchState, trace: Trace): Trace {
   const time = Array.from({ length: 201 }, (_, i) => end - 0.1 + i * 0.0005);
   return {
     time,
-    volts: time.map((t) => standing + peak * Math.sin(2 * Math.PI * hertz * t)),
+    volts: time.map((t) => standing + peak * sin(2 * Math.PI * hertz * t)),
   };
 }

@@ -5,6 +5,7 @@
  *   capacitance: C = Im(Y) / w
  * Sources: ratiometric ohms and dual-slope mean: FACTS section 4.1; 1.1107 = pi / (2 sqrt 2).
  */
+import { square } from '../engine/elementary/power.ts';
 import type {
   ActiveSetting,
   DiodeSetting,
@@ -56,7 +57,7 @@ function alternating(setting: VoltsSetting, { trace }: Found): number {
   const window = refined(lastOf(trace, WINDOW), FINE);
   const mean = meanOf(window);
   if (setting.response === 'true-rms')
-    return Math.sqrt(meanOf(mapped(window, (volts) => (volts - mean) ** 2)));
+    return Math.sqrt(meanOf(mapped(window, (volts) => square(volts - mean))));
   return FORM_FACTOR * meanOf(mapped(window, (volts) => Math.abs(volts - mean)));
 }
 

@@ -6,6 +6,7 @@
  */
 import type { MeterDefinition, Setting, Trace } from './meter.ts';
 import { settingOf } from './meters.ts';
+import { exp } from '../engine/elementary/exponential.ts';
 
 export const lagSecondsOf = (setting: Setting): number =>
   setting.function === 'ohms' ? (setting.lagSeconds ?? 0) : 0;
@@ -18,7 +19,7 @@ export function filtered({ time, volts }: Trace, tau: number, before: number | n
     const width = (time[index] ?? 0) - (time[index - 1] ?? time[index] ?? 0);
     if (width <= 0) return held;
     const slope = (to - from) / width;
-    held = (held - from + slope * tau) * Math.exp(-width / tau) + from + slope * (width - tau);
+    held = (held - from + slope * tau) * exp(-width / tau) + from + slope * (width - tau);
     return held;
   });
   return { time, volts: out };

@@ -4,6 +4,7 @@ import { lagAlong } from './lag.ts';
 import type { ActiveSetting, MeterDefinition, MeterUnit, Reading, Trace } from './meter.ts';
 import { settingOf } from './meters.ts';
 import { peakOf } from './trace-window.ts';
+import { powerOfTen } from '../engine/elementary/power.ts';
 
 export interface ReadInput {
   meter: MeterDefinition;
@@ -34,7 +35,7 @@ const nothing: Reading = {
 };
 
 function shown(setting: ActiveSetting, counts: number): string {
-  return (counts / 10 ** setting.scale.decimals).toFixed(setting.scale.decimals);
+  return (counts / powerOfTen(setting.scale.decimals)).toFixed(setting.scale.decimals);
 }
 
 function overRange(setting: ActiveSetting): Reading {
@@ -53,7 +54,7 @@ function nonsense(setting: ActiveSetting, { unit, readingNumber }: ReadInput): R
 function measured(setting: ActiveSetting, input: ReadInput): Reading {
   const { scale, spec } = setting;
   const { unit, relative, readingNumber } = input;
-  const step = scale.size / 10 ** scale.decimals;
+  const step = scale.size / powerOfTen(scale.decimals);
   const found = find(setting, input.meter, input);
   if (!Number.isFinite(found)) return overRange(setting);
   const gain = (unit.gain[setting.function] * spec.percent) / 100;

@@ -1,3 +1,4 @@
+import { square } from '../../engine/elementary/power.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
 import type { PartKindName } from '../../oven/oven.ts';
 import { asFitted } from '../../oven/initial-state.ts';
@@ -147,7 +148,7 @@ function fuseTime(oven: DrawnOven, state: OvenState, ref: string, ran: Electrica
   const wrong = state.faults.find((fault) => fault.on === ref && fault.fault === 'wrong-rating');
   const fitted = wrong?.values?.['amps'] ?? rating;
   // Of one make, the melting integral goes with the square of the rating.
-  return meltingTime(ran.current(`${ref}:element`), melting * (fitted / rating) ** 2, fitted);
+  return meltingTime(ran.current(`${ref}:element`), melting * square(fitted / rating), fitted);
 }
 
 /** V by element name; below 30 V nobody is concerned. */

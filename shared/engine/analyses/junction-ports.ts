@@ -32,7 +32,7 @@ export function junctionPorts(machine: Machine): JunctionPorts {
     response[size] = 0;
     return response;
   });
-  const z = new Float64Array(junctions.length ** 2);
+  const z = new Float64Array(junctions.length * junctions.length);
   responses.forEach((response, j) => {
     junctions.forEach((_, k) => (z[k * junctions.length + j] = read(response, k)));
   });

@@ -6,6 +6,7 @@ import {
 } from '../stamping/phasor-system.ts';
 import { REFERENCE } from '../stamping/system.ts';
 import type { Machine } from './machine.ts';
+import { cos, sin } from '../elementary/sine.ts';
 
 /** Writes every branch at angular frequency omega (rad/s), junctions linear as they stand. */
 export function stampPhasor(system: PhasorSystem, machine: Machine, omega: number): void {
@@ -42,8 +43,8 @@ export function setPhasorSources(system: PhasorSystem, machine: Machine): void {
   for (const { element, branch } of machine.sources) {
     if (element.ac === undefined) continue;
     const phase = (element.ac.phaseDegrees * Math.PI) / 180;
-    const real = element.ac.magnitude * Math.cos(phase);
-    const imaginary = element.ac.magnitude * Math.sin(phase);
+    const real = element.ac.magnitude * cos(phase);
+    const imaginary = element.ac.magnitude * sin(phase);
     if (branch >= 0) add(nodeCount + branch, real, imaginary);
     else {
       const [from, to] = element.nodes;

@@ -1,5 +1,7 @@
 import type { Wave } from './circuit.ts';
 import { cornerWidth } from './wave-value.ts';
+import { exp } from '../elementary/exponential.ts';
+import { cos, sin } from '../elementary/sine.ts';
 
 /** d/dt of a source's wave (V/s or A/s) at a time (s); at a corner, of the side asked for. */
 export function waveSlope(wave: Wave, time: number, side: -1 | 1): number {
@@ -11,8 +13,8 @@ export function waveSlope(wave: Wave, time: number, side: -1 | 1): number {
       if (since < 0 || (since === 0 && side < 0)) return 0;
       const omega = 2 * Math.PI * wave.frequency;
       const angle = omega * since + (wave.phaseDegrees * Math.PI) / 180;
-      const turning = omega * Math.cos(angle) - wave.damping * Math.sin(angle);
-      return wave.amplitude * Math.exp(-since * wave.damping) * turning;
+      const turning = omega * cos(angle) - wave.damping * sin(angle);
+      return wave.amplitude * exp(-since * wave.damping) * turning;
     }
     case 'pulse':
       return pulseSlope(wave, time, side);

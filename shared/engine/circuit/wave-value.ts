@@ -1,4 +1,6 @@
 import type { Wave } from './circuit.ts';
+import { exp } from '../elementary/exponential.ts';
+import { sin } from '../elementary/sine.ts';
 
 /**
  * The value of a source's wave (V or A) at a time (s), as SPICE defines them:
@@ -15,11 +17,10 @@ export function waveValue(wave: Wave, time: number, side: -1 | 1 = 1): number {
     case 'sine': {
       const phase = (wave.phaseDegrees * Math.PI) / 180;
       const since = time - wave.delay;
-      if (since <= 0) return wave.offset + wave.amplitude * Math.sin(phase);
-      const decay = wave.damping === 0 ? 1 : Math.exp(-since * wave.damping);
+      if (since <= 0) return wave.offset + wave.amplitude * sin(phase);
+      const decay = wave.damping === 0 ? 1 : exp(-since * wave.damping);
       return (
-        wave.offset +
-        wave.amplitude * decay * Math.sin(2 * Math.PI * wave.frequency * since + phase)
+        wave.offset + wave.amplitude * decay * sin(2 * Math.PI * wave.frequency * since + phase)
       );
     }
     case 'pulse':

@@ -1,3 +1,6 @@
+import { log } from '../elementary/logarithm.ts';
+import { power } from '../elementary/power.ts';
+
 export type Spacing = 'dec' | 'oct' | 'lin';
 
 /**
@@ -21,9 +24,9 @@ export function sweepFrequencies(
       case 'lin':
         return first + ((last - first) * point) / intervals;
       case 'oct':
-        return first * 2 ** (point / count);
+        return first * power(2, point / count);
       case 'dec':
-        return first * (last / first) ** (point / intervals);
+        return first * power(last / first, point / intervals);
     }
   };
   return Array.from({ length: intervals + 1 }, (_, point) => at(point));
@@ -38,8 +41,8 @@ function intervalsOf(spacing: Spacing, count: number, first: number, last: numbe
     case 'lin':
       return count - 1;
     case 'oct':
-      return Math.floor(Math.log2(last / first) * count + ROUNDING);
+      return Math.floor((log(last / first) / Math.LN2) * count + ROUNDING);
     case 'dec':
-      return Math.floor(Math.log10(last / first) * count + ROUNDING);
+      return Math.floor((log(last / first) / Math.LN10) * count + ROUNDING);
   }
 }

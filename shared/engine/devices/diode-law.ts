@@ -15,6 +15,7 @@
  * Sources: W. Shockley, Bell Syst. Tech. J. 28 (1949) 435-489; ngspice manual, chapter on diodes,
  * for the meaning of BV, IBV and the cubic tail.
  */
+import { exp, expm1 } from '../elementary/exponential.ts';
 export type JunctionLaw = 'shockley' | 'spice';
 
 export interface Junction {
@@ -59,23 +60,23 @@ export function linearise(junction: Junction, voltage: number): void {
 function setForward(junction: Junction, voltage: number): void {
   const { saturation, slope } = junction;
   const exponent = voltage / slope;
-  const grown = Math.exp(Math.min(exponent, LARGEST_EXPONENT));
+  const grown = exp(Math.min(exponent, LARGEST_EXPONENT));
   const beyond = Math.max(0, exponent - LARGEST_EXPONENT);
-  junction.current =
-    beyond > 0 ? saturation * grown * (1 + beyond) : saturation * Math.expm1(exponent);
+  junction.current = beyond > 0 ? saturation * grown * (1 + beyond) : saturation * expm1(exponent);
   junction.conductance = (saturation * grown) / slope;
 }
 
 function setTail(junction: Junction, voltage: number): void {
   const { saturation, slope } = junction;
-  const tail = ((3 * slope) / (Math.E * voltage)) ** 3;
+  const share = (3 * slope) / (Math.E * voltage);
+  const tail = share * share * share;
   junction.current = -saturation * (1 + tail);
   junction.conductance = (3 * saturation * tail) / voltage;
 }
 
 function addBreakdown(junction: Junction, voltage: number): void {
   const exponent = -(voltage + junction.breakdown) / junction.slope;
-  const grown = junction.breakdownCurrent * Math.exp(Math.min(exponent, LARGEST_EXPONENT));
+  const grown = junction.breakdownCurrent * exp(Math.min(exponent, LARGEST_EXPONENT));
   const beyond = Math.max(0, exponent - LARGEST_EXPONENT);
   junction.current -= grown * (1 + beyond);
   junction.conductance += grown / junction.slope;

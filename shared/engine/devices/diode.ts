@@ -3,6 +3,7 @@ import { setConductiveBranch, setResistiveBranch } from '../stamping/branch-equa
 import { REFERENCE, type System } from '../stamping/system.ts';
 import { DEFAULT_CURRENT, matchBreakdown } from './match-breakdown.ts';
 import { linearise, type Junction, type JunctionLaw } from './diode-law.ts';
+import { log } from '../elementary/logarithm.ts';
 
 /**
  * A junction in series with RS, as one branch. With the junction linear about v0,
@@ -27,7 +28,7 @@ export function createJunction(
         ? matchBreakdown(model, thermalVoltage)
         : (model.breakdownVoltage ?? Infinity),
     breakdownCurrent: law === 'spice' ? saturation : (model.breakdownCurrent ?? DEFAULT_CURRENT),
-    critical: slope * Math.log(slope / (Math.SQRT2 * saturation)),
+    critical: slope * log(slope / (Math.SQRT2 * saturation)),
     law,
     voltage: 0,
     current: 0,

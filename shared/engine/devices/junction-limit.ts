@@ -1,4 +1,5 @@
 import type { Junction } from './diode-law.ts';
+import { log } from '../elementary/logarithm.ts';
 
 /**
  * Keeps an iterate of Newton's method where the exponential can be trusted: a forward step beyond
@@ -19,7 +20,7 @@ export function limitJunction(junction: Junction, wanted: number): number {
 function limitForward(junction: Junction, wanted: number, last: number): number {
   const { slope, critical } = junction;
   if (wanted <= critical || Math.abs(wanted - last) <= 2 * slope) return wanted;
-  if (last <= 0) return slope * Math.log(wanted / slope);
+  if (last <= 0) return slope * log(wanted / slope);
   const growth = 1 + (wanted - last) / slope;
-  return growth > 0 ? last + slope * Math.log(growth) : critical;
+  return growth > 0 ? last + slope * log(growth) : critical;
 }

@@ -1,4 +1,5 @@
 import type { DiodeModel } from '../circuit/circuit.ts';
+import { log, log1p } from '../elementary/logarithm.ts';
 
 /**
  * Where other simulators let breakdown begin, V: x such that IS exp(-(v + x) / a) meets IBV at -BV,
@@ -12,10 +13,10 @@ export function matchBreakdown(model: DiodeModel, thermalVoltage: number): numbe
   if (breakdownVoltage === Infinity) return Infinity;
   if (current < (saturationCurrent * breakdownVoltage) / thermalVoltage) return breakdownVoltage;
   const slope = emission * thermalVoltage;
-  let start = breakdownVoltage - slope * Math.log1p(current / saturationCurrent);
+  let start = breakdownVoltage - slope * log1p(current / saturationCurrent);
   for (let round = 0; round < 25; round += 1) {
     const share = current / saturationCurrent + 1 - start / thermalVoltage;
-    start = breakdownVoltage - slope * Math.log(share);
+    start = breakdownVoltage - slope * log(share);
   }
   return start;
 }

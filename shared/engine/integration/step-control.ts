@@ -3,13 +3,14 @@
  * A step that would change by less than a fifth is kept: a linear circuit then needs no factoring.
  * Source: E. Hairer, S. P. Norsett, G. Wanner, Solving Ordinary Differential Equations I, II.4.
  */
+import { power } from '../elementary/power.ts';
 const SAFETY = 0.9;
 const MOST_GROWTH = 10;
 const MOST_SHRINKING = 0.1;
 const NOT_WORTH_FACTORING = 1.2;
 
-export function nextStep(length: number, error: number, power: number): number {
-  const wanted = error > 0 ? SAFETY * error ** (-1 / power) : MOST_GROWTH;
+export function nextStep(length: number, error: number, order: number): number {
+  const wanted = error > 0 ? SAFETY * power(error, -1 / order) : MOST_GROWTH;
   if (wanted >= 1 && wanted < NOT_WORTH_FACTORING) return length;
   return length * Math.min(MOST_GROWTH, Math.max(MOST_SHRINKING, wanted));
 }

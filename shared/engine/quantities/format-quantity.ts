@@ -1,3 +1,6 @@
+import { log } from '../elementary/logarithm.ts';
+import { powerOfTen } from '../elementary/power.ts';
+
 /** Prefixes of the SI by powers of a thousand, from pico to tera. */
 const PREFIXES = ['p', 'n', 'µ', 'm', '', 'k', 'M', 'G', 'T'] as const;
 const NO_PREFIX = PREFIXES.indexOf('');
@@ -15,8 +18,8 @@ export function formatQuantity(value: number, unit: string, digits: number = 3):
   if (size === 0) return `0 ${unit}`;
   // rounding first, so that 999.6 carries into the next prefix
   const rounded = Number(size.toPrecision(digits));
-  const thousands = Math.floor(Math.floor(Math.log10(rounded) + 1e-12) / 3);
+  const thousands = Math.floor(Math.floor(log(rounded) / Math.LN10 + 1e-12) / 3);
   const place = Math.min(PREFIXES.length - 1, Math.max(0, thousands + NO_PREFIX));
-  const scaled = Number((rounded / 1000 ** (place - NO_PREFIX)).toPrecision(digits));
+  const scaled = Number((rounded / powerOfTen(3 * (place - NO_PREFIX))).toPrecision(digits));
   return `${sign}${scaled} ${PREFIXES[place]!}${unit}`;
 }

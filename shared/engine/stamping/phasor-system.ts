@@ -1,6 +1,7 @@
 import type { Netlist } from '../circuit/netlist.ts';
 import { phasorLayoutOf, type PhasorEntry, type PhasorLayout } from './phasor-layout.ts';
 import { REFERENCE } from './system.ts';
+import { magnitude } from '../elementary/magnitude.ts';
 
 /**
  * The equations of a circuit at one frequency, in complex amplitudes, one row a node and one row a
@@ -54,7 +55,7 @@ export function setImpedance(
   resistance: number,
   reactance: number,
 ): number {
-  const size = Math.hypot(resistance, reactance) / REFERENCE;
+  const size = magnitude(resistance, reactance) / REFERENCE;
   const scale = size > 1 ? 1 / size : 1;
   setEntry(system, system.fromEntry[k]!, scale, 0);
   setEntry(system, system.toEntry[k]!, -scale, 0);
@@ -70,7 +71,7 @@ export function setAdmittance(
   conductance: number,
   susceptance: number,
 ): void {
-  const scaled = REFERENCE * Math.hypot(conductance, susceptance);
+  const scaled = REFERENCE * magnitude(conductance, susceptance);
   const scale = scaled > 1 ? 1 / scaled : 1;
   const real = scale * REFERENCE * conductance;
   const imaginary = scale * REFERENCE * susceptance;

@@ -3,6 +3,7 @@
  *   L(secondary) = L(primary) (V2 / 120)^2, coupling 0.98.
  * At DC: three separate resistances. Source: ENGINE section 3 and FACTS section 13, common practice.
  */
+import { square } from '../../engine/elementary/power.ts';
 import type { FaultKind } from '../fault.ts';
 import type { PartContext, PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
@@ -56,7 +57,7 @@ function wound({ node, inner, value, faults: applied }: PartContext) {
   const winding = (name: string, from: string, to: string, volts: number, linkage: number) => ({
     name: inner(name),
     nodes: [node(from), node(to)] as const,
-    inductance: value('inductance') * (volts / SUPPLY_VOLTS) ** 2,
+    inductance: value('inductance') * square(volts / SUPPLY_VOLTS),
     resistance: value(name),
     isOpen: fault.has(`${name}-open`),
     linkage,

@@ -7,6 +7,7 @@
  * Sources: ENGINE section 3; resistances: service manuals SM-1 to SM-3 in FACTS section 6.1;
  * shorted turns: FACTS section 6.3.
  */
+import { square } from '../../engine/elementary/power.ts';
 import type { Element } from '../../engine/circuit/circuit.ts';
 import type { FaultKind } from '../fault.ts';
 import type { PartContext, PartKind } from '../part-kind.ts';
@@ -109,7 +110,7 @@ function primaryAndHeater({ node, inner, value }: PartContext, fault: FaultReade
     {
       name: inner('heater'),
       nodes: [node('H1'), node('H2')],
-      inductance: value('primaryInductance') * (value('heaterVolts') / value('supplyVolts')) ** 2,
+      inductance: value('primaryInductance') * square(value('heaterVolts') / value('supplyVolts')),
       resistance: value('heater'),
       isOpen: fault.has('heater-winding-open'),
       linkage: 0.98,
@@ -124,7 +125,7 @@ function highVoltage(part: PartContext, fault: FaultReader): { all: Winding[]; e
   const whole: Winding = {
     name: inner('hv'),
     nodes: [node('HV'), node('core')],
-    inductance: value('primaryInductance') * value('turnsRatio') ** 2,
+    inductance: value('primaryInductance') * square(value('turnsRatio')),
     resistance: value('hv'),
     isOpen: fault.has('hv-open'),
     linkage: value('coupling'),
@@ -139,14 +140,14 @@ function highVoltage(part: PartContext, fault: FaultReader): { all: Winding[]; e
   const upper: Winding = {
     ...left,
     nodes: [node('HV'), charred],
-    inductance: left.inductance * used ** 2,
+    inductance: left.inductance * square(used),
     resistance: left.resistance * used,
   };
   const lower: Winding = {
     ...left,
     name: inner('hv-rest'),
     nodes: [charred, node('core')],
-    inductance: left.inductance * (1 - used) ** 2,
+    inductance: left.inductance * square(1 - used),
     resistance: left.resistance * (1 - used),
     isOpen: false,
   };

@@ -1,3 +1,4 @@
+import { square } from '../../engine/elementary/power.ts';
 import type { Element } from '../../engine/circuit/circuit.ts';
 import { resistance } from './resistance.ts';
 import type { Winding } from './windings.ts';
@@ -22,13 +23,13 @@ export function shortTurns(
   return {
     left: {
       ...winding,
-      inductance: winding.inductance * (1 - fraction) ** 2,
+      inductance: winding.inductance * square(1 - fraction),
       resistance: winding.resistance * (1 - fraction),
     },
     loop: {
       name,
       nodes: [name, '0'],
-      inductance: winding.inductance * fraction ** 2,
+      inductance: winding.inductance * square(fraction),
       resistance: 0,
       linkage: Math.min(winding.linkage, 0.95),
       limb: winding.limb,

@@ -10,6 +10,7 @@
  * and ends the ringing that a winding without loss would go on with for seconds.
  * Source: factor form of a correlation matrix; the shares and q are judgement.
  */
+import { square } from '../../engine/elementary/power.ts';
 import type { Element, NodeName } from '../../engine/circuit/circuit.ts';
 import { BROKEN, resistance } from './resistance.ts';
 
@@ -26,7 +27,7 @@ export interface Winding {
 const SHARED_LEAKAGE = 0.375;
 
 function coefficient(first: Winding, second: Winding): number {
-  const leakage = Math.sqrt((1 - first.linkage ** 2) * (1 - second.linkage ** 2));
+  const leakage = Math.sqrt((1 - square(first.linkage)) * (1 - square(second.linkage)));
   const shared = first.limb === second.limb ? SHARED_LEAKAGE * leakage : 0;
   return first.linkage * second.linkage + shared;
 }
