@@ -1,9 +1,9 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import type { WireEvent } from '../../shared/bench/event.ts';
-import type { Setup } from '../../shared/bench/setup.ts';
+import { makeSetup, type Setup, type SetupInput } from '../../shared/bench/setup.ts';
 import { scenarioContent } from '../../shared/scenario/scenario.ts';
 import { recording } from '../../server/demo/recording.ts';
-import { setupWith } from './bench.ts';
+import { ovenDefinition } from '../../shared/oven/oven.ts';
 
 const scenarios = new URL('../../scenarios/', import.meta.url);
 const read = (path: string): unknown => JSON.parse(readFileSync(new URL(path, scenarios), 'utf8'));
@@ -11,6 +11,7 @@ const read = (path: string): unknown => JSON.parse(readFileSync(new URL(path, sc
 export interface Played {
   file: string;
   job: string;
+  input: SetupInput;
   setup: Setup;
   events: readonly WireEvent[];
 }
@@ -20,8 +21,13 @@ export const recordings: readonly Played[] = readdirSync(new URL('recordings/', 
   (file) => {
     const { job, seed, events } = recording.parse(read(`recordings/${file}`));
     const content = scenarioContent.parse(read(`jobs/${job}.json`));
-    const { faults, meter, lastRunSecondsAgo } = content;
-    return { file, job, events, setup: setupWith(faults, { seed, meter, lastRunSecondsAgo }) };
+    const input: SetupInput = {
+      ...content,
+      definition: ovenDefinition.parse(read(`ovens/${content.oven}.json`)),
+      seed,
+      condition: 'unaided',
+    };
+    return { file, job, events, input, setup: makeSetup(input) };
   },
 );
 

@@ -2,16 +2,18 @@ import { transient } from '../../engine/analyses/transient.ts';
 import { phasor } from '../../engine/analyses/phasor.ts';
 import type { Gathered } from '../../engine/analyses/summarise.ts';
 import type { Circuit, Storage } from '../../engine/circuit/circuit.ts';
+import { condense } from '../../engine/circuit/condense.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
 import type { PartKindName } from '../../oven/oven.ts';
 import { energisedCircuit } from './energised-circuit.ts';
 import { withoutParasitics } from './without-parasitics.ts';
+import { magnitude } from '../../engine/elementary/magnitude.ts';
 
 /** s of mains averaged at the end of a run */
 const averaged = 0.1;
 
-/** of one step; means over six cycles come out to a thousandth */
-const relativeTolerance = 1e-3;
+/** of one step; means over six cycles come out to half a hundredth */
+const relativeTolerance = 1e-2;
 
 export interface Electrical {
   /** A rms */ current: (element: string) => number;
@@ -45,7 +47,8 @@ export function runElectrically(
     ...named('magnetron', 'threshold'),
   ];
   const absent = leftOut.flatMap((kind) => refsOf(oven, kind));
-  const circuit = without(withoutParasitics(energisedCircuit(oven, state)), absent);
+  const whole = without(withoutParasitics(energisedCircuit(oven, state)), absent);
+  const circuit = condense(whole, new Set([...currents, ...powers]));
   const ran = transient(circuit, {
     relativeTolerance,
     stop: settling,
@@ -70,7 +73,7 @@ export function heaterCurrents(oven: DrawnOven, state: OvenState): Record<string
   return Object.fromEntries(
     refsOf(oven, 'magnetron').map((ref) => {
       const [re, im] = solved.value.currents[`${ref}:heater`]?.[0] ?? [0, 0];
-      return [ref, Math.hypot(re, im)];
+      return [ref, magnitude(re, im)];
     }),
   );
 }

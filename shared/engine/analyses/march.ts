@@ -111,7 +111,8 @@ function walkStep(integrator: Integrator, plan: Plan, walk: Walk, length: number
   if (walk.refusals === KINK) return startAfresh(integrator, walk, length) ?? 'refused';
   const shortest = Math.max(INSTANT, 4 * Number.EPSILON * walk.offset);
   const middle = walk.base + walk.end / 2;
-  if (!tryStep(integrator, walk.base + walk.offset, length, middle)) {
+  const at = walk.base + walk.offset;
+  if (!tryStep(integrator, at, length, middle, plan.relativeTolerance)) {
     return length <= shortest ? 'unsolved' : refuse(integrator, walk, length / 8);
   }
   const error = stepError(integrator, length, plan.relativeTolerance);
