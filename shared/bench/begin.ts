@@ -3,7 +3,7 @@ import type { WireEvent } from './event.ts';
 import { apply } from './run-command.ts';
 import { evolve, untouched } from './fold.ts';
 import { passTime } from './pass-time.ts';
-import { poweredRun, standsBy } from './powered-run/powered-run.ts';
+import { poweredRun, standing } from './powered-run/powered-run.ts';
 import type { Setup } from './setup.ts';
 import { engineVersion } from './setup.ts';
 
@@ -14,11 +14,17 @@ const lastRunSeconds = 30;
 export function begin(setup: Setup): { event: WireEvent; state: BenchState } {
   const { charge, opened } = whatIsLeft(setup);
   const { oven } = untouched(setup);
-  const isDisplayLit = standsBy(setup.oven, { ...oven, opened });
+  const now = standing(setup.oven, { ...oven, opened });
   const event: WireEvent = {
     type: 'AttemptBegan',
     version: 1,
-    data: { engine: engineVersion, seed: setup.seed, charge, opened, isDisplayLit },
+    data: {
+      engine: engineVersion,
+      seed: setup.seed,
+      charge,
+      ...now,
+      opened: [...opened, ...(now.opened ?? [])],
+    },
     benchMs: 0,
   };
   return { event, state: evolve(setup, untouched(setup), event) };

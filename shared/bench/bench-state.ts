@@ -10,7 +10,9 @@ export interface BenchState {
   benchMs: number;
   isCordIn: boolean;
   isCoverOn: boolean;
-  /** what is seen of the oven while it stands plugged in */ isDisplayLit: boolean;
+  /** what is seen of the oven while it stands plugged in; null: it has no display */
+  isDisplayLit: boolean | null;
+  /** plugged in, it runs although nobody has started it */ runsByItself: boolean;
   oven: OvenState;
   labels: Readonly<Record<LeadEndRef, string>>;
   probes: Readonly<Record<ProbeColour, TargetRef | null>>;

@@ -1,3 +1,4 @@
+import { hasDisplay } from '../oven/has-display.ts';
 import { asFitted } from '../oven/initial-state.ts';
 import type { BenchState } from './bench-state.ts';
 import type { WireEvent } from './event.ts';
@@ -10,7 +11,8 @@ export const untouched = (setup: Setup): BenchState => ({
   benchMs: 0,
   isCordIn: true,
   isCoverOn: true,
-  isDisplayLit: false,
+  isDisplayLit: hasDisplay(setup.oven.definition) ? false : null,
+  runsByItself: false,
   oven: asFitted(setup.oven.definition, setup.faults),
   labels: {},
   probes: { red: null, black: null },

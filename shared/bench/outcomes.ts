@@ -24,11 +24,15 @@ export const attemptBegan = outcome({
     /** V left on capacitors by the last run, by element name */
     charge: z.record(z.string(), z.number()),
     /** fuses blown and cut-outs open */ opened: z.array(z.string()),
-    isDisplayLit: z.boolean(),
+    /** absent: the oven has no display */ isDisplayLit: z.boolean().optional(),
+    /** plugged in, it runs although nobody has started it */ runsByItself: z
+      .literal(true)
+      .optional(),
   }),
-  evolve: (state, { charge, opened, isDisplayLit }) => ({
+  evolve: (state, { charge, opened, isDisplayLit, runsByItself }) => ({
     ...state,
-    isDisplayLit,
+    isDisplayLit: isDisplayLit ?? null,
+    runsByItself: runsByItself ?? false,
     storage: { voltages: charge, currents: {} },
     oven: { ...state.oven, opened },
   }),

@@ -54,15 +54,22 @@ export const hazard = z.strictObject({
 });
 export type Hazard = z.infer<typeof hazard> & { benchMs: number };
 
+/** Against a healthy oven of this definition. */
+const hum = z.enum(['none', 'quiet', 'normal', 'loud']);
+
 /** What one powered run did, as a person in front of the oven sees and hears it. */
 export const runOutcome = z.strictObject({
   /** s asked for at the panel */ ordered: z.number().min(1).max(300),
   /** s until it ended: less when something opened */ seconds: z.number(),
-  isDisplayLit: z.boolean(),
+  /** absent: the oven has no display */ isDisplayLit: z.boolean().optional(),
+  /** its knob comes down, ticking; absent: the oven has no mechanical timer */
+  isTimerRunning: z.boolean().optional(),
   isLampLit: z.boolean(),
   isFanTurning: z.boolean(),
   isTurntableTurning: z.boolean(),
-  /** against a healthy oven of this definition */ hum: z.enum(['none', 'quiet', 'normal', 'loud']),
+  hum,
+  /** what it sounded like until something opened and changed it; absent: the same all the time */
+  atFirst: z.strictObject({ hum, /** s */ seconds: z.number() }).optional(),
   /** A rms at the plug */ current: z.number(),
   /** W into the water */ microwavePower: z.number(),
   /** K, of the water */ waterRise: z.number(),

@@ -53,6 +53,7 @@ function partElements(part: OvenPart, oven: DrawnOven, state: OvenState): Elemen
     },
     inner: (name) => `${part.ref}:${name}`,
     isActuated: state.isDoorClosed || state.pressed.includes(part.ref),
+    isPressed: state.pressed.includes(part.ref),
     isOpened: state.opened.includes(part.ref),
     isEnergised: state.energised.includes(part.ref),
     isHot: state.hot?.includes(part.ref) ?? false,

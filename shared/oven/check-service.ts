@@ -8,7 +8,7 @@ export interface Names {
   terminals: readonly string[];
   varnished: readonly string[];
   leadEnds: readonly string[];
-  doorSwitches: readonly string[];
+  actuators: readonly string[];
   /** references of parts and leads whose own form is wrong */ unjudged: readonly string[];
 }
 
@@ -28,7 +28,7 @@ export function namesOf(
     terminals: terminals.map(({ ref }) => ref),
     varnished: terminals.filter(({ isVarnished }) => isVarnished).map(({ ref }) => ref),
     leadEnds: leads.flatMap((lead) => [`${lead}/a`, `${lead}/b`]),
-    doorSwitches: parts.filter(({ kind }) => kind === 'door-switch').map(({ ref }) => ref),
+    actuators: parts.filter(({ kind }) => partKinds[kind].actuator).map(({ ref }) => ref),
     unjudged,
   };
 }
@@ -51,7 +51,7 @@ export function checkService(
       ...check('terminal', line.between, names.terminals, 'between'),
       ...check('lead end', line.lift, names.leadEnds, 'lift'),
       ...check('varnished spot', line.clean ?? [], names.varnished, 'clean'),
-      ...check('door switch', line.press ?? [], names.doorSwitches, 'press'),
+      ...check('actuator', line.press ?? [], names.actuators, 'press'),
       ...limits,
     ];
   });

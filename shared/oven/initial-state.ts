@@ -1,25 +1,16 @@
 import type { AppliedFault } from './fault.ts';
-import type { LeadEndRef, OvenDefinition, TerminalRef } from './oven.ts';
+import { seatsAfter } from './misplaced-leads.ts';
+import type { OvenDefinition } from './oven.ts';
 import type { OvenState } from './oven-state.ts';
-
-const sides = ['a', 'b'] as const;
 
 /**
  * The oven as it comes in: door closed, nothing pressed, every lead where it belongs except those
- * that a fault left off.
+ * that an earlier repair left off or put elsewhere.
  */
 export function asFitted(definition: OvenDefinition, faults: readonly AppliedFault[]): OvenState {
-  const isOff = (lead: string, side: string) =>
-    faults.some((fault) => fault.on === lead && fault.fault === `off-${side}`);
-  const ends = definition.leads.flatMap((lead) =>
-    sides.map((side, index): [LeadEndRef, TerminalRef | null] => [
-      `${lead.ref}/${side}`,
-      isOff(lead.ref, side) ? null : (lead.ends[index] ?? null),
-    ]),
-  );
   return {
     faults,
-    leadEnds: Object.fromEntries(ends),
+    leadEnds: seatsAfter(definition, faults),
     isDoorClosed: true,
     pressed: [],
     opened: [],

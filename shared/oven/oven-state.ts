@@ -14,9 +14,9 @@ export interface OvenState {
   /** where each lead end sits; null: lifted, lying loose */
   leadEnds: Readonly<Record<LeadEndRef, TerminalRef | null>>;
   isDoorClosed: boolean;
-  /** door switches pressed by hand */ pressed: readonly PartRef[];
+  /** parts held by hand: door switches pressed, a timer turned up */ pressed: readonly PartRef[];
   /** fuses blown and cut-outs open */ opened: readonly PartRef[];
-  /** relays whose contact the control holds closed */ energised: readonly PartRef[];
+  /** parts that what starts the oven holds closed: relays pulled in, a timer turned up */ energised: readonly PartRef[];
   /** varnished spots cleaned to bare metal */ cleaned: readonly TerminalRef[];
   /** magnetrons whose heater is hot enough to emit: in a powered run only */ hot?: readonly PartRef[];
 }

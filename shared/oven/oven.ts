@@ -30,9 +30,12 @@ export const partKindName = z.enum([
   'relay',
   'board-transformer',
   'control-board',
+  'mechanical-timer',
+  'resistor',
   'lamp',
   'motor',
   'hv-transformer',
+  'hv-fuse',
   'hv-capacitor',
   'hv-diode',
   'magnetron',
@@ -78,7 +81,9 @@ export const serviceMeasurement = z.strictObject({
   between: z.tuple([terminalRef, terminalRef]),
   /** lead ends to lift first */ lift: z.array(leadEndRef),
   /** varnished spots to clean first */ clean: z.array(terminalRef).optional(),
-  /** door switches to press by hand */ press: z.array(partRef).optional(),
+  /** parts to hold by hand: a switch pressed, a timer turned up */ press: z
+    .array(partRef)
+    .optional(),
   /** a function and range of the manual meter */ setting: z.string(),
   /** what a good part gives, in the unit shown; a limit left out is open */ low: finite.optional(),
   high: finite.optional(),

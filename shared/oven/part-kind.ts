@@ -29,10 +29,22 @@ export interface PartContext {
   /** an element or inner node name unique to this part: `C1:bleeder` */ inner: (
     name: string,
   ) => string;
-  isActuated: boolean;
+  /** a door switch whose lever is in: the door is closed, or a hand holds it */ isActuated: boolean;
+  /** held by hand: a lever pressed, a knob turned up */ isPressed: boolean;
   isOpened: boolean;
   isEnergised: boolean;
   /** a magnetron whose heater has run long enough to emit; cold on the bench */ isHot: boolean;
+}
+
+/** What a powered run asks of a part of one kind, by the inner names of its elements. */
+export interface Running {
+  /** what starts the oven holds it closed: a relay pulled in, a timer turned up */ isSwitchedOn?: boolean;
+  /** a filament alight, a cathode that emits: hot in a run */ isHot?: boolean;
+  /** the element whose current melts it */ melts?: string;
+  /** its winding turns something, unless one of these faults stops it */
+  turns?: { winding: string; stoppedBy: readonly string[] };
+  /** the winding whose current is heard */ hums?: string;
+  /** elements whose power is seen or felt */ powers?: readonly string[];
 }
 
 /** One kind of part: its terminals, values, faults and circuit. One file each in `parts/`. */
@@ -43,5 +55,10 @@ export interface PartKind {
   terminals: (variant: string | undefined) => readonly TerminalKind[];
   values: Readonly<Record<string, ValueKind>>;
   faults: readonly FaultKind[];
+  /** what a hand can hold or turn on it, and in words how */ actuator?: {
+    hold: string;
+    letGo: string;
+  };
+  running?: Running;
   circuit: (part: PartContext) => Element[];
 }

@@ -59,7 +59,7 @@ describe('reading an oven definition', () => {
       'unknown lead end W44/a; did you mean W4/a?',
       'unknown terminal F2.9; did you mean F2.1?',
       'unknown varnished spot C1.can',
-      'unknown door switch K1; did you mean S1?',
+      'unknown actuator K1; did you mean S1?',
       'low 99 is not below high 58',
     ];
     for (const message of expected)

@@ -30,6 +30,7 @@ describe('catalogue of part kinds', () => {
   it('gives every fault parameter a usual value inside its limits, and every fault a weight', () => {
     for (const fault of allFaults) {
       expect(fault.weight).toBeGreaterThan(0);
+      expect(fault.source).not.toBe('');
       for (const { min, usual, max } of Object.values(fault.parameters ?? {})) {
         expect(usual).toBeGreaterThanOrEqual(min);
         expect(usual).toBeLessThanOrEqual(max);

@@ -24,6 +24,7 @@ const state: BenchState = {
   isCordIn: true,
   isCoverOn: true,
   isDisplayLit: false,
+  runsByItself: false,
   oven: {
     faults: [],
     leadEnds: { 'W1/a': 'C1.1', 'W1/b': null },

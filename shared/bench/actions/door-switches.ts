@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { partRef } from '../../oven/oven.ts';
+import { partKinds } from '../../oven/parts/catalogue.ts';
 import { accept, action, refuse } from '../action.ts';
 import { insideRefusal } from '../reach.ts';
 
@@ -12,11 +13,11 @@ export const pressSwitch = action({
   data: onPart,
   decide: (bench, { part }) => {
     const definition = bench.setup.oven.definition.parts.find((one) => one.ref === part);
-    if (definition?.kind !== 'door-switch') {
-      return refuse('no-actuator', `${part} has no actuator to press.`);
+    if (!definition || !partKinds[definition.kind].actuator) {
+      return refuse('no-actuator', `${part} has nothing to hold or turn by hand.`);
     }
     if (bench.state.oven.pressed.includes(part)) {
-      return refuse('pressed-already', `${part} is held pressed already.`);
+      return refuse('pressed-already', `${part} is held already.`);
     }
     return insideRefusal(bench) ?? accept({ part });
   },
@@ -24,7 +25,7 @@ export const pressSwitch = action({
     ...state,
     oven: { ...state.oven, pressed: [...state.oven.pressed, part] },
   }),
-  describe: ({ part }) => `${part} actuator pressed by hand`,
+  describe: ({ part }) => `${part} held by hand`,
 });
 
 export const releaseSwitch = action({
@@ -35,10 +36,10 @@ export const releaseSwitch = action({
   decide: ({ state }, { part }) =>
     state.oven.pressed.includes(part)
       ? accept({ part })
-      : refuse('not-pressed', `${part} is not held pressed.`),
+      : refuse('not-pressed', `${part} is not held.`),
   evolve: (state, { part }) => ({
     ...state,
     oven: { ...state.oven, pressed: state.oven.pressed.filter((one) => one !== part) },
   }),
-  describe: ({ part }) => `${part} actuator released`,
+  describe: ({ part }) => `${part} let go`,
 });

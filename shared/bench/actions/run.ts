@@ -1,11 +1,15 @@
 import { z } from 'zod';
 import { accept, action, refuse } from '../action.ts';
 import { poweredRun } from '../powered-run/powered-run.ts';
+import type { BenchState } from '../bench-state.ts';
+import { isDead } from '../powered-run/run-electrically.ts';
+import type { RunOutcome } from '../record.ts';
 import { runOutcome } from '../record.ts';
+import type { Setup } from '../setup.ts';
 
 const asked = z.strictObject({ ordered: z.number().min(1).max(300) });
 
-/** Start pressed on the control panel; the event stands at the end of the run. */
+/** Start pressed on the control panel, or the timer turned up; the event stands at the end of the run. */
 export const runOven = action({
   command: 'RunOven',
   event: 'OvenRun',
@@ -18,10 +22,10 @@ export const runOven = action({
       : [{ kind: 'mains-exposed' as const, at: null, to: null, volts: 0, charge: 0, energy: 0 }];
     return accept(poweredRun(setup.oven, state.oven, ordered), hazards);
   },
-  evolve: (state, outcome) => ({
+  evolve: (state, outcome, setup) => ({
     ...state,
     runs: [...state.runs, outcome],
-    isDisplayLit: outcome.isDisplayLit && outcome.opened.length === 0,
+    isDisplayLit: afterRun(setup, state, outcome),
     storage: { voltages: { ...outcome.charge }, currents: {} },
     oven: {
       ...state.oven,
@@ -31,11 +35,29 @@ export const runOven = action({
   describe: (outcome) => `run for ${outcome.seconds.toFixed(1)} s: ${seenAndHeard(outcome)}`,
 });
 
-function seenAndHeard(outcome: z.infer<typeof runOutcome>): string {
-  if (!outcome.isDisplayLit) return 'dead, no display';
+/** A blown line fuse takes the display with it; a blown high-voltage fuse does not. */
+function afterRun(setup: Setup, state: BenchState, outcome: RunOutcome): boolean | null {
+  if (outcome.isDisplayLit === undefined) return null;
+  if (!outcome.isDisplayLit || outcome.opened.length === 0) return outcome.isDisplayLit;
+  const opened = [...state.oven.opened, ...outcome.opened];
+  return !isDead(setup.oven, { ...state.oven, opened });
+}
+
+const humOf = (hum: RunOutcome['hum']): string => (hum === 'none' ? 'no hum' : `${hum} hum`);
+
+const humWords = ({ hum, atFirst }: RunOutcome): string =>
+  atFirst
+    ? `${humOf(atFirst.hum)} for ${atFirst.seconds.toFixed(1)} s, then ${humOf(hum)}`
+    : humOf(hum);
+
+function seenAndHeard(outcome: RunOutcome): string {
+  if (outcome.isDisplayLit === false) return 'dead, no display';
   const parts = [
     outcome.isLampLit ? 'lamp on' : 'lamp dark',
-    outcome.hum === 'none' ? 'no hum' : `${outcome.hum} hum`,
+    ...(outcome.isTimerRunning === undefined
+      ? []
+      : [outcome.isTimerRunning ? 'timer ticking' : 'timer not running']),
+    humWords(outcome),
     outcome.waterRise < 0.05 ? 'water cold' : `water up ${outcome.waterRise.toFixed(1)} K`,
     ...outcome.opened.map((ref) => `${ref} opened`),
   ];

@@ -1,10 +1,22 @@
 import { z } from 'zod';
+import type { Bench } from '../action.ts';
 import { accept, action, refuse } from '../action.ts';
+import type { BenchState } from '../bench-state.ts';
+import { partRef } from '../../oven/oven.ts';
 import { chargeAtUnplugging } from '../charge-at-unplugging.ts';
-import { standsBy } from '../powered-run/powered-run.ts';
+import { standing } from '../powered-run/powered-run.ts';
 
 const nothing = z.strictObject({});
-const seen = z.strictObject({ isDisplayLit: z.boolean() });
+const opened = z.array(partRef).min(1).optional();
+const seen = z.strictObject({
+  /** absent: the oven has no display */ isDisplayLit: z.boolean().optional(),
+  /** it runs although nobody has started it */ runsByItself: z.literal(true).optional(),
+  /** fuses that melted at once */ opened,
+});
+const swung = z.strictObject({
+  /** fuses that melted at once; absent: none, or the cord is out */ opened,
+  /** it runs although nobody has started it */ runsByItself: z.literal(true).optional(),
+});
 
 export const pullCord = action({
   command: 'PullCord',
@@ -16,7 +28,8 @@ export const pullCord = action({
   evolve: (state, _data, setup) => ({
     ...state,
     isCordIn: false,
-    isDisplayLit: false,
+    isDisplayLit: state.isDisplayLit === null ? null : false,
+    runsByItself: false,
     storage: chargeAtUnplugging(setup, state),
   }),
   describe: () => 'cord out',
@@ -51,10 +64,21 @@ export const plugCord = action({
             energy: 0,
           },
         ];
-    return accept({ isDisplayLit: standsBy(setup.oven, state.oven) }, hazards);
+    return accept(standing(setup.oven, state.oven), hazards);
   },
-  evolve: (state, { isDisplayLit }) => ({ ...state, isCordIn: true, isDisplayLit }),
-  describe: ({ isDisplayLit }) => `cord in, display ${isDisplayLit ? 'lit' : 'dark'}`,
+  evolve: (state, data) => ({
+    ...afterMelting(state, data.opened),
+    isCordIn: true,
+    isDisplayLit: data.isDisplayLit ?? null,
+    runsByItself: data.runsByItself ?? false,
+  }),
+  describe: ({ isDisplayLit, runsByItself, opened }) =>
+    [
+      'cord in',
+      ...(isDisplayLit === undefined ? [] : [`display ${isDisplayLit ? 'lit' : 'dark'}`]),
+      ...(runsByItself ? ['runs by itself'] : []),
+      ...(opened ?? []).map((ref) => `${ref} blew`),
+    ].join(', '),
 });
 
 export const removeCover = action({
@@ -96,28 +120,51 @@ export const fitCover = action({
   describe: () => 'cover on',
 });
 
+const afterMelting = (state: BenchState, melted: readonly string[] = []): BenchState => ({
+  ...state,
+  oven: { ...state.oven, opened: [...new Set([...state.oven.opened, ...melted])] },
+});
+
+/** The door's hooks work the switches; with the cord in, the circuit says at once what that does. */
 const setDoor = (isDoorClosed: boolean) =>
   ({
     input: nothing,
-    data: nothing,
-    decide: ({ state }: { state: { oven: { isDoorClosed: boolean } } }) =>
-      state.oven.isDoorClosed === isDoorClosed
-        ? refuse('door-is-so', `The door is ${isDoorClosed ? 'closed' : 'open'} already.`)
-        : accept({}),
+    data: swung,
+    decide: ({ setup, state }: Bench) => {
+      if (state.oven.isDoorClosed === isDoorClosed)
+        return refuse('door-is-so', `The door is ${isDoorClosed ? 'closed' : 'open'} already.`);
+      if (!state.isCordIn) return accept({});
+      const now = standing(setup.oven, { ...state.oven, isDoorClosed });
+      return accept({
+        ...(now.opened ? { opened: now.opened } : {}),
+        ...(now.runsByItself ? { runsByItself: now.runsByItself } : {}),
+      });
+    },
+    evolve: (state: BenchState, data: z.infer<typeof swung>): BenchState => {
+      const after = afterMelting(state, data.opened);
+      return {
+        ...after,
+        isDisplayLit: data.opened && state.isDisplayLit ? false : state.isDisplayLit,
+        runsByItself: data.runsByItself ?? false,
+        oven: { ...after.oven, isDoorClosed },
+      };
+    },
+    describe: ({ opened, runsByItself }: z.infer<typeof swung>) =>
+      [
+        `door ${isDoorClosed ? 'closed' : 'open'}`,
+        ...(runsByItself ? ['runs by itself'] : []),
+        ...(opened ?? []).map((ref) => `${ref} blew`),
+      ].join(', '),
   }) as const;
 
 export const openDoor = action({
   command: 'OpenDoor',
   event: 'DoorOpened',
   ...setDoor(false),
-  evolve: (state) => ({ ...state, oven: { ...state.oven, isDoorClosed: false } }),
-  describe: () => 'door open',
 });
 
 export const closeDoor = action({
   command: 'CloseDoor',
   event: 'DoorClosed',
   ...setDoor(true),
-  evolve: (state) => ({ ...state, oven: { ...state.oven, isDoorClosed: true } }),
-  describe: () => 'door closed',
 });

@@ -1,22 +1,16 @@
-import { square } from '../../engine/elementary/power.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
-import type { PartKindName } from '../../oven/oven.ts';
-import { asFitted } from '../../oven/initial-state.ts';
+import type { OvenPart } from '../../oven/oven.ts';
+import { partKinds } from '../../oven/parts/catalogue.ts';
 import type { RunOutcome } from '../record.ts';
-import { meltingTime } from './fuse-melting.ts';
+import { chargeLeft } from './charge-left.ts';
+import { fuseTime, fusesOf } from './fuse-time.ts';
 import type { Electrical } from './run-electrically.ts';
-import { heaterCurrents, refsOf, runElectrically } from './run-electrically.ts';
+import { isDead, refsOf } from './run-electrically.ts';
+import type { Started } from './start.ts';
+import { healthyRun, inStandby, isBoardAlive, start } from './start.ts';
 
-/** W: the board's logic runs, and the display glows, from about two thirds of the rated voltage up. Judgement. */
-const logicWatts = 0.15;
-const displayWatts = 0.5;
-/** s of mains after which the board's supply, and the high-voltage side, repeat themselves */
-const standbySeconds = 0.15;
-const settledSeconds = 0.3;
-/** Share of its healthy power with which a lamp is seen to be lit; of its healthy current with which a heater emits. Judgement. */
+/** Share of its healthy power with which a lamp is seen to be lit; of its healthy current with which a motor turns. Judgement. */
 const seen = 0.3;
-const emitting = 0.6;
-/** Share of a motor's healthy current with which it turns. Judgement. */
 const turning = 0.5;
 /** J/(kg K); P = 4187 m dT / t into 1 kg, the method of IEC 60705 (from memory, FACTS 9). */
 const water = { heat: 4187, mass: 1 };
@@ -27,136 +21,141 @@ const silentBelow = 0.005;
 const quietBelow = 0.5;
 const loudAbove = 1.15;
 
-/** What start does to this oven for up to `ordered` s: seen, heard, blown, heated, and left on the capacitors. */
+/** A stretch of a run in which nothing opens. */
+interface Stretch extends Started {
+  state: OvenState;
+  seconds: number;
+  /** what opened at its end */ opened: readonly string[];
+}
+
+/** What a run of up to `ordered` s does to this oven: seen, heard, blown, heated, and left on the capacitors. */
 export function poweredRun(oven: DrawnOven, state: OvenState, ordered: number): RunOutcome {
-  const healthy = healthyRun(oven);
-  const { ran, isAlive } = start(oven, state);
-  const fuses = refsOf(oven, 'fuse').map((ref) => ({
-    ref,
-    after: fuseTime(oven, state, ref, ran),
-  }));
-  const until = Math.min(ordered, ...fuses.map((fuse) => fuse.after));
-  const isShare = (kind: 'power' | 'current', element: string, share: number): boolean =>
-    ran[kind](element) > share * healthy[kind](element);
-  const hasFault = (ref: string, fault: string): boolean =>
-    state.faults.some((one) => one.on === ref && one.fault === fault);
-  const motor = (variant: string): boolean =>
-    oven.definition.parts
-      .filter((part) => part.kind === 'motor' && part.variant === variant)
-      .every(
-        ({ ref }) => isShare('current', `${ref}:winding`, turning) && !hasFault(ref, 'seized'),
-      );
-  const microwavePower = refsOf(oven, 'magnetron').reduce(
-    (sum, ref) =>
-      sum + efficiency * beamPower(ran, ref) * (hasFault(ref, 'cracked-magnet') ? 0 : 1),
+  const stretches = stretchesOf(oven, state, ordered);
+  const first = stretches[0] as Stretch;
+  const last = stretches.at(-1) as Stretch;
+  const humming = hum(oven, last.ran);
+  const heat = stretches.reduce(
+    (sum, { state: then, ran, seconds }) => sum + microwaves(oven, then, ran) * seconds,
     0,
   );
+  const timers = refsOf(oven, 'mechanical-timer');
+  const before = first === last ? humming : hum(oven, first.ran);
   return {
     ordered,
-    seconds: round(until, 0.01),
-    isDisplayLit: isAlive,
-    isLampLit: refsOf(oven, 'lamp').every((ref) => isShare('power', `${ref}:filament`, seen)),
-    isFanTurning: motor('fan'),
-    isTurntableTurning: motor('turntable'),
-    hum: hum(oven, ran, healthy),
-    current: round(ran.current('mains:loop'), 0.01),
-    microwavePower: round(microwavePower, 1),
-    waterRise: round((microwavePower * until) / (water.heat * water.mass), 0.01),
-    opened: fuses.filter((fuse) => fuse.after <= ordered).map((fuse) => fuse.ref),
-    charge: chargeLeft(ran),
+    seconds: round(
+      stretches.reduce((sum, { seconds }) => sum + seconds, 0),
+      0.01,
+    ),
+    ...(last.isDisplayLit === undefined ? {} : { isDisplayLit: last.isDisplayLit }),
+    ...(timers.length === 0 ? {} : { isTimerRunning: isTurning(oven, last, 'mechanical-timer') }),
+    isLampLit: isLampLit(oven, last.ran),
+    isFanTurning: isTurning(oven, last, 'motor', 'fan'),
+    isTurntableTurning: isTurning(oven, last, 'motor', 'turntable'),
+    hum: humming,
+    ...(before === humming
+      ? {}
+      : { atFirst: { hum: before, seconds: round(first.seconds, 0.01) } }),
+    current: round(last.ran.current('mains:loop'), 0.01),
+    microwavePower: round(microwaves(oven, last.state, last.ran), 1),
+    waterRise: round(heat / (water.heat * water.mass), 0.01),
+    opened: stretches.flatMap(({ opened }) => opened),
+    charge: chargeLeft(oven, last.state, last.ran, first === last ? 0 : last.seconds),
   };
 }
 
-interface Started {
-  ran: Electrical;
-  isAlive: boolean;
+/** A run goes on after a high-voltage fuse, without what it fed; after the line fuse nothing does. */
+function stretchesOf(oven: DrawnOven, state: OvenState, ordered: number): Stretch[] {
+  const stretches: Stretch[] = [];
+  let left = ordered;
+  let now = state;
+  for (;;) {
+    const started = start(oven, now, stretches.at(-1)?.ran.storage.voltages ?? {});
+    const times = fusesOf(oven)
+      .filter((ref) => !now.opened.includes(ref))
+      .map((ref) => ({ ref, after: fuseTime(oven, now, ref, started.ran) }));
+    const soonest = Math.min(left, ...times.map(({ after }) => after));
+    const opened = times.filter(({ after }) => after <= soonest).map(({ ref }) => ref);
+    stretches.push({ ...started, state: now, seconds: soonest, opened });
+    left -= soonest;
+    now = { ...now, opened: [...now.opened, ...opened] };
+    if (opened.length === 0 || left <= 0 || isDead(oven, now)) return stretches;
+  }
 }
 
-/**
- * The control first, on its own transformer; then its relays. A magnetron emits when its heater
- * carries most of what it carries in a healthy oven.
- */
-function start(oven: DrawnOven, state: OvenState): Started {
-  const standby = inStandby(oven, state);
-  const isAlive = boardIsAlive(oven, state, standby);
-  if (!isAlive || !state.isDoorClosed) return { ran: standby, isAlive };
-  const running = inFullRun(oven, state);
-  const heaters = heaterCurrents(oven, running);
-  const sound = heaterCurrents(oven, inFullRun(oven, asFitted(oven.definition, [])));
-  const hot = (running.hot ?? []).filter((ref) => {
-    const healthy = sound[ref];
-    return healthy === undefined || (heaters[ref] ?? 0) > emitting * healthy;
-  });
-  return { ran: runElectrically(oven, { ...running, hot }, settledSeconds, boards), isAlive };
+export interface Standing {
+  /** absent: the oven has no display */ isDisplayLit?: boolean;
+  /** lamp or motors go although nobody has started it */ runsByItself?: true;
+  /** fuses that melt at once: a monitor switch that finds a welded switch */ opened?: string[];
 }
 
-/** Whether the display glows with the oven plugged in and nothing pressed. */
-export const standsBy = (oven: DrawnOven, state: OvenState): boolean =>
-  boardIsAlive(oven, state, inStandby(oven, state));
-
-const inStandby = (oven: DrawnOven, state: OvenState): Electrical =>
-  runElectrically(oven, { ...state, energised: [], hot: [] }, standbySeconds);
-
-/** Judged in standby, and of no weight beside what the relays switch. */
-const boards: readonly PartKindName[] = ['control-board', 'board-transformer'];
-
-const inFullRun = (oven: DrawnOven, state: OvenState): OvenState => ({
-  ...state,
-  energised: refsOf(oven, 'relay'),
-  hot: [...refsOf(oven, 'lamp'), ...refsOf(oven, 'magnetron')],
-});
-
-const boardIsAlive = (oven: DrawnOven, state: OvenState, standby: Electrical): boolean =>
-  refsOf(oven, 'control-board').every(
-    (ref) =>
-      standby.power(`${ref}:load`) > logicWatts &&
-      standby.power(`${ref}:filament`) > displayWatts &&
-      !state.faults.some((fault) => fault.on === ref && fault.fault === 'dead'),
+/** What the oven does plugged in, with nobody starting it and the door as it is. */
+export function standing(oven: DrawnOven, state: OvenState): Standing {
+  const ran = inStandby(oven, state);
+  const opened = fusesOf(oven).filter(
+    (ref) => !state.opened.includes(ref) && fuseTime(oven, state, ref, ran) < 1,
   );
-
-const healthyRuns = new WeakMap<DrawnOven, Electrical>();
-
-/** The same oven without a fault: what its sounds and lights are compared with. */
-function healthyRun(oven: DrawnOven): Electrical {
-  const known = healthyRuns.get(oven);
-  if (known) return known;
-  const ran = runElectrically(
-    oven,
-    inFullRun(oven, asFitted(oven.definition, [])),
-    settledSeconds,
-    boards,
-  );
-  healthyRuns.set(oven, ran);
-  return ran;
+  const isOn =
+    isAnyLampLit(oven, ran) ||
+    oven.definition.parts.some((part) => part.kind === 'motor' && turns(oven, part, state, ran));
+  const isDisplayLit = isBoardAlive(oven, state, ran);
+  return {
+    ...(isDisplayLit === undefined ? {} : { isDisplayLit: isDisplayLit && opened.length === 0 }),
+    ...(isOn && opened.length === 0 ? { runsByItself: true as const } : {}),
+    ...(opened.length === 0 ? {} : { opened }),
+  };
 }
 
-function hum(oven: DrawnOven, ran: Electrical, healthy: Electrical): RunOutcome['hum'] {
-  const primary = (run: Electrical): number =>
-    refsOf(oven, 'hv-transformer').reduce((sum, ref) => sum + run.current(`${ref}:primary`), 0);
-  const share = primary(ran) / primary(healthy);
+const isPower = (oven: DrawnOven, ran: Electrical, element: string): boolean =>
+  ran.power(element) > seen * healthyRun(oven).power(element);
+
+const isLampLit = (oven: DrawnOven, ran: Electrical): boolean =>
+  refsOf(oven, 'lamp').every((ref) => isPower(oven, ran, `${ref}:filament`));
+
+const isAnyLampLit = (oven: DrawnOven, ran: Electrical): boolean =>
+  refsOf(oven, 'lamp').some((ref) => isPower(oven, ran, `${ref}:filament`));
+
+function turns(oven: DrawnOven, part: OvenPart, state: OvenState, ran: Electrical): boolean {
+  const how = partKinds[part.kind].running?.turns;
+  if (!how) return false;
+  const element = `${part.ref}:${how.winding}`;
+  const isStopped = state.faults.some(
+    ({ on, fault }) => on === part.ref && how.stoppedBy.includes(fault),
+  );
+  return !isStopped && ran.current(element) > turning * healthyRun(oven).current(element);
+}
+
+const isTurning = (
+  oven: DrawnOven,
+  { state, ran }: Stretch,
+  kind: OvenPart['kind'],
+  variant?: string,
+): boolean =>
+  oven.definition.parts
+    .filter((part) => part.kind === kind && part.variant === variant)
+    .every((part) => turns(oven, part, state, ran));
+
+function hum(oven: DrawnOven, ran: Electrical): RunOutcome['hum'] {
+  const heard = (run: Electrical): number =>
+    oven.definition.parts.reduce((sum, { ref, kind }) => {
+      const winding = partKinds[kind].running?.hums;
+      return winding === undefined ? sum : sum + run.current(`${ref}:${winding}`);
+    }, 0);
+  const share = heard(ran) / heard(healthyRun(oven));
   if (share < silentBelow) return 'none';
   if (share < quietBelow) return 'quiet';
   return share > loudAbove ? 'loud' : 'normal';
 }
 
-/** W into the anode: what the beam and its threshold take up. */
-const beamPower = (ran: Electrical, ref: string): number =>
-  Math.max(0, ran.power(`${ref}:beam`) + ran.power(`${ref}:threshold`));
-
-function fuseTime(oven: DrawnOven, state: OvenState, ref: string, ran: Electrical): number {
-  const { melting = Infinity, rating = Infinity } = oven.values[ref] ?? {};
-  const wrong = state.faults.find((fault) => fault.on === ref && fault.fault === 'wrong-rating');
-  const fitted = wrong?.values?.['amps'] ?? rating;
-  // Of one make, the melting integral goes with the square of the rating.
-  return meltingTime(ran.current(`${ref}:element`), melting * square(fitted / rating), fitted);
-}
-
-/** V by element name; below 30 V nobody is concerned. */
-const chargeLeft = ({ storage }: Electrical): Record<string, number> =>
-  Object.fromEntries(
-    Object.entries(storage.voltages)
-      .filter(([, volts]) => Math.abs(volts) > 30)
-      .map(([element, volts]) => [element, round(volts, 0.01)]),
-  );
+/** W into the food: of what beam and threshold of each sound magnetron take up. */
+const microwaves = (oven: DrawnOven, state: OvenState, ran: Electrical): number =>
+  refsOf(oven, 'magnetron')
+    .filter(
+      (ref) => !state.faults.some(({ on, fault }) => on === ref && fault === 'cracked-magnet'),
+    )
+    .reduce(
+      (sum, ref) =>
+        sum + efficiency * Math.max(0, ran.power(`${ref}:beam`) + ran.power(`${ref}:threshold`)),
+      0,
+    );
 
 const round = (value: number, step: number): number => Math.round(value / step) * step;

@@ -5,6 +5,7 @@
  */
 import { square } from '../../engine/elementary/power.ts';
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartContext, PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { resistance } from '../pieces/resistance.ts';
@@ -17,24 +18,28 @@ const faults: FaultKind[] = [
     name: 'primary open',
     description: 'The thin wire of the primary is broken.',
     weight: 5,
+    source: judgement,
   },
   {
     id: 'eleven-volt-open',
     name: '11 V winding open',
     description: 'The winding that feeds relays and logic is broken.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'five-volt-open',
     name: '5.5 V winding open',
     description: 'The winding that feeds the display filament is broken.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'shorted-turns',
     name: 'primary turns shorted',
     description: 'A part of the primary is shorted in itself.',
     weight: 1,
+    source: judgement,
     parameters: {
       fraction: { name: 'part of the primary', unit: '', min: 0.02, max: 0.9, usual: 0.4 },
     },
@@ -45,6 +50,7 @@ const faults: FaultKind[] = [
     name: 'primary leaky to core',
     description: 'The insulation between primary and core conducts.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 1e3, max: 1.5e7, usual: 2e6 } },
   },
 ];

@@ -9,12 +9,15 @@ import { filterBoard } from './filter-board.ts';
 import { fuse } from './fuse.ts';
 import { hvCapacitor } from './hv-capacitor.ts';
 import { hvDiode } from './hv-diode.ts';
+import { hvFuse } from './hv-fuse.ts';
 import { hvTransformer } from './hv-transformer.ts';
 import { lamp } from './lamp.ts';
 import { magnetron } from './magnetron.ts';
+import { mechanicalTimer } from './mechanical-timer.ts';
 import { motor } from './motor.ts';
 import { plug } from './plug.ts';
 import { relay } from './relay.ts';
+import { resistor } from './resistor.ts';
 
 /** Every kind of part: a new kind is one file and one line here. */
 export const partKinds: Readonly<Record<PartKindName, PartKind>> = {
@@ -27,9 +30,12 @@ export const partKinds: Readonly<Record<PartKindName, PartKind>> = {
   relay,
   'board-transformer': boardTransformer,
   'control-board': controlBoard,
+  'mechanical-timer': mechanicalTimer,
+  resistor,
   lamp,
   motor,
   'hv-transformer': hvTransformer,
+  'hv-fuse': hvFuse,
   'hv-capacitor': hvCapacitor,
   'hv-diode': hvDiode,
   magnetron,

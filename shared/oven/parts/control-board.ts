@@ -6,6 +6,7 @@
  */
 import type { Element } from '../../engine/circuit/circuit.ts';
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { BROKEN, FUSED, resistance } from '../pieces/resistance.ts';
@@ -16,12 +17,14 @@ const faults: FaultKind[] = [
     name: 'display filament open',
     description: 'The heater wire of the display is broken: the display stays dark.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'bridge-shorted',
     name: 'rectifier shorted',
     description: 'One diode of the bridge has melted through.',
     weight: 1,
+    source: judgement,
     look: 'One diode of the bridge is cracked.',
   },
   {
@@ -29,12 +32,14 @@ const faults: FaultKind[] = [
     name: 'supply rail shorted',
     description: 'The reservoir capacitor or a chip shorts the rail of the board.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'dead',
     name: 'no answer to keys',
     description: 'The logic does not run; its supply reads as it should.',
     weight: 4,
+    source: judgement,
   },
 ];
 
@@ -62,6 +67,7 @@ export const controlBoard: PartKind = {
     },
   },
   faults,
+  running: { powers: ['load', 'filament'] },
   circuit: ({ node, inner, value, faults: applied }) => {
     const fault = readFaults(faults, applied);
     const plus = inner('rail');

@@ -5,6 +5,7 @@
  * Source: temperatures from service sheets SM-5, SM-4 in FACTS section 8; contact: common practice.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { resistance } from '../pieces/resistance.ts';
@@ -15,12 +16,14 @@ const faults: FaultKind[] = [
     name: 'open',
     description: 'The contact stays open at room temperature.',
     weight: 6,
+    source: judgement,
   },
   {
     id: 'high-resistance',
     name: 'burnt contact',
     description: 'The contact is burnt and makes a poor path.',
     weight: 2,
+    source: judgement,
     parameters: { ohms: { name: 'contact', unit: 'Ω', min: 0.5, max: 100, usual: 5 } },
     look: 'The cover of the cut-out is discoloured at one tab.',
   },
@@ -30,6 +33,7 @@ const faults: FaultKind[] = [
     description:
       'The disc has lost its setting and opens below its temperature; cold it is closed.',
     weight: 2,
+    source: judgement,
     parameters: { opensAt: { name: 'opens at', unit: '°C', min: 45, max: 120, usual: 75 } },
   },
   {
@@ -37,6 +41,7 @@ const faults: FaultKind[] = [
     name: 'never opens',
     description: 'The contact is welded: cold it reads as it should, hot it does not protect.',
     weight: 1,
+    source: judgement,
   },
 ];
 

@@ -6,6 +6,7 @@
  * contact 15 to 30 mOhm new: data sheets DS-S in FACTS section 8.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { resistance } from '../pieces/resistance.ts';
@@ -16,18 +17,21 @@ const faults: FaultKind[] = [
     name: 'stuck open',
     description: 'The contact does not close, whatever the lever does.',
     weight: 4,
+    source: judgement,
   },
   {
     id: 'welded',
     name: 'stuck closed (welded)',
     description: 'The contact is welded and stays closed, whatever the lever does.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'high-resistance',
     name: 'burnt contact',
     description: 'The contact closes but is burnt and makes a poor path.',
     weight: 3,
+    source: judgement,
     parameters: { ohms: { name: 'contact', unit: 'Ω', min: 0.3, max: 50, usual: 3 } },
     look: 'The plastic at one tab of the switch is brown.',
   },
@@ -36,6 +40,7 @@ const faults: FaultKind[] = [
     name: 'carbon track across the contact',
     description: 'Arcing has left carbon in the switch: the open contact still conducts a little.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'track', unit: 'Ω', min: 1e4, max: 1e7, usual: 2e5 } },
   },
 ];
@@ -69,6 +74,7 @@ export const doorSwitch: PartKind = {
     },
   },
   faults,
+  actuator: { hold: 'Hold the actuator pressed', letGo: 'Let the actuator go' },
   circuit: ({ node, inner, value, variant, faults: applied, isActuated }) => {
     const fault = readFaults(faults, applied);
     const other = throwOf(variant);

@@ -5,6 +5,7 @@
  * Source: values from ENGINE section 3, common practice, no source.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { BROKEN, FUSED, resistance } from '../pieces/resistance.ts';
@@ -18,12 +19,14 @@ const faults: FaultKind[] = [
     name: 'bleeder open',
     description: 'The resistor that empties the filter capacitor has lost its path.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'line-choke-open',
     name: 'line choke open',
     description: 'The winding between line in and line out is broken at its solder joint.',
     weight: 2,
+    source: judgement,
     look: 'A brown ring around the solder joint of the line choke.',
   },
   {
@@ -31,6 +34,7 @@ const faults: FaultKind[] = [
     name: 'neutral choke open',
     description: 'The winding between neutral in and neutral out is broken at its solder joint.',
     weight: 1,
+    source: judgement,
     look: 'A brown ring around the solder joint of the neutral choke.',
   },
   {
@@ -38,6 +42,7 @@ const faults: FaultKind[] = [
     name: 'filter capacitor shorted',
     description: 'The capacitor across line and neutral has melted through.',
     weight: 1,
+    source: judgement,
     look: 'The box of the filter capacitor is cracked and sooty.',
   },
   {
@@ -45,6 +50,7 @@ const faults: FaultKind[] = [
     name: 'line side leaky to chassis',
     description: 'The small capacitor from line out to chassis conducts.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 1e3, max: 5e6, usual: 1e5 } },
   },
   {
@@ -52,6 +58,7 @@ const faults: FaultKind[] = [
     name: 'burnt track',
     description: 'The track to the line tab is burnt and makes a poor joint.',
     weight: 2,
+    source: judgement,
     parameters: { ohms: { name: 'joint', unit: 'Ω', min: 0.3, max: 50, usual: 2 } },
     look: 'The board is brown around the line tab.',
   },

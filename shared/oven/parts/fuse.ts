@@ -3,6 +3,7 @@
  *   R = 3.4 mOhm, melting integral 575 A2s (20 A). Source: data sheet DS-F in FACTS section 8.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { BROKEN, resistance } from '../pieces/resistance.ts';
@@ -13,12 +14,14 @@ const faults: FaultKind[] = [
     name: 'blown',
     description: 'The element has melted; through the ceramic body nothing shows.',
     weight: 8,
+    source: judgement,
   },
   {
     id: 'wrong-rating',
     name: 'wrong rating fitted',
     description: 'An earlier repair fitted a fuse of another rating.',
     weight: 1,
+    source: judgement,
     parameters: { amps: { name: 'rating fitted', unit: 'A', min: 5, max: 30, usual: 12 } },
     look: 'The rating stamped on the cap is not the one on the label beside the holder.',
   },
@@ -27,6 +30,7 @@ const faults: FaultKind[] = [
     name: 'burnt holder clip',
     description: 'The holder clip has lost its spring and heats at its contact.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'contact', unit: 'Ω', min: 0.3, max: 5, usual: 1 } },
     look: 'One clip of the holder is blue and the board under it brown.',
   },
@@ -57,6 +61,7 @@ export const fuse: PartKind = {
     },
   },
   faults,
+  running: { melts: 'element' },
   circuit: ({ node, inner, value, faults: applied, isOpened }) => {
     const fault = readFaults(faults, applied);
     const isOpen = isOpened || fault.has('open');

@@ -6,6 +6,7 @@
  * decay: FACTS section 1.2.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { breakdown } from '../pieces/breakdown.ts';
 import { readFaults } from '../pieces/read-faults.ts';
@@ -17,6 +18,7 @@ const faults: FaultKind[] = [
     name: 'shorted',
     description: 'The foils have melted together.',
     weight: 4,
+    source: judgement,
     parameters: { ohms: { name: 'short', unit: 'Ω', min: 0.01, max: 50, usual: 0.1 } },
     look: 'The can is swollen at its broad side.',
   },
@@ -25,12 +27,14 @@ const faults: FaultKind[] = [
     name: 'open inside',
     description: 'The lead between a terminal and the foil is lost; the bleeder still reads.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'leaky',
     name: 'leaky',
     description: 'The film conducts between the terminals.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 100, max: 8e6, usual: 2e5 } },
   },
   {
@@ -38,6 +42,7 @@ const faults: FaultKind[] = [
     name: 'leaky to can',
     description: 'The insulation between terminal 1 and the can conducts.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 100, max: 1.5e7, usual: 1e6 } },
     look: 'A film of oil below the terminals.',
   },
@@ -46,6 +51,7 @@ const faults: FaultKind[] = [
     name: 'shorted to can',
     description: 'Terminal 2 is through to the can.',
     weight: 2,
+    source: judgement,
     parameters: { ohms: { name: 'short', unit: 'Ω', min: 0.01, max: 50, usual: 0.1 } },
     look: 'A black pit beside terminal 2.',
   },
@@ -54,12 +60,14 @@ const faults: FaultKind[] = [
     name: 'bleeder open',
     description: 'The resistor inside is broken: the charge stays for hours.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'drifted',
     name: 'capacitance low',
     description: 'A part of the foil has lost its contact.',
     weight: 1,
+    source: judgement,
     parameters: {
       fraction: { name: 'part left', unit: '', min: 0.2, max: 0.92, usual: 0.5 },
     },
@@ -69,6 +77,7 @@ const faults: FaultKind[] = [
     name: 'breaks down in use',
     description: 'The film gives way above a voltage; on an ohmmeter it is good.',
     weight: 1,
+    source: judgement,
     parameters: { volts: { name: 'breaks down at', unit: 'V', min: 600, max: 2500, usual: 1200 } },
   },
 ];

@@ -7,6 +7,7 @@
  */
 import type { Element } from '../../engine/circuit/circuit.ts';
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { BROKEN, resistance } from '../pieces/resistance.ts';
@@ -17,6 +18,7 @@ const faults: FaultKind[] = [
     name: 'shorted',
     description: 'The junctions have melted through.',
     weight: 5,
+    source: judgement,
     parameters: { ohms: { name: 'short', unit: 'Ω', min: 0.01, max: 50, usual: 0.1 } },
     look: 'The body of the diode is cracked.',
   },
@@ -25,12 +27,14 @@ const faults: FaultKind[] = [
     name: 'open',
     description: 'The junctions have come apart: neither way conducts.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'leaky',
     name: 'leaky',
     description: 'The diode conducts backwards as well.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 1e3, max: 1e8, usual: 2e6 } },
   },
   {
@@ -38,6 +42,7 @@ const faults: FaultKind[] = [
     name: 'fitted the wrong way round',
     description: 'An earlier repair fitted the diode with its cathode to the capacitor.',
     weight: 1,
+    source: judgement,
     look: 'The arrow on the body points away from the chassis.',
   },
   {
@@ -45,6 +50,7 @@ const faults: FaultKind[] = [
     name: 'breaks down in use',
     description: 'It conducts backwards above a voltage; every low-voltage check is good.',
     weight: 1,
+    source: judgement,
     parameters: { volts: { name: 'breaks down at', unit: 'V', min: 500, max: 5000, usual: 1500 } },
   },
 ];

@@ -10,6 +10,7 @@
 import { square } from '../../engine/elementary/power.ts';
 import type { Element } from '../../engine/circuit/circuit.ts';
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartContext, PartKind } from '../part-kind.ts';
 import { breakdown } from '../pieces/breakdown.ts';
 import { readFaults } from '../pieces/read-faults.ts';
@@ -27,12 +28,14 @@ const faults: FaultKind[] = [
     name: 'primary open',
     description: 'The primary is broken at its tab.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'hv-open',
     name: 'high-voltage winding open',
     description: 'The thin wire of the high-voltage winding is broken.',
     weight: 3,
+    source: judgement,
   },
   {
     id: 'hv-shorted-to-core',
@@ -40,6 +43,7 @@ const faults: FaultKind[] = [
     description:
       'The winding has burnt through to the core and only the part up to there is in use.',
     weight: 3,
+    source: judgement,
     parameters: {
       part: {
         name: 'part of the winding from its HV end to the short',
@@ -56,12 +60,14 @@ const faults: FaultKind[] = [
     name: 'heater winding open',
     description: 'The few turns that heat the magnetron are broken at their crimp.',
     weight: 1,
+    source: judgement,
   },
   {
     id: 'heater-winding-shorted-to-core',
     name: 'heater winding shorted to core',
     description: 'The insulation of the heater winding is pinched against the core.',
     weight: 1,
+    source: judgement,
     look: 'The insulation of the heater winding is cut where it passes the core.',
   },
   {
@@ -69,6 +75,7 @@ const faults: FaultKind[] = [
     name: 'primary leaky to core',
     description: 'The insulation between primary and core conducts.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: leakage },
   },
   {
@@ -76,6 +83,7 @@ const faults: FaultKind[] = [
     name: 'high-voltage turns shorted',
     description: 'Some turns of the high-voltage winding are shorted among themselves.',
     weight: 3,
+    source: judgement,
     parameters: {
       fraction: { name: 'part of the winding', unit: '', min: 0.002, max: 0.2, usual: 0.032 },
       ohms: { name: 'loop', unit: 'Ω', min: 0.04, max: 20, usual: 0.8 },
@@ -87,6 +95,7 @@ const faults: FaultKind[] = [
     description:
       'The high-voltage winding arcs to the core above a voltage; cold it reads as it should.',
     weight: 1,
+    source: judgement,
     parameters: { volts: { name: 'breaks down at', unit: 'V', min: 1100, max: 2800, usual: 1500 } },
   },
 ];
@@ -184,6 +193,7 @@ export const hvTransformer: PartKind = {
     insulation: { name: 'winding to core', unit: 'Ω', nominal: 1e12, tolerance: 0.3, source },
   },
   faults,
+  running: { hums: 'primary' },
   circuit: (part) => {
     const { node, inner, value } = part;
     const fault = readFaults(faults, part.faults);

@@ -3,6 +3,7 @@
  * Source: ENGINE section 3; ratio x10 from textbook problems in FACTS section 7.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { BROKEN, FUSED, resistance } from '../pieces/resistance.ts';
@@ -13,6 +14,7 @@ const faults: FaultKind[] = [
     name: 'filament open',
     description: 'The filament is broken.',
     weight: 8,
+    source: judgement,
     look: 'The filament hangs loose and the glass is grey inside.',
   },
   {
@@ -20,6 +22,7 @@ const faults: FaultKind[] = [
     name: 'holder shorted',
     description: 'The contacts of the lamp holder touch.',
     weight: 1,
+    source: judgement,
     look: 'The holder has melted on one side.',
   },
 ];
@@ -48,6 +51,7 @@ export const lamp: PartKind = {
     },
   },
   faults,
+  running: { isHot: true, powers: ['filament'] },
   circuit: ({ node, inner, value, faults: applied, isHot }) => {
     const fault = readFaults(faults, applied);
     const sound = value('cold') * (isHot ? value('hotRatio') : 1);

@@ -7,6 +7,7 @@
  */
 import type { Element } from '../../engine/circuit/circuit.ts';
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartContext, PartKind } from '../part-kind.ts';
 import type { FaultReader } from '../pieces/read-faults.ts';
 import { readFaults } from '../pieces/read-faults.ts';
@@ -18,12 +19,14 @@ const faults: FaultKind[] = [
     name: 'heater open',
     description: 'The filament or its weld is broken.',
     weight: 3,
+    source: judgement,
   },
   {
     id: 'heater-loose',
     name: 'heater terminal loose',
     description: 'A receptacle of the filter box is burnt and makes a poor joint to the heater.',
     weight: 2,
+    source: judgement,
     parameters: { ohms: { name: 'joint', unit: 'Ω', min: 0.5, max: 2, usual: 1 } },
     look: 'One heater tab is blue and its plastic brown.',
   },
@@ -32,6 +35,7 @@ const faults: FaultKind[] = [
     name: 'heater shorted to body',
     description: 'Filament and anode touch inside.',
     weight: 4,
+    source: judgement,
     parameters: { ohms: { name: 'short', unit: 'Ω', min: 0.01, max: 50, usual: 0.3 } },
   },
   {
@@ -39,6 +43,7 @@ const faults: FaultKind[] = [
     name: 'leaky to body',
     description: 'A feed-through conducts between heater and body.',
     weight: 2,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 1e3, max: 1.5e7, usual: 1e6 } },
     look: 'A brown track over the ceramic of the filter box.',
   },
@@ -47,6 +52,7 @@ const faults: FaultKind[] = [
     name: 'weak emission',
     description: 'The cathode is worn: cold it reads as it should, and little heat comes.',
     weight: 4,
+    source: judgement,
     parameters: { fraction: { name: 'part left', unit: '', min: 0.2, max: 0.9, usual: 0.5 } },
   },
   {
@@ -54,6 +60,7 @@ const faults: FaultKind[] = [
     name: 'magnet cracked',
     description: 'A magnet has cracked: the field is gone and no power comes out.',
     weight: 1,
+    source: judgement,
     look: 'A crack runs through the upper magnet.',
   },
 ];
@@ -112,6 +119,7 @@ export const magnetron: PartKind = {
     dynamic: { name: 'dynamic', unit: 'Ω', nominal: 350, tolerance: 0.05, source },
   },
   faults,
+  running: { isHot: true, powers: ['beam', 'threshold'] },
   circuit: (part) => {
     const { node, inner, value } = part;
     const fault = readFaults(faults, part.faults);

@@ -5,6 +5,7 @@
  * Source: fan 20 to 40 Ohm, turntable 2.5 to 4.5 kOhm (120 V): FACTS section 8, common practice.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { resistance } from '../pieces/resistance.ts';
@@ -17,12 +18,14 @@ const faults: FaultKind[] = [
     name: 'winding open',
     description: 'The winding is broken.',
     weight: 4,
+    source: judgement,
   },
   {
     id: 'shorted-turns',
     name: 'turns shorted',
     description: 'A part of the winding is shorted in itself.',
     weight: 2,
+    source: judgement,
     parameters: {
       fraction: { name: 'part of the winding', unit: '', min: 0.05, max: 0.95, usual: 0.5 },
     },
@@ -33,6 +36,7 @@ const faults: FaultKind[] = [
     name: 'leaky to chassis',
     description: 'The winding conducts to the metal of the oven.',
     weight: 1,
+    source: judgement,
     parameters: { ohms: { name: 'leakage', unit: 'Ω', min: 1e3, max: 1e7, usual: 1e5 } },
   },
   {
@@ -40,6 +44,7 @@ const faults: FaultKind[] = [
     name: 'shaft seized',
     description: 'The shaft does not turn; the winding is as it should be.',
     weight: 3,
+    source: judgement,
     look: 'The shaft does not turn by hand.',
   },
 ];
@@ -69,6 +74,7 @@ export const motor: PartKind = {
     },
   },
   faults,
+  running: { turns: { winding: 'winding', stoppedBy: ['seized'] } },
   circuit: ({ node, inner, value, faults: applied }) => {
     const fault = readFaults(faults, applied);
     const shorted = fault.has('shorted-turns') ? fault.value('shorted-turns', 'fraction') : 0;

@@ -6,6 +6,7 @@
  * common practice; its inductance: judgement.
  */
 import type { FaultKind } from '../fault.ts';
+import { judgement } from '../fault.ts';
 import type { PartKind } from '../part-kind.ts';
 import { readFaults } from '../pieces/read-faults.ts';
 import { resistance } from '../pieces/resistance.ts';
@@ -17,12 +18,14 @@ const faults: FaultKind[] = [
     name: 'contact welded',
     description: 'The contact stays closed without current in the coil.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'contact-burnt',
     name: 'contact burnt',
     description: 'The contact closes but makes a poor path.',
     weight: 3,
+    source: judgement,
     parameters: { ohms: { name: 'contact', unit: 'Ω', min: 0.3, max: 200, usual: 5 } },
   },
   {
@@ -30,12 +33,14 @@ const faults: FaultKind[] = [
     name: 'contact does not close',
     description: 'The contact is broken off or burnt away: the relay clicks and nothing passes.',
     weight: 2,
+    source: judgement,
   },
   {
     id: 'coil-open',
     name: 'coil open',
     description: 'The coil is broken: the relay never pulls in.',
     weight: 1,
+    source: judgement,
   },
 ];
 
@@ -79,6 +84,7 @@ export const relay: PartKind = {
     },
   },
   faults,
+  running: { isSwitchedOn: true },
   circuit: ({ node, inner, value, faults: applied, isEnergised }) => {
     const fault = readFaults(faults, applied);
     const pullsIn = isEnergised && !fault.has('coil-open') && !fault.has('contact-open');

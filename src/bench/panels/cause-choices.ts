@@ -1,6 +1,5 @@
-import { leadFaults } from '../../../shared/oven/lead-faults.ts';
+import { faultsOf } from '../../../shared/oven/check-faults.ts';
 import type { OvenDefinition } from '../../../shared/oven/oven.ts';
-import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 
 export interface FaultChoice {
   id: string;
@@ -9,9 +8,7 @@ export interface FaultChoice {
 
 /** What can be wrong with a part or a lead of this oven, as its kind lists it. */
 export function faultChoices(definition: OvenDefinition, on: string): readonly FaultChoice[] {
-  if (definition.leads.some(({ ref }) => ref === on)) return leadFaults;
-  const part = definition.parts.find(({ ref }) => ref === on);
-  return part ? partKinds[part.kind].faults : [];
+  return faultsOf(definition, on) ?? [];
 }
 
 /** `C1 high-voltage capacitor: shorted` */

@@ -23,9 +23,10 @@ export function chipsFor(
     state.isCordIn ? { tone: 'caution', text: 'cord in' } : { tone: 'safe', text: 'cord out' },
     state.isCoverOn ? { tone: 'plain', text: 'cover on' } : { tone: 'caution', text: 'cover off' },
     state.oven.isDoorClosed ? null : { tone: 'plain', text: 'door open' },
-    state.isCordIn
+    state.isCordIn && state.isDisplayLit !== null
       ? { tone: 'plain', text: state.isDisplayLit ? 'display lit' : 'display dark' }
       : null,
+    state.runsByItself ? { tone: 'caution', text: 'runs by itself' } : null,
     ...provedDead(definition, events).map(({ part, atMs }): Chip => ({
       tone: 'safe',
       text: `${part} proved 0 V at ${benchClock(atMs)}`,
@@ -38,7 +39,7 @@ export function chipsFor(
         },
     state.oven.pressed.length === 0
       ? null
-      : { tone: 'plain', text: `${state.oven.pressed.join(', ')} held pressed` },
+      : { tone: 'plain', text: `${state.oven.pressed.join(', ')} held by hand` },
     state.meter.isDestroyed ? { tone: 'caution', text: 'meter destroyed' } : null,
   ];
   return chips.filter((chip) => chip !== null);

@@ -53,9 +53,10 @@ export function sceneHand(
     stamps: Object.fromEntries(definition.parts.map((part) => [part.ref, stampOf(part)])),
     lit: [
       ...ofKind('lamp', run?.isLampLit ?? false),
-      ...ofKind('control-board', run?.isDisplayLit ?? state.isDisplayLit),
+      ...ofKind('control-board', run?.isDisplayLit ?? state.isDisplayLit ?? false),
     ],
     turning: [
+      ...ofKind('mechanical-timer', run?.isTimerRunning ?? false),
       ...ofKind('motor', run?.isFanTurning ?? false, 'fan'),
       ...ofKind('motor', run?.isTurntableTurning ?? false, 'turntable'),
     ],

@@ -1,6 +1,7 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import type { BenchCommand } from '../../../shared/bench/catalogue.ts';
 import type { OvenDefinition } from '../../../shared/oven/oven.ts';
+import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 import { describeTarget, liftedEnds, terminalsOf } from '../../../shared/oven/targets.ts';
 import type { Selection } from '../../simulation/bench-store.ts';
 import type { Hand } from '../tools/tool.ts';
@@ -189,14 +190,14 @@ function partChoices(definition: OvenDefinition, state: BenchState, ref: string)
   const part = definition.parts.find((one) => one.ref === ref);
   if (!part) return null;
   const isPressed = state.oven.pressed.includes(ref);
-  const press: Choice[] =
-    part.kind !== 'door-switch'
-      ? []
-      : [
-          isPressed
-            ? command('Let the actuator go', { type: 'ReleaseSwitch', data: { part: ref } })
-            : command('Hold the actuator pressed', { type: 'PressSwitch', data: { part: ref } }),
-        ];
+  const { actuator } = partKinds[part.kind];
+  const press: Choice[] = !actuator
+    ? []
+    : [
+        isPressed
+          ? command(actuator.letGo, { type: 'ReleaseSwitch', data: { part: ref } })
+          : command(actuator.hold, { type: 'PressSwitch', data: { part: ref } }),
+      ];
   const groups: ChoiceGroup[] = [
     {
       title: 'This part',

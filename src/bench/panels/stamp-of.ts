@@ -18,6 +18,10 @@ export function stampOf(part: OvenPart): string[] {
       const celsius = rating('opensAt');
       return Number.isNaN(celsius) ? [] : [`${celsius} °C`];
     }
+    case 'hv-fuse':
+      return [`${rating('rating')} A`, '5 kV'];
+    case 'resistor':
+      return [`${rating('resistance')} Ω`];
     case 'plug':
     case 'chassis':
     case 'filter-board':
@@ -25,6 +29,7 @@ export function stampOf(part: OvenPart): string[] {
     case 'relay':
     case 'board-transformer':
     case 'control-board':
+    case 'mechanical-timer':
     case 'lamp':
     case 'motor':
     case 'hv-transformer':

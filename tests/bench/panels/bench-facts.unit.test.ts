@@ -97,7 +97,7 @@ describe('chips', () => {
       'cover off caution',
       'C1 proved 0 V at 02:11 safe',
       '2 leads lifted, 1 labelled caution',
-      'S1, S2 held pressed plain',
+      'S1, S2 held by hand plain',
     ]);
   });
 });
