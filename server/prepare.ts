@@ -41,12 +41,12 @@ export async function prepare(options: PrepareOptions): Promise<OvenLibrary> {
     );
     if (organisation !== null) {
       const recordings = await readRecordings(root, onBadFile);
-      await seedAttempts(
+      const put = await seedAttempts(
         { ...stores, rules: attemptRules, ovens, clock },
         organisation,
         recordings,
       );
-      log.info('the demonstration organisation was set up');
+      if (put > 0) log.info({ attempts: put }, 'the demonstration organisation was set up');
     }
   }
   log.info({ ovens: ovens.list().length, jobs: jobs.length }, 'ovens and practice jobs are ready');

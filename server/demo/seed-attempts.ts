@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { v5 as nameUuid } from 'uuid';
 import type { RecordedEvent } from '../../shared/bench/event.ts';
 import type { AccountStore } from '../accounts/account.ts';
 import type { AttemptRules } from '../attempts/attempt-rules.ts';
@@ -19,17 +20,22 @@ export interface SeedAttemptsDeps {
 /** ms between two demo attempts, the newest last */
 const apart = 26 * 60 * 60 * 1000;
 
-/** Puts recorded attempts into the demo organisation, as if each had been worked and handed in on an earlier day. */
+/**
+ * Puts recorded attempts into the demo organisation, as if each had been worked and handed in on an
+ * earlier day. Those that are there stay; one that was broken off is gone on with. Answers how many were put there.
+ */
 export async function seedAttempts(
   deps: SeedAttemptsDeps,
   organisation: string,
   recordings: readonly Recording[],
-): Promise<void> {
+): Promise<number> {
   const now = deps.clock().getTime();
+  let put = 0;
   for (const [index, recording] of recordings.entries()) {
     const startedAt = new Date(now - (recordings.length - index) * apart);
-    await seedAttempt(deps, organisation, recording, startedAt);
+    if (await seedAttempt(deps, organisation, recording, startedAt)) put += 1;
   }
+  return put;
 }
 
 async function seedAttempt(
@@ -37,7 +43,10 @@ async function seedAttempt(
   organisation: string,
   { email, job, seed, events }: Recording,
   startedAt: Date,
-): Promise<void> {
+): Promise<boolean> {
+  const id = nameUuid(`${email} ${job}`, organisation);
+  const known = await attempts.find(id);
+  if (known?.handedInAt) return false;
   const person = await accounts.findByEmail(email);
   const scenario = await scenarios.findByOrigin(organisation, job);
   const published = scenario && (await scenarios.findPublished(organisation, scenario.id));
@@ -53,9 +62,8 @@ async function seedAttempt(
   });
   const [first, ...rest] = recorded;
   const last = recorded.at(-1);
-  if (!first || !last) return;
-  const id = randomUUID();
-  await attempts.create({
+  if (!first || !last) return false;
+  const attempt = {
     id,
     owner: { person: person.id, organisation, visitor: null },
     scenario: published.scenario,
@@ -66,7 +74,8 @@ async function seedAttempt(
     startedAt,
     first,
     state: rules.fold(setup, [first], null),
-  });
+  };
+  if (!known) await attempts.create(attempt);
   await attempts.withLocked(id, (locked) =>
     locked.advance({
       events: rest,
@@ -76,4 +85,5 @@ async function seedAttempt(
       checkpoint: null,
     }),
   );
+  return true;
 }

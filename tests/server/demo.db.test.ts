@@ -1,3 +1,5 @@
+import { readdir } from 'node:fs/promises';
+import { join } from 'node:path';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { Passwords } from '../../server/accounts/passwords.ts';
 import { makeDatabase, type Database } from '../../server/database/data-source.ts';
@@ -62,4 +64,31 @@ test('a second start changes nothing', async () => {
   const before = [await organisations(), await all()];
   await start(true);
   expect([await organisations(), await all()]).toEqual(before);
+});
+
+test('a start that was broken off is gone on with', async () => {
+  const other = await createDatabase();
+  const its = makeDatabase(other.url, silent);
+  await openDatabase(its, silent);
+  const whole = makeStores(its);
+  let made = 0;
+  const create: Stores['attempts']['create'] = (attempt) => {
+    made += 1;
+    return made === 2
+      ? Promise.reject(new Error('the power went'))
+      : whole.attempts.create(attempt);
+  };
+  const attempts = Object.create(whole.attempts, {
+    create: { value: create },
+  }) as Stores['attempts'];
+  const options = { root, isSeeded: true, passwords, clock: () => new Date(), log: silent };
+  await expect(prepare({ ...options, stores: { ...whole, attempts } })).rejects.toThrow('power');
+  await prepare({ ...options, stores: whole });
+  const counted = await other.sql(
+    'SELECT count(*)::integer AS n, count(handed_in_at)::integer AS done FROM attempt',
+  );
+  const recorded = (await readdir(join(root, 'scenarios', 'recordings'))).length;
+  expect(counted).toEqual([{ n: recorded, done: recorded }]);
+  await its.destroy();
+  await other.drop();
 });
