@@ -4,7 +4,7 @@ import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { BenchCommand } from '../../shared/bench/catalogue.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
 import type { MeterView } from '../../shared/bench/reading.ts';
-import { runCommand } from '../../shared/bench/run-command.ts';
+import { runCommand, type Ran } from '../../shared/bench/run-command.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
 import { isMetersOwn } from '../../shared/bench/way-back.ts';
 import type { Condition } from '../../shared/scenario/scenario.ts';
@@ -13,6 +13,7 @@ import { takenOff } from '../bench/tools/taken-off.ts';
 import type { Hand } from '../bench/tools/tool.ts';
 import { emptyHand } from '../bench/tools/tool.ts';
 import type { BenchClock } from './bench-clock.ts';
+import type { BenchThread } from './bench-thread.ts';
 import { isClosedTo, type SaveState } from './save-state.ts';
 
 /** What is picked out on the bench: the panel beside it says what can be done there. */
@@ -35,6 +36,7 @@ export interface BenchStore {
   notice: Notice | null;
   /** what the display shows now; null: nothing */ view: MeterView | null;
   save: SaveState;
+  /** s ordered, while the run is being worked out */ running: number | null;
   clock: BenchClock;
   /** Runs a command now, or at `atMs`; false when the bench refuses. */
   run: (command: BenchCommand, atMs?: number) => boolean;
@@ -52,7 +54,7 @@ export interface BenchStore {
   setSave: (save: SaveState) => void;
   /** Passes `ms` of bench time at once. */ wait: (ms: number) => void;
   /** Start pressed for so many seconds: bench time goes on to the end of the run. */
-  operate: (seconds: number) => void;
+  operate: (seconds: number) => Promise<void>;
 }
 
 export interface BenchStoreOptions {
@@ -62,6 +64,7 @@ export interface BenchStoreOptions {
   events: readonly WireEvent[];
   clock: BenchClock;
   save: SaveState;
+  /** where a run of the oven is worked out */ thread: Pick<BenchThread, 'run'>;
   onEvents: (events: readonly WireEvent[]) => void;
 }
 
@@ -83,6 +86,7 @@ export function benchStore(options: BenchStoreOptions): StoreApi<BenchStore> {
     notice: null,
     view: null,
     save: options.save,
+    running: null,
     ...acting(options, set, get),
     ...handling(set, get),
     select: (selection) => set({ selection }),
@@ -99,7 +103,7 @@ export function benchStore(options: BenchStoreOptions): StoreApi<BenchStore> {
 }
 
 function acting(
-  { setup, clock, onEvents }: BenchStoreOptions,
+  { setup, clock, onEvents, thread }: BenchStoreOptions,
   set: Set,
   get: Get,
 ): Pick<BenchStore, 'run' | 'wait' | 'operate'> {
@@ -108,9 +112,16 @@ function acting(
     return false;
   };
   const run: BenchStore['run'] = (command, atMs) => {
-    const { state, events, save, notice, hand } = get();
+    const { state, save, running } = get();
     if (isClosedTo(save)) return refuse(save.why);
-    const ran = runCommand(setup, state, command, Math.max(atMs ?? clock.now(), state.benchMs));
+    if (running !== null) return refuse('The oven is running. Wait for the end of the run.');
+    return land(
+      command,
+      runCommand(setup, state, command, Math.max(atMs ?? clock.now(), state.benchMs)),
+    );
+  };
+  const land = (command: BenchCommand, ran: Ran): boolean => {
+    const { state, events, notice, hand } = get();
     if (!ran.ok) return refuse(ran.refusal.message);
     const hazard = ran.events.find((event) => event.type === 'HazardHappened');
     const isStillNews =
@@ -137,9 +148,23 @@ function acting(
   return {
     run,
     wait: (ms) => pass(ms, { type: 'Wait', data: { ms } }),
-    operate: (seconds) => pass(seconds * 1000, { type: 'RunOven', data: { ordered: seconds } }),
+    operate: async (seconds) => {
+      const { state, save, running } = get();
+      if (running !== null || isClosedTo(save)) return;
+      const command: BenchCommand = { type: 'RunOven', data: { ordered: seconds } };
+      set({ running: seconds });
+      clock.skip(seconds * 1000);
+      const ran = await thread
+        .run(state, command, Math.max(clock.now(), state.benchMs))
+        .catch(() => null);
+      set({ running: null });
+      if (ran ? land(command, ran) : refuse(notWorkedOut)) return;
+      clock.skip(-seconds * 1000);
+    },
   };
 }
+
+const notWorkedOut = 'This machine could not work out the run. Nothing happened: try again.';
 
 /** Stepping back empties the hand, but for a tip that is held where it was. */
 const handAfter = (hand: Hand, { discharge }: BenchState): Hand =>

@@ -5,7 +5,7 @@ import { readingPeriod, readMeter } from '../../shared/bench/reading.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
 import { autoRange } from '../../shared/instruments/auto-range.ts';
 import type { BenchStore } from './bench-store.ts';
-import type { MeterReader } from './meter-reader.ts';
+import type { BenchThread } from './bench-thread.ts';
 import { isClosedTo } from './save-state.ts';
 
 /**
@@ -13,7 +13,10 @@ import { isClosedTo } from './save-state.ts';
  * something changes. A reading that stands still goes on record once, until something about it changes.
  * Returns what stops it.
  */
-export function meterTick(bench: StoreApi<BenchStore>, reader: MeterReader): () => void {
+export function meterTick(
+  bench: StoreApi<BenchStore>,
+  reader: Pick<BenchThread, 'read' | 'stop'>,
+): () => void {
   let taken = '';
   let isReading = false;
   let isOver = false;
@@ -77,8 +80,8 @@ const isConnected = ({ probes, meter }: BenchState): boolean =>
 const loose = (setup: Setup, state: BenchState, atMs: number): MeterView | null =>
   readMeter(setup, state, { state: { ...state, benchMs: atMs }, trace: { time: [], volts: [] } });
 
-const mayRecord = ({ state, save }: BenchStore): boolean =>
-  !isClosedTo(save) && !state.isHandedIn && isConnected(state);
+const mayRecord = ({ state, save, running }: BenchStore): boolean =>
+  running === null && !isClosedTo(save) && !state.isHandedIn && isConnected(state);
 
 /** REL holds the range, as a number of one range means nothing to another. */
 function changeRange({ setup, state, run }: BenchStore, view: MeterView, atMs: number): boolean {

@@ -5,6 +5,7 @@ import { makeSetup, type Setup } from '../../shared/bench/setup.ts';
 import { verify } from '../../shared/bench/verify.ts';
 import type { Attempt } from '../../shared/contracts/attempts.ts';
 import type { OvenLayout } from '../../shared/oven/layout.ts';
+import type { BenchThread } from './bench-thread.ts';
 import { benchClock } from './bench-clock.ts';
 import type { BenchServer } from './bench-server.ts';
 import { benchStore, type BenchStore } from './bench-store.ts';
@@ -21,6 +22,7 @@ export interface OpenBenchOptions {
   /** uuid of this tab */ writer: string;
   server: BenchServer;
   store: OutboxStore;
+  /** where runs of the oven are worked out */ thread: (setup: Setup) => BenchThread;
   /** null: another tab of this browser writes */ lock: () => Promise<WriterLock | null>;
   /** ms, monotonic */ realNow: () => number;
   /** ms since 1970 */ now: () => number;
@@ -75,9 +77,11 @@ async function onTheBench(options: OpenBenchOptions, found: Found): Promise<Open
   const record = await server.events(attempt.id);
   const start = await standing(options, setup, record, epoch !== null);
   const clock = benchClock(start.state.benchMs, options.realNow);
+  const thread = options.thread(setup);
   const bench = benchStore({
     setup,
     clock,
+    thread,
     condition: attempt.content.condition,
     state: start.state,
     events: [...record.map(withoutRecord), ...start.waiting],
@@ -113,6 +117,7 @@ async function onTheBench(options: OpenBenchOptions, found: Found): Promise<Open
     setAside: start.setAside,
     setStepsAside: () => options.store.setAside(attempt.id, whyClosed(bench.getState().save)),
     close: () => {
+      thread.stop();
       forget();
       out?.stop();
       lock?.release();

@@ -1,6 +1,7 @@
 import { useEffect, useState } from 'react';
 import { Problem } from '../api/problem.ts';
 import { benchServer } from './bench-server.ts';
+import { benchThread } from './bench-thread.ts';
 import { newWriterId } from './new-writer-id.ts';
 import { openBench, type Opened } from './open-bench.ts';
 import { memoryOutboxStore, openOutboxStore } from './outbox-store.ts';
@@ -75,6 +76,7 @@ const open = async (attempt: string, lock: () => Promise<WriterLock | null>): Pr
     server: benchServer,
     store: await openOutboxStore().catch(memoryOutboxStore),
     lock,
+    thread: benchThread,
     realNow: () => performance.now(),
     now: () => Date.now(),
   });

@@ -91,6 +91,21 @@ describe('a trainee', () => {
     await context.close();
   });
 
+  it('runs the oven to confirm the complaint, and the server takes the run', async () => {
+    const { page, errors, context } = await visit(browser, server.url);
+    await signIn(page, 'mina@northgate.example');
+    await openJob(page, /hums louder/i);
+    await page.getByRole('button', { name: 'Run the oven' }).click();
+    const panel = page.getByRole('region', { name: 'Run the oven' });
+    await panel.getByRole('button', { name: 'Run 30 s' }).click();
+    await panel.getByText('a loud hum', { exact: true }).waitFor();
+    await page.getByText(/saved at/).waitFor();
+    await page.reload();
+    await page.getByText(/^run: .*a loud hum, water cold/).waitFor();
+    expect(errors).toEqual([]);
+    await context.close();
+  });
+
   it('goes on where it was after the browser was closed', async () => {
     const first = await visit(browser, server.url);
     await signIn(first.page, 'jonas@northgate.example');

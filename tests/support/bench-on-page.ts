@@ -3,6 +3,7 @@ import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
 import { untouched } from '../../shared/bench/fold.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
+import { sameThread } from '../../src/simulation/bench-thread.ts';
 import { benchClock, type BenchClock } from '../../src/simulation/bench-clock.ts';
 import {
   benchStore,
@@ -34,6 +35,7 @@ export function benchOnPage(
     events: [],
     clock,
     save: { kind: 'saved', at: null },
+    thread: sameThread(setup),
     onEvents: (events) => added.push([...events]),
     ...more,
   });

@@ -14,6 +14,7 @@ const orders = [
 /** The control panel's keys, and what the last run looked, sounded and felt like. */
 export const RunPanel = ({ onClose }: { onClose: () => void }) => {
   const operate = useBench((store) => store.operate);
+  const running = useBench((store) => store.running);
   const last = useBench(({ state }) => state.runs.at(-1));
   const panel = useRef<HTMLElement>(null);
   useEffect(() => panel.current?.focus(), []);
@@ -32,12 +33,22 @@ export const RunPanel = ({ onClose }: { onClose: () => void }) => {
       </div>
       <div className="flex flex-wrap gap-2">
         {orders.map(([seconds, name]) => (
-          <BenchButton key={seconds} onClick={() => operate(seconds)}>
+          <BenchButton
+            key={seconds}
+            aria-disabled={running !== null}
+            onClick={() => void operate(seconds)}
+          >
             Run {name}
           </BenchButton>
         ))}
       </div>
-      {last ? (
+      {running === null ? null : (
+        <label className="grid gap-1 text-sm">
+          The oven runs for {running} s
+          <progress className="h-2 w-full accent-[var(--color-safe)]" />
+        </label>
+      )}
+      {last && running === null ? (
         <dl aria-label="Last run" className="grid gap-1 border-t border-bench-line pt-2 text-sm">
           {runWords(last).map(({ label, value }) => (
             <div key={label} className="grid grid-cols-[84px_1fr]">

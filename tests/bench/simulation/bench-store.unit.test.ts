@@ -53,6 +53,28 @@ describe('what is done on the bench', () => {
     expect(clock.now()).toBe(60_000);
   });
 
+  it('runs the oven aside: meanwhile nothing else is done, and then it is one step at the end of the run', async () => {
+    const { bench, clock, added } = benchOnPage();
+    const running = bench.getState().operate(10);
+    expect(bench.getState().running).toBe(10);
+    expect(bench.getState().run({ type: 'OpenDoor', data: {} })).toBe(false);
+    await running;
+    expect(bench.getState().running).toBeNull();
+    expect(clock.now()).toBe(10_000);
+    expect(added).toEqual([[expect.objectContaining({ type: 'OvenRun', benchMs: 10_000 })]]);
+    expect(bench.getState().state.runs).toHaveLength(1);
+  });
+
+  it('says so when a run could not be worked out, and lets no time pass', async () => {
+    const { bench, clock, added } = benchOnPage(undefined, undefined, {
+      thread: { run: () => Promise.reject(new Error('out of memory')) },
+    });
+    await bench.getState().operate(10);
+    expect(bench.getState()).toMatchObject({ running: null, notice: { kind: 'refusal' } });
+    expect(clock.now()).toBe(0);
+    expect(added).toEqual([]);
+  });
+
   it.each(['read-only', 'refused'] as const)('does nothing while the record is %s', (kind) => {
     const { bench, added } = benchOnPage();
     bench

@@ -1,6 +1,6 @@
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { MeterView } from '../../../shared/bench/reading.ts';
-import { directReader, type MeterReader } from '../../../src/simulation/meter-reader.ts';
+import { sameThread, type BenchThread } from '../../../src/simulation/bench-thread.ts';
 import { meterTick } from '../../../src/simulation/meter-tick.ts';
 import { openBenchOnPage, type BenchOnPage } from '../../support/bench-on-page.ts';
 
@@ -49,7 +49,7 @@ const view = (counts: number | null, isSettled = true): MeterView => ({
 /** A meter whose display the test decides: when something is read is what is tested here, not what. */
 function scripted(
   shown: () => MeterView | null,
-): MeterReader & { asked: number[]; isStopped: boolean } {
+): Pick<BenchThread, 'read' | 'stop'> & { asked: number[]; isStopped: boolean } {
   const reader = {
     asked: [] as number[],
     isStopped: false,
@@ -67,7 +67,7 @@ function scripted(
 describe('the live display', () => {
   it('shows what the circuit gives: 0.55 Ohm of winding (ENGINE 3) and 0.16 Ohm of test leads', async () => {
     const page = onPrimary('ohms-200');
-    const stop = meterTick(page.bench, directReader(page.bench.getState().setup));
+    const stop = meterTick(page.bench, sameThread(page.bench.getState().setup));
     page.pass(2000);
     await vi.advanceTimersByTimeAsync(334);
     const shown = page.bench.getState().view;
@@ -105,7 +105,7 @@ describe('the live display', () => {
   it('drops an answer about a bench that has changed meanwhile, and asks again at once', async () => {
     const page = onPrimary('ohms-200');
     const answers: ((shown: MeterView) => void)[] = [];
-    const reader: MeterReader = {
+    const reader: Pick<BenchThread, 'read' | 'stop'> = {
       read: () => new Promise((resolve) => answers.push(resolve)),
       stop: () => undefined,
     };

@@ -8,6 +8,7 @@ import {
   type OpenBenchOptions,
   type OpenedBench,
 } from '../../../src/simulation/open-bench.ts';
+import { sameThread } from '../../../src/simulation/bench-thread.ts';
 import { memoryOutboxStore } from '../../../src/simulation/outbox-store.ts';
 import type { Sent } from '../../../src/simulation/step-queue.ts';
 import type { WriterLock } from '../../../src/simulation/writer-lock.ts';
@@ -55,6 +56,7 @@ const open = async (options: Partial<OpenBenchOptions> & Pick<OpenBenchOptions, 
     writer: attempt.id,
     store: memoryOutboxStore(),
     lock: () => Promise.resolve(lock()),
+    thread: sameThread,
     realNow: () => 0,
     now: () => 5000,
     ...options,
