@@ -2,7 +2,6 @@ import { createReadStream } from 'node:fs';
 import type { EngineFailure } from '../../shared/engine/circuit/circuit.ts';
 import type { Deck } from '../../shared/engine/deck/deck.ts';
 import { LARGEST_DECK, readDeck } from '../../shared/engine/deck/read-deck.ts';
-import { solveDeck } from '../../shared/engine/deck/solve-deck.ts';
 
 /**
  * npm run --silent solve -- FILE.cir (or `-` for standard input)
@@ -21,6 +20,8 @@ async function solve(path: string): Promise<number> {
     const more = others > 0 ? ` (and ${others} more)` : '';
     return fail(2, `line ${first?.line ?? 1}: ${first?.message ?? ''}${more}`);
   }
+  // Loaded late: most of the engine is not needed to say what is wrong with a deck.
+  const { solveDeck } = await import('../../shared/engine/deck/solve-deck.ts');
   const solved = solveDeck(read.value);
   if (!solved.ok) return failAnalysis(read.value, solved.failure);
   process.stdout.write(`${JSON.stringify(solved.value)}\n`);
