@@ -41,5 +41,5 @@ function whatIsLeft(setup: Setup): { charge: Record<string, number>; opened: str
     benchMs: 0,
   });
   const since = passTime(setup, stopped, setup.lastRunSecondsAgo * 1000).state;
-  return { charge: { ...since.storage.voltages }, opened: outcome.opened };
+  return { charge: { ...since.storage.voltages }, opened: [...since.oven.opened] };
 }

@@ -5,6 +5,13 @@ import type { CapturedReading, Cause, Hazard, RunOutcome, Verdict } from './reco
 
 export type ProbeColour = 'red' | 'black';
 
+/** Magnetrons cooling in still air since a run, and the cut-outs that close again on the way. */
+export interface Warmth {
+  /** ms of bench time at which the degrees were so */ atMs: number;
+  celsius: Readonly<Record<PartRef, number>>;
+  closings: readonly { part: PartRef; atMs: number }[];
+}
+
 /** Everything that is so on the bench at one moment: the fold of the attempt's events. Times in ms of bench time. */
 export interface BenchState {
   benchMs: number;
@@ -27,6 +34,7 @@ export interface BenchState {
   /** the 12.6 V battery's own two leads: one from its negative pole, one behind 1 kOhm */
   battery: { neg: TargetRef | null; oneK: TargetRef | null };
   storage: Storage;
+  /** what the last run left warm; absent: everything is at room temperature */ warmth?: Warmth;
   replaced: readonly PartRef[];
   inspected: readonly PartRef[];
   sheet: {

@@ -6,6 +6,7 @@ import { assemble, nodeOf } from '../oven/assemble.ts';
 import type { BenchBranch } from '../oven/oven-state.ts';
 import type { BenchState } from './bench-state.ts';
 import { branches } from './branches.ts';
+import { afterClosing, nextClosing } from './cooling.ts';
 import type { Setup } from './setup.ts';
 
 /** V; below this everywhere, and with nothing that drives, the circuit is dead and stays so. */
@@ -31,10 +32,27 @@ const remembered = new WeakMap<BenchState, { setup: Setup; untilMs: number; pass
 export function passTime(setup: Setup, state: BenchState, untilMs: number): Passed {
   const known = remembered.get(state);
   if (known?.setup === setup && known.untilMs === untilMs) return known.passed;
-  const passed = integrateTo(setup, state, untilMs);
+  const passed = throughClosings(setup, state, untilMs);
   remembered.set(state, { setup, untilMs, passed });
   return passed;
 }
+
+/** Cut-outs that cooled enough close on the way: each closing makes another circuit. */
+function throughClosings(setup: Setup, state: BenchState, untilMs: number): Passed {
+  const next = nextClosing(state, untilMs);
+  if (!next) return integrateTo(setup, state, untilMs);
+  const first = integrateTo(setup, state, Math.max(next.atMs, state.benchMs));
+  const rest = throughClosings(setup, afterClosing(setup, first.state, next), untilMs);
+  return { state: rest.state, trace: joined(first.trace, rest.trace) };
+}
+
+const joined = (a: Trace, b: Trace): Trace => {
+  const until = a.time.at(-1) ?? 0;
+  return {
+    time: [...a.time, ...b.time.map((at) => until + at)],
+    volts: [...a.volts, ...b.volts],
+  };
+};
 
 function integrateTo(setup: Setup, state: BenchState, untilMs: number): Passed {
   const duration = (untilMs - state.benchMs) / 1000;

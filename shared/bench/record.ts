@@ -57,6 +57,25 @@ export type Hazard = z.infer<typeof hazard> & { benchMs: number };
 /** Against a healthy oven of this definition. */
 const hum = z.enum(['none', 'quiet', 'normal', 'loud']);
 
+/** What heat did in a run. */
+export const runHeat = z.strictObject({
+  /** °C of each magnetron when the run's time is over */ celsius: z.record(z.string(), z.number()),
+  /** cut-outs open then, whenever they opened */ open: z.array(partRef),
+  /** cut-outs that moved, and s after start */
+  moves: z
+    .array(z.strictObject({ part: partRef, after: z.number(), isOpen: z.boolean() }))
+    .max(200),
+});
+export type RunHeat = z.infer<typeof runHeat>;
+
+/** What the keys of the hood do, tried during a run. */
+export const hoodOutcome = z.strictObject({
+  isVentTurningLow: z.boolean(),
+  isVentTurningHigh: z.boolean(),
+  isLampLit: z.boolean(),
+});
+export type HoodOutcome = z.infer<typeof hoodOutcome>;
+
 /** What one powered run did, as a person in front of the oven sees and hears it. */
 export const runOutcome = z.strictObject({
   /** s asked for at the panel */ ordered: z.number().min(1).max(300),
@@ -76,5 +95,7 @@ export const runOutcome = z.strictObject({
   /** fuses blown and cut-outs opened by the run */ opened: z.array(partRef),
   /** V left on capacitors when power went, by element name */
   charge: z.record(z.string(), z.number()),
+  /** absent in the record of runs from before heat was reckoned */ heat: runHeat.optional(),
+  /** absent when the oven has no hood over a cooktop */ hood: hoodOutcome.optional(),
 });
 export type RunOutcome = z.infer<typeof runOutcome>;

@@ -10,7 +10,11 @@ import { terminalsOf } from './targets.ts';
 /** The faults a part or a lead of this oven can have; null when the oven has no such part or lead. */
 export function faultsOf(definition: OvenDefinition, ref: string): readonly FaultKind[] | null {
   const part = definition.parts.find((candidate) => candidate.ref === ref);
-  if (part) return partKinds[part.kind].faults;
+  if (part) {
+    const { faults, usual } = partKinds[part.kind];
+    const variant = part.variant ?? usual ?? '';
+    return faults.filter(({ variants }) => variants?.includes(variant) ?? true);
+  }
   return definition.leads.some((lead) => lead.ref === ref)
     ? leadFaults.filter(({ id }) => isPossible(definition, ref, id))
     : null;

@@ -29,4 +29,5 @@ export interface FaultKind {
   >;
   /** what a misplaced lead may name as the other */ other?: 'terminal' | 'lead end';
   /** what inspecting the part from close shows, if it shows at all */ look?: string;
+  /** variants of the kind that can have it; absent: all */ variants?: readonly string[];
 }

@@ -50,7 +50,7 @@ function partProblems(parts: { at: string; value: z.infer<typeof ovenPart> }[]):
       .filter((name) => !known.includes(name))
       .map((name) => unknownName('value', name, known, `${at}.values.${name}`));
     const variants = kind.variants ?? [];
-    if (part.variant === undefined && variants.length > 0)
+    if (part.variant === undefined && variants.length > 0 && kind.usual === undefined)
       values.push({ path: at, message: `${part.ref} needs a variant: ${variants.join(', ')}` });
     if (part.variant !== undefined && !variants.includes(part.variant))
       values.push(unknownName('variant', part.variant, variants, `${at}.variant`));

@@ -52,6 +52,7 @@ export interface PartKind {
   kind: PartKindName;
   name: string;
   /** variants a definition may name; absent: the kind has none */ variants?: readonly string[];
+  /** the variant of a part that names none; absent: a part has to name one */ usual?: string;
   terminals: (variant: string | undefined) => readonly TerminalKind[];
   values: Readonly<Record<string, ValueKind>>;
   faults: readonly FaultKind[];

@@ -83,6 +83,9 @@ export const replacePart = action({
       voltages: withoutPart(state.storage.voltages, part),
       currents: withoutPart(state.storage.currents, part),
     },
+    ...(state.warmth
+      ? { warmth: { ...state.warmth, celsius: withoutPart(state.warmth.celsius, part) } }
+      : {}),
     oven: {
       ...state.oven,
       faults: state.oven.faults.filter((fault) => fault.on !== part),

@@ -1,9 +1,9 @@
 import { z } from 'zod';
 import { accept, action, refuse } from '../action.ts';
-import { poweredRun } from '../powered-run/powered-run.ts';
+import { beforeRun, warmthAfter } from '../cooling.ts';
+import { openAfter, poweredRun } from '../powered-run/powered-run.ts';
 import type { BenchState } from '../bench-state.ts';
-import { isDead } from '../powered-run/run-electrically.ts';
-import type { RunOutcome } from '../record.ts';
+import type { HoodOutcome, RunOutcome } from '../record.ts';
 import { runOutcome } from '../record.ts';
 import type { Setup } from '../setup.ts';
 
@@ -15,32 +15,39 @@ export const runOven = action({
   event: 'OvenRun',
   input: asked,
   data: runOutcome,
-  decide: ({ setup, state }, { ordered }) => {
+  decide: ({ setup, state, before }, { ordered }) => {
     if (!state.isCordIn) return refuse('cord-is-out', 'The cord is out: nothing can run.');
     const hazards = state.isCoverOn
       ? []
       : [{ kind: 'mains-exposed' as const, at: null, to: null, volts: 0, charge: 0, energy: 0 }];
-    return accept(poweredRun(setup.oven, state.oven, ordered), hazards);
+    const { oven, celsius } = beforeRun(before, state.benchMs - ordered * 1000);
+    return accept(poweredRun(setup.oven, oven, ordered, celsius), hazards);
   },
-  evolve: (state, outcome, setup) => ({
-    ...state,
-    runs: [...state.runs, outcome],
-    isDisplayLit: afterRun(setup, state, outcome),
-    storage: { voltages: { ...outcome.charge }, currents: {} },
-    oven: {
-      ...state.oven,
-      opened: [...new Set([...state.oven.opened, ...outcome.opened])],
-    },
-  }),
+  evolve: (state, outcome, setup) => {
+    const opened = openedBy(setup, state, outcome);
+    return {
+      ...state,
+      runs: [...state.runs, outcome],
+      isDisplayLit: afterRun(outcome),
+      storage: { voltages: { ...outcome.charge }, currents: {} },
+      oven: { ...state.oven, opened },
+      ...(outcome.heat ? { warmth: warmthAfter(setup, state, outcome.heat) } : {}),
+    };
+  },
   describe: (outcome) => `run for ${outcome.seconds.toFixed(1)} s: ${seenAndHeard(outcome)}`,
 });
 
-/** A blown line fuse takes the display with it; a blown high-voltage fuse does not. */
-function afterRun(setup: Setup, state: BenchState, outcome: RunOutcome): boolean | null {
-  if (outcome.isDisplayLit === undefined) return null;
-  if (!outcome.isDisplayLit || outcome.opened.length === 0) return outcome.isDisplayLit;
-  const opened = [...state.oven.opened, ...outcome.opened];
-  return !isDead(setup.oven, { ...state.oven, opened });
+/** Runs from before heat was reckoned tell only what they opened. */
+const openedBy = (setup: Setup, { oven }: BenchState, { heat, opened }: RunOutcome): string[] =>
+  heat
+    ? openAfter(setup.oven, oven.opened, opened, heat.open)
+    : [...new Set([...oven.opened, ...opened])];
+
+/** What ends a run before its time takes the display with it: a line fuse, a cut-out before the board. */
+function afterRun({ isDisplayLit, opened, seconds, ordered }: RunOutcome): boolean | null {
+  if (isDisplayLit === undefined) return null;
+  if (!isDisplayLit || opened.length === 0) return isDisplayLit;
+  return seconds >= ordered;
 }
 
 const humOf = (hum: RunOutcome['hum']): string => (hum === 'none' ? 'no hum' : `${hum} hum`);
@@ -60,6 +67,13 @@ function seenAndHeard(outcome: RunOutcome): string {
     humWords(outcome),
     outcome.waterRise < 0.05 ? 'water cold' : `water up ${outcome.waterRise.toFixed(1)} K`,
     ...outcome.opened.map((ref) => `${ref} opened`),
+    ...(outcome.hood ? [vented(outcome.hood)] : []),
   ];
   return parts.join(', ');
 }
+
+const vented = ({ isVentTurningLow, isVentTurningHigh, isLampLit }: HoodOutcome): string => {
+  const speeds = [isVentTurningLow && 'low', isVentTurningHigh && 'high'].filter(Boolean);
+  const vent = speeds.length === 0 ? 'vent still' : `vent on ${speeds.join(' and ')}`;
+  return `${vent}, cooktop lamp ${isLampLit ? 'on' : 'dark'}`;
+};

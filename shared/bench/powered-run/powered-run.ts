@@ -1,45 +1,41 @@
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
-import type { OvenPart } from '../../oven/oven.ts';
 import { partKinds } from '../../oven/parts/catalogue.ts';
 import type { RunOutcome } from '../record.ts';
 import { chargeLeft } from './charge-left.ts';
 import { fuseTime, fusesOf } from './fuse-time.ts';
+import { hoodOf } from './hood.ts';
+import { magnetronPower } from './magnetron-power.ts';
+import type { Stretch } from './run-course.ts';
+import { runCourse } from './run-course.ts';
 import type { Electrical } from './run-electrically.ts';
-import { isDead, refsOf } from './run-electrically.ts';
-import type { Started } from './start.ts';
-import { healthyRun, inStandby, isBoardAlive, start } from './start.ts';
+import { refsOf } from './run-electrically.ts';
+import { healthyRun, inStandby, isBoardAlive, isTurning, turns } from './start.ts';
 
-/** Share of its healthy power with which a lamp is seen to be lit; of its healthy current with which a motor turns. Judgement. */
+/** Share of its healthy power with which a lamp is seen to be lit. Judgement. */
 const seen = 0.3;
-const turning = 0.5;
-/** J/(kg K); P = 4187 m dT / t into 1 kg, the method of IEC 60705 (from memory, FACTS 9). */
-const water = { heat: 4187, mass: 1 };
-/** of the anode power; 4 kV x 0.3 A in for 800 W out (FACTS 7) */
-const efficiency = 0.7;
 /** Primary current against a healthy run: below is quieter, above is louder. Judgement. */
 const silentBelow = 0.005;
 const quietBelow = 0.5;
 const loudAbove = 1.15;
 
-/** A stretch of a run in which nothing opens. */
-interface Stretch extends Started {
-  state: OvenState;
-  seconds: number;
-  /** what opened at its end */ opened: readonly string[];
-}
-
-/** What a run of up to `ordered` s does to this oven: seen, heard, blown, heated, and left on the capacitors. */
-export function poweredRun(oven: DrawnOven, state: OvenState, ordered: number): RunOutcome {
-  const stretches = stretchesOf(oven, state, ordered);
+/**
+ * What a run of up to `ordered` s does to this oven: seen, heard, blown, heated, and left on the
+ * capacitors. `celsius` is what each magnetron has at its start; room temperature unless told.
+ */
+export function poweredRun(
+  oven: DrawnOven,
+  state: OvenState,
+  ordered: number,
+  celsius: Readonly<Record<string, number>> = {},
+): RunOutcome {
+  const { stretches, waterRise, heat } = runCourse(oven, state, ordered, celsius);
   const first = stretches[0] as Stretch;
   const last = stretches.at(-1) as Stretch;
   const humming = hum(oven, last.ran);
-  const heat = stretches.reduce(
-    (sum, { state: then, ran, seconds }) => sum + microwaves(oven, then, ran) * seconds,
-    0,
-  );
   const timers = refsOf(oven, 'mechanical-timer');
   const before = first === last ? humming : hum(oven, first.ran);
+  const hood = hoodOf(oven, state, first.isDisplayLit ?? true);
+  const isSupplied = first === last || humming !== 'none';
   return {
     ordered,
     seconds: round(
@@ -56,31 +52,30 @@ export function poweredRun(oven: DrawnOven, state: OvenState, ordered: number): 
       ? {}
       : { atFirst: { hum: before, seconds: round(first.seconds, 0.01) } }),
     current: round(last.ran.current('mains:loop'), 0.01),
-    microwavePower: round(microwaves(oven, last.state, last.ran), 1),
-    waterRise: round(heat / (water.heat * water.mass), 0.01),
-    opened: stretches.flatMap(({ opened }) => opened),
-    charge: chargeLeft(oven, last.state, last.ran, first === last ? 0 : last.seconds),
+    microwavePower: round(magnetronPower(oven, last.state, last.ran).microwaves, 1),
+    waterRise: round(waterRise, 0.01),
+    opened: [
+      ...stretches.flatMap(({ blown }) => blown),
+      ...heat.open.filter((ref) => !state.opened.includes(ref)),
+    ],
+    charge: chargeLeft(oven, last.state, last.ran, isSupplied ? 0 : last.seconds),
+    heat,
+    ...(hood ? { hood } : {}),
   };
 }
 
-/** A run goes on after a high-voltage fuse, without what it fed; after the line fuse nothing does. */
-function stretchesOf(oven: DrawnOven, state: OvenState, ordered: number): Stretch[] {
-  const stretches: Stretch[] = [];
-  let left = ordered;
-  let now = state;
-  for (;;) {
-    const started = start(oven, now, stretches.at(-1)?.ran.storage.voltages ?? {});
-    const times = fusesOf(oven)
-      .filter((ref) => !now.opened.includes(ref))
-      .map((ref) => ({ ref, after: fuseTime(oven, now, ref, started.ran) }));
-    const soonest = Math.min(left, ...times.map(({ after }) => after));
-    const opened = times.filter(({ after }) => after <= soonest).map(({ ref }) => ref);
-    stretches.push({ ...started, state: now, seconds: soonest, opened });
-    left -= soonest;
-    now = { ...now, opened: [...now.opened, ...opened] };
-    if (opened.length === 0 || left <= 0 || isDead(oven, now)) return stretches;
-  }
-}
+/** All that is open after a run: fuses blown before and by it, and the cut-outs that are open at its end. */
+export const openAfter = (
+  { definition }: DrawnOven,
+  before: readonly string[],
+  opened: readonly string[],
+  cutOuts: readonly string[],
+): string[] => {
+  const isCutOut = (ref: string): boolean =>
+    definition.parts.some((part) => part.ref === ref && part.kind === 'cut-out');
+  const fuses = [...before, ...opened].filter((ref) => !isCutOut(ref));
+  return [...new Set([...fuses, ...cutOuts])];
+};
 
 export interface Standing {
   /** absent: the oven has no display */ isDisplayLit?: boolean;
@@ -109,30 +104,12 @@ const isPower = (oven: DrawnOven, ran: Electrical, element: string): boolean =>
   ran.power(element) > seen * healthyRun(oven).power(element);
 
 const isLampLit = (oven: DrawnOven, ran: Electrical): boolean =>
-  refsOf(oven, 'lamp').every((ref) => isPower(oven, ran, `${ref}:filament`));
+  oven.definition.parts
+    .filter(({ kind, variant }) => kind === 'lamp' && variant !== 'cooktop')
+    .every(({ ref }) => isPower(oven, ran, `${ref}:filament`));
 
 const isAnyLampLit = (oven: DrawnOven, ran: Electrical): boolean =>
   refsOf(oven, 'lamp').some((ref) => isPower(oven, ran, `${ref}:filament`));
-
-function turns(oven: DrawnOven, part: OvenPart, state: OvenState, ran: Electrical): boolean {
-  const how = partKinds[part.kind].running?.turns;
-  if (!how) return false;
-  const element = `${part.ref}:${how.winding}`;
-  const isStopped = state.faults.some(
-    ({ on, fault }) => on === part.ref && how.stoppedBy.includes(fault),
-  );
-  return !isStopped && ran.current(element) > turning * healthyRun(oven).current(element);
-}
-
-const isTurning = (
-  oven: DrawnOven,
-  { state, ran }: Stretch,
-  kind: OvenPart['kind'],
-  variant?: string,
-): boolean =>
-  oven.definition.parts
-    .filter((part) => part.kind === kind && part.variant === variant)
-    .every((part) => turns(oven, part, state, ran));
 
 function hum(oven: DrawnOven, ran: Electrical): RunOutcome['hum'] {
   const heard = (run: Electrical): number =>
@@ -145,17 +122,5 @@ function hum(oven: DrawnOven, ran: Electrical): RunOutcome['hum'] {
   if (share < quietBelow) return 'quiet';
   return share > loudAbove ? 'loud' : 'normal';
 }
-
-/** W into the food: of what beam and threshold of each sound magnetron take up. */
-const microwaves = (oven: DrawnOven, state: OvenState, ran: Electrical): number =>
-  refsOf(oven, 'magnetron')
-    .filter(
-      (ref) => !state.faults.some(({ on, fault }) => on === ref && fault === 'cracked-magnet'),
-    )
-    .reduce(
-      (sum, ref) =>
-        sum + efficiency * Math.max(0, ran.power(`${ref}:beam`) + ran.power(`${ref}:threshold`)),
-      0,
-    );
 
 const round = (value: number, step: number): number => Math.round(value / step) * step;

@@ -1,8 +1,10 @@
+import { square } from '../../engine/elementary/power.ts';
 import { asFitted } from '../../oven/initial-state.ts';
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
-import type { PartKindName } from '../../oven/oven.ts';
+import type { OvenPart, PartKindName } from '../../oven/oven.ts';
 import { partKinds } from '../../oven/parts/catalogue.ts';
 import type { Running } from '../../oven/part-kind.ts';
+import { relaysFor } from './relays-for.ts';
 import type { Electrical } from './run-electrically.ts';
 import { heaterCurrents, refsOf, runElectrically } from './run-electrically.ts';
 
@@ -12,8 +14,11 @@ const displayWatts = 0.5;
 /** s of mains after which the board's supply, and the high-voltage side, repeat themselves */
 const standbySeconds = 0.15;
 const settledSeconds = 0.3;
-/** Share of its healthy current with which a heater emits. Judgement. */
+/** Of its rail, what the door's switch has to leave on the pull-up for the board to take the door for closed. Judgement. */
+const doorClosedShare = 0.5;
+/** Share of its healthy current with which a heater emits, and with which a motor turns. Judgement. */
 const emitting = 0.6;
+const turning = 0.5;
 
 export interface Started {
   ran: Electrical;
@@ -32,7 +37,8 @@ export function start(
   charged: Readonly<Record<string, number>>,
 ): Started {
   const board = throughBoard(oven, state);
-  if (board && (!board.isDisplayLit || !state.isDoorClosed)) return board;
+  if (board && (!board.isDisplayLit || !state.isDoorClosed || !boardSeesDoor(oven, board.ran)))
+    return board;
   const running = inFullRun(oven, state);
   const heaters = heaterCurrents(oven, running);
   const sound = heaterCurrents(oven, inFullRun(oven, asFitted(oven.definition, [])));
@@ -62,9 +68,12 @@ const having = (oven: DrawnOven, trait: keyof Running): string[] =>
     .filter(({ kind }) => partKinds[kind].running?.[trait])
     .map(({ ref }) => ref);
 
+/** A vent runs on one of its speeds at a time: in a run on the high one. */
+const idle = (oven: DrawnOven): string[] => relaysFor(oven, ['vent-low']);
+
 const inFullRun = (oven: DrawnOven, state: OvenState): OvenState => ({
   ...state,
-  energised: having(oven, 'isSwitchedOn'),
+  energised: having(oven, 'isSwitchedOn').filter((ref) => !idle(oven).includes(ref)),
   hot: having(oven, 'isHot'),
 });
 
@@ -84,6 +93,17 @@ export function isBoardAlive(
   );
 }
 
+/** A board that senses the door: V across its pull-up against V of its rail, from P = V²/R of both. */
+const boardSeesDoor = (oven: DrawnOven, standby: Electrical): boolean =>
+  oven.definition.parts
+    .filter(({ kind, variant }) => kind === 'control-board' && variant === 'door-sensing')
+    .every(({ ref }) => {
+      const { load = 0, pullUp = 0 } = oven.values[ref] ?? {};
+      const rail = standby.power(`${ref}:load`) * load;
+      const line = standby.power(`${ref}:pull-up`) * pullUp;
+      return line > square(doorClosedShare) * rail;
+    });
+
 const healthyRuns = new WeakMap<DrawnOven, Electrical>();
 
 /** The same oven without a fault: what its sounds and lights are compared with. */
@@ -95,3 +115,24 @@ export function healthyRun(oven: DrawnOven): Electrical {
   healthyRuns.set(oven, ran);
   return ran;
 }
+
+/** Whether what this part turns goes round with what flows. */
+export function turns(oven: DrawnOven, part: OvenPart, state: OvenState, ran: Electrical): boolean {
+  const how = partKinds[part.kind].running?.turns;
+  if (!how) return false;
+  const element = `${part.ref}:${how.winding}`;
+  const isStopped = state.faults.some(
+    ({ on, fault }) => on === part.ref && how.stoppedBy.includes(fault),
+  );
+  return !isStopped && ran.current(element) > turning * healthyRun(oven).current(element);
+}
+
+export const isTurning = (
+  oven: DrawnOven,
+  { state, ran }: { state: OvenState; ran: Electrical },
+  kind: OvenPart['kind'],
+  variant?: string,
+): boolean =>
+  oven.definition.parts
+    .filter((part) => part.kind === kind && part.variant === variant)
+    .every((part) => turns(oven, part, state, ran));

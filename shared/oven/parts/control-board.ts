@@ -1,6 +1,8 @@
 /**
  * Control board as its two transformer windings see it: 1-2 a bridge, a reservoir capacitor and the
  * board's load; 3-4 the display filament.
+ * One that senses the door has a line of its own, 5-6: its rail through `pullUp` to 5, its return at 6;
+ * the closed switch across them draws V(rail) / pullUp.
  *   bridge: I = IS (exp(v / (N Vt)) - 1) in each of four diodes, current from 1 or 2 into the rail.
  * Source: ENGINE section 3; diode values: judgement for a 1 A silicon rectifier.
  */
@@ -41,19 +43,37 @@ const faults: FaultKind[] = [
     weight: 4,
     source: judgement,
   },
+  {
+    id: 'door-line-open',
+    name: 'door line open',
+    description: 'The pull-up of the door line is broken: the board takes the door for open.',
+    weight: 1,
+    source: judgement,
+    variants: ['door-sensing'],
+  },
 ];
 
 const source = 'judgement';
+/** Ohm: copper of the board. Judgement. */
+const TRACK = 0.02;
 const DIODE = { saturationCurrent: 5e-9, emission: 1.8, seriesResistance: 0.05 };
 
 export const controlBoard: PartKind = {
   kind: 'control-board',
   name: 'control board',
-  terminals: () => [
+  variants: ['plain', 'door-sensing'],
+  usual: 'plain',
+  terminals: (variant) => [
     { id: '1', name: '11 V input' },
     { id: '2', name: '11 V input, other end' },
     { id: '3', name: '5.5 V input' },
     { id: '4', name: '5.5 V input, other end' },
+    ...(variant === 'door-sensing'
+      ? [
+          { id: '5', name: 'door line' },
+          { id: '6', name: 'door line, return' },
+        ]
+      : []),
   ],
   values: {
     reservoir: { name: 'reservoir', unit: 'F', nominal: 470e-6, tolerance: 0.2, source },
@@ -65,10 +85,11 @@ export const controlBoard: PartKind = {
       tolerance: 0.1,
       source: 'common practice, no source',
     },
+    pullUp: { name: 'pull-up of the door line', unit: 'Ω', nominal: 4700, tolerance: 0.05, source },
   },
   faults,
-  running: { powers: ['load', 'filament'] },
-  circuit: ({ node, inner, value, faults: applied }) => {
+  running: { powers: ['load', 'filament', 'pull-up'] },
+  circuit: ({ node, inner, value, variant, faults: applied }) => {
     const fault = readFaults(faults, applied);
     const plus = inner('rail');
     const minus = inner('return');
@@ -93,6 +114,13 @@ export const controlBoard: PartKind = {
       resistance(inner('load'), plus, minus, value('load')),
       resistance(inner('filament'), node('3'), node('4'), filament),
     ];
+    if (variant === 'door-sensing') {
+      const pullUp = fault.has('door-line-open') ? BROKEN : value('pullUp');
+      elements.push(
+        resistance(inner('pull-up'), plus, node('5'), pullUp),
+        resistance(inner('door-return'), node('6'), minus, TRACK),
+      );
+    }
     if (fault.has('bridge-shorted'))
       elements.push(resistance(inner('bridge-short'), node('1'), plus, FUSED));
     if (fault.has('rail-shorted'))

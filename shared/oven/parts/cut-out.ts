@@ -1,6 +1,7 @@
 /**
  * Thermal cut-out: a contact that opens at `opensAt` and closes again at `closesAt`
- * (a one-shot closes at absolute zero, that is: never).
+ * (a one-shot closes at absolute zero, that is: never). Its variant says what it lies on: the
+ * magnetron, the cavity, or the hood over a cooktop.
  *   R(closed) = 20 mOhm, R(open) = 1e9 Ohm.
  * Source: temperatures from service sheets SM-5, SM-4 in FACTS section 8; contact: common practice.
  */
@@ -50,6 +51,8 @@ const seen = 'SM-5 and SM-4, FACTS 8';
 export const cutOut: PartKind = {
   kind: 'cut-out',
   name: 'thermal cut-out',
+  variants: ['magnetron', 'cavity', 'hood'],
+  usual: 'magnetron',
   terminals: () => [
     { id: '1', name: 'supply side' },
     { id: '2', name: 'load side' },

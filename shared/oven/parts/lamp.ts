@@ -1,5 +1,5 @@
 /**
- * Cavity lamp: a tungsten filament. R(cold) = 48 Ohm; alight about ten times that.
+ * Cavity lamp, or the lamp over a cooktop: a tungsten filament. R(cold) = 48 Ohm; alight about ten times that.
  * Source: ENGINE section 3; ratio x10 from textbook problems in FACTS section 7.
  */
 import type { FaultKind } from '../fault.ts';
@@ -30,6 +30,8 @@ const faults: FaultKind[] = [
 export const lamp: PartKind = {
   kind: 'lamp',
   name: 'lamp',
+  variants: ['cavity', 'cooktop'],
+  usual: 'cavity',
   terminals: () => [
     { id: '1', name: 'supply side' },
     { id: '2', name: 'neutral side' },

@@ -119,7 +119,7 @@ export const magnetron: PartKind = {
     dynamic: { name: 'dynamic', unit: 'Ω', nominal: 350, tolerance: 0.05, source },
   },
   faults,
-  running: { isHot: true, powers: ['beam', 'threshold'] },
+  running: { isHot: true, powers: ['beam', 'threshold', 'heater'] },
   circuit: (part) => {
     const { node, inner, value } = part;
     const fault = readFaults(faults, part.faults);

@@ -1,5 +1,5 @@
 /**
- * Relay on the control board: contact 1-2, coil A1-A2. The board's driver leaves the far end of the
+ * Relay on the control board, by what the board pulls it in for: contact 1-2, coil A1-A2. The board's driver leaves the far end of the
  * coil open while idle, so on a cold bench the coil is a winding alone.
  *   R(closed) = 30 mOhm, R(open) = 1e9 Ohm, coil 160 Ohm, 0.6 H.
  * Source: contact at most 100 mOhm new, data sheet DS-R in FACTS section 8; coil: ENGINE section 3,
@@ -47,6 +47,8 @@ const faults: FaultKind[] = [
 export const relay: PartKind = {
   kind: 'relay',
   name: 'relay',
+  variants: ['cook', 'vent-high', 'vent-low', 'cooktop-lamp'],
+  usual: 'cook',
   terminals: () => [
     { id: '1', name: 'contact, supply side' },
     { id: '2', name: 'contact, load side' },

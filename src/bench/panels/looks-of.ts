@@ -11,7 +11,7 @@ const looks: Readonly<Partial<Record<PartKindName, Readonly<Record<string, strin
     'burnt-track': 'burnt',
   },
   'cut-out': { 'high-resistance': 'burnt' },
-  'door-switch': { 'high-resistance': 'burnt' },
+  'door-switch': { 'high-resistance': 'burnt', 'lever-bent': 'bent' },
   'board-transformer': { 'shorted-turns': 'burnt' },
   'control-board': { 'bridge-shorted': 'cracked' },
   'mechanical-timer': {
@@ -23,7 +23,7 @@ const looks: Readonly<Partial<Record<PartKindName, Readonly<Record<string, strin
   resistor: { drifted: 'burnt' },
   'hv-fuse': { bridged: 'bridged', 'burnt-holder': 'burnt' },
   lamp: { open: 'blown', shorted: 'burnt' },
-  motor: { 'shorted-turns': 'burnt' },
+  motor: { 'shorted-turns': 'burnt', greasy: 'greasy' },
   'hv-transformer': { 'hv-shorted-to-core': 'burnt', 'heater-winding-shorted-to-core': 'burnt' },
   'hv-capacitor': { shorted: 'swollen', 'leaky-to-can': 'oil', 'shorted-to-can': 'burnt' },
   'hv-diode': { shorted: 'cracked' },

@@ -22,7 +22,7 @@ export function runWords(run: RunOutcome): { label: string; value: string }[] {
     { label: 'Ran for', value: `${Number(run.seconds.toFixed(1))} s, 1000 g of water inside` },
     ...(run.isDisplayLit === undefined
       ? []
-      : [{ label: 'Display', value: run.isDisplayLit ? 'lit' : 'dark' }]),
+      : [{ label: 'Display', value: displayWords(run.isDisplayLit, run) }]),
     ...(run.isTimerRunning === undefined
       ? []
       : [{ label: 'Timer', value: timer(run.isTimerRunning) }]),
@@ -34,6 +34,36 @@ export function runWords(run: RunOutcome): { label: string; value: string }[] {
       label: 'Water',
       value: run.waterRise < 0.1 ? 'stayed cold' : `${run.waterRise.toFixed(1)} K warmer`,
     },
+    ...comingAndGoing(run),
+    ...hoodWords(run),
+  ];
+}
+
+/** An oven that stopped before its time with the display lit has lost its supply. */
+const displayWords = (isLit: boolean, { seconds, ordered }: RunOutcome): string => {
+  if (!isLit) return 'dark';
+  return seconds < ordered ? 'lit, then dark' : 'lit';
+};
+
+/** When the hum stopped and came back, as it is heard: which cut-out did it is for the trainee to find. */
+function comingAndGoing({ heat, seconds }: RunOutcome): { label: string; value: string }[] {
+  const heard = (heat?.moves ?? []).filter(({ after }) => after < seconds);
+  const words = heard.map(
+    ({ after, isOpen }) => `${isOpen ? 'stopped' : 'back'} after ${Math.round(after)} s`,
+  );
+  return words.length === 0 ? [] : [{ label: 'Heating', value: words.join(', ') }];
+}
+
+function hoodWords({ hood }: RunOutcome): { label: string; value: string }[] {
+  if (!hood) return [];
+  const speed = (isTurning: boolean): string => (isTurning ? 'turning' : 'still');
+  const { isVentTurningLow, isVentTurningHigh, isLampLit } = hood;
+  return [
+    {
+      label: 'Vent',
+      value: `${speed(isVentTurningLow)} on low, ${speed(isVentTurningHigh)} on high`,
+    },
+    { label: 'Cooktop lamp', value: isLampLit ? 'lit' : 'dark' },
   ];
 }
 
@@ -45,4 +75,7 @@ export const runLine = (run: RunOutcome): string =>
     run.isLampLit ? 'lamp lit' : 'lamp dark',
     sound(run),
     run.waterRise < 0.1 ? 'water cold' : `water up ${run.waterRise.toFixed(1)} K`,
+    ...[...comingAndGoing(run), ...hoodWords(run)].map(
+      ({ label, value }) => `${label.toLowerCase()} ${value}`,
+    ),
   ].join(', ')}`;

@@ -32,12 +32,16 @@ export function sceneHand(
   watching: Watching = idle,
 ): BenchHand {
   const { run } = watching;
-  const ofKind = (kind: string, isOn: boolean, variant?: string): string[] =>
+  const ofKind = (
+    kind: string,
+    isOn: boolean,
+    isOf: (variant?: string) => boolean = () => true,
+  ): string[] =>
     definition.parts
-      .filter(
-        (part) => isOn && part.kind === kind && (variant === undefined || part.variant === variant),
-      )
+      .filter((part) => isOn && part.kind === kind && isOf(part.variant))
       .map(({ ref }) => ref);
+  const only = (wanted: string) => (variant?: string) => variant === wanted;
+  const allBut = (unwanted: string) => (variant?: string) => variant !== unwanted;
   return {
     isCoverOn: state.isCoverOn,
     isCordIn: state.isCordIn,
@@ -52,13 +56,15 @@ export function sceneHand(
     looks: Object.fromEntries(state.inspected.map((ref) => [ref, looksOf(definition, state, ref)])),
     stamps: Object.fromEntries(definition.parts.map((part) => [part.ref, stampOf(part)])),
     lit: [
-      ...ofKind('lamp', run?.isLampLit ?? false),
+      ...ofKind('lamp', run?.isLampLit ?? false, allBut('cooktop')),
+      ...ofKind('lamp', run?.hood?.isLampLit ?? false, only('cooktop')),
       ...ofKind('control-board', run?.isDisplayLit ?? state.isDisplayLit ?? false),
     ],
     turning: [
       ...ofKind('mechanical-timer', run?.isTimerRunning ?? false),
-      ...ofKind('motor', run?.isFanTurning ?? false, 'fan'),
-      ...ofKind('motor', run?.isTurntableTurning ?? false, 'turntable'),
+      ...ofKind('motor', run?.isFanTurning ?? false, only('fan')),
+      ...ofKind('motor', run?.isTurntableTurning ?? false, only('turntable')),
+      ...ofKind('motor', run?.hood?.isVentTurningHigh ?? false, only('vent-fan')),
     ],
     replaced: state.replaced,
     hazardFlash: watching.hazardFlash,

@@ -22,7 +22,8 @@ describe('a powered run gives the symptom of its fault', () => {
     });
     expect(healthy.microwavePower).toBeGreaterThan(600);
     expect(healthy.microwavePower).toBeLessThan(950);
-    expect(healthy.waterRise).toBeCloseTo((healthy.microwavePower * 30) / 4187, 1);
+    // The heater takes 2 s before anything comes out (SM-9, FACTS 7).
+    expect(healthy.waterRise).toBeCloseTo((healthy.microwavePower * 28) / 4187, 1);
   });
 
   it('hums loudly and holds the fuse with a shorted diode or magnetron', () => {
