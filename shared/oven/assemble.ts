@@ -32,7 +32,8 @@ function metalNode(part: OvenPart, terminal: TerminalKind): NodeName {
   return terminal.isVarnished ? `${ref}:metal` : ref;
 }
 
-function partElements(part: OvenPart, oven: DrawnOven, state: OvenState): Element[] {
+/** A part by itself, in this state: its elements without varnish and bolts. */
+export function partElements(part: OvenPart, oven: DrawnOven, state: OvenState): Element[] {
   const kind = partKinds[part.kind];
   const terminals = kind.terminals(part.variant);
   const values = oven.values[part.ref] ?? {};
@@ -61,7 +62,7 @@ function partElements(part: OvenPart, oven: DrawnOven, state: OvenState): Elemen
 }
 
 /** Varnish between a spot and its metal, and the bolts of a body. */
-function mounting(part: OvenPart, state: OvenState): Element[] {
+export function mounting(part: OvenPart, state: OvenState): Element[] {
   return partKinds[part.kind].terminals(part.variant).flatMap((terminal) => {
     const ref = `${part.ref}.${terminal.id}`;
     const metal = metalNode(part, terminal);
@@ -73,7 +74,8 @@ function mounting(part: OvenPart, state: OvenState): Element[] {
   });
 }
 
-function leadElements(lead: OvenLead, state: OvenState): Element[] {
+/** A lead by itself, in this state. */
+export function leadElements(lead: OvenLead, state: OvenState): Element[] {
   const fault = readFaults(
     leadFaults,
     state.faults.filter(({ on }) => on === lead.ref),

@@ -7,6 +7,7 @@ import type { Result } from '../../shared/engine/circuit/circuit.ts';
 import { drainingCapacitor, highVoltageSide, ovenOnBench } from './performance/circuits.ts';
 import { medianTime } from './performance/median-time.ts';
 import { ngspiceTime, type NgspiceTime } from './performance/ngspice-time.ts';
+import { wholeFaultTable } from './performance/whole-fault-table.ts';
 
 /** V; what the doubler leaves on the capacitor at worst. */
 const LEFT = 2969.85;
@@ -61,6 +62,13 @@ rows.push({
   }),
   theirs: theirPoint,
   target: 0.02,
+});
+
+const cells = wholeFaultTable().counts.length;
+rows.push({
+  what: `fault table, ${cells} readings on one thread`,
+  ours: medianTime(5, wholeFaultTable),
+  target: 2000,
 });
 
 const powered = highVoltageSide();
