@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { handsOn, lc28 } from '../support/bench.ts';
-import { makeSetup } from '../../shared/bench/setup.ts';
-import { meterAt } from '../../shared/bench/reading.ts';
+import { lc28, setupWith } from '../support/bench.ts';
+import { untouched } from '../../shared/bench/fold.ts';
+import { meterAt, readingPeriod } from '../../shared/bench/reading.ts';
 import { seededUniform } from '../../shared/engine/quantities/seeded-uniform.ts';
 import { drawMeter } from '../../shared/instruments/draw-meter.ts';
 import { manual2000 } from '../../shared/instruments/manual-2000.ts';
@@ -29,33 +29,23 @@ const row = (on: string, fault: string): number =>
 const column = (id: string): number => lines.findIndex((line) => line.id === id);
 
 /** ms; stray capacitance behind 1e9 Ohm of an open contact creeps by some counts for minutes. */
-const hour = 3_600_000;
+const tenMinutes = 600_000;
 
-/** Does by hand what the service data asks for, and waits until nothing moves. */
+/** The bench itself in the line's position, left alone until nothing moves: its circuit is integrated. */
 function onTheBench(fault: AppliedFault, line: ServiceMeasurement, seed: number) {
-  const setup = makeSetup({
-    definition: lc28,
-    faults: [fault],
-    meter: 'manual-2000',
-    seed,
-    lastRunSecondsAgo: null,
-  });
-  const hands = handsOn(setup);
-  hands.does('PullCord', {});
-  hands.does('RemoveCover', {});
-  hands.does('OpenDoor', {});
-  for (const end of line.lift)
-    if (hands.state().oven.leadEnds[end] !== null) hands.does('LiftLead', { end });
-  for (const target of line.clean ?? []) hands.does('CleanSpot', { terminal: target });
-  for (const part of line.press ?? []) hands.does('PressSwitch', { part });
-  hands.does('SetMeter', { setting: line.setting });
-  hands.does('PlaceProbe', { probe: 'red', target: line.between[0] });
-  hands.does('PlaceProbe', { probe: 'black', target: line.between[1] });
-  const atMs = hands.state().benchMs + hour;
-  return {
-    view: meterAt(setup, hands.state(), atMs)!,
-    readingNumber: Math.floor((atMs * 3) / 1000),
+  const setup = setupWith([fault], { seed });
+  const begun = untouched(setup);
+  const [red, black] = line.between;
+  const state = {
+    ...begun,
+    isCordIn: false,
+    isCoverOn: false,
+    oven: inPosition({ ...begun.oven, isDoorClosed: false }, positionOf(line)),
+    meter: { ...begun.meter, setting: line.setting },
+    probes: { red, black },
   };
+  const view = meterAt(setup, state, tenMinutes)!;
+  return { view, readingNumber: Math.floor(tenMinutes / readingPeriod) };
 }
 
 function predicted(
