@@ -66,6 +66,7 @@ export const ovenLead = z.strictObject({
     'brown',
     'red',
     'green',
+    'green-yellow',
     'yellow',
     'grey',
     'orange',

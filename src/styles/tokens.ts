@@ -114,6 +114,7 @@ export const insulation = {
   brown: ['#e0bd9d', '#7a4c2a', '#3b210f'],
   red: ['#ffa59a', '#c0281e', '#66100a'],
   green: ['#93d3a5', '#2f8049', '#0d3319'],
+  'green-yellow': ['#ffe35a', '#2f8049', '#0d3319'],
   yellow: ['#fff0a6', '#e0b62a', '#7b5e07'],
   grey: ['#d3dadb', '#8a9598', '#343c42'],
   orange: ['#ffc48c', '#dd7a28', '#5a2605'],

@@ -1,25 +1,4 @@
-import { readFileSync } from 'node:fs';
-import { asFitted } from '../../shared/oven/initial-state.ts';
-import { ovenLayout } from '../../shared/oven/layout.ts';
-import { ovenDefinition } from '../../shared/oven/oven.ts';
-import type { OvenState } from '../../shared/oven/oven-state.ts';
-import { emptyHand, type BenchHand } from '../../src/bench/geometry/bench-hand.ts';
-import type { BenchScene } from '../../src/bench/geometry/bench-scene.ts';
-import { buildScene } from '../../src/bench/geometry/build-scene.ts';
-import { drawBench } from '../../src/bench/geometry/draw-bench.ts';
+import { ovenDrawing } from './oven-drawing.ts';
 
-const read = (name: string): unknown => JSON.parse(readFileSync(`scenarios/ovens/${name}`, 'utf8'));
-
-export const definition = ovenDefinition.parse(read('larkfield-lc-28.json'));
-export const layout = ovenLayout.parse(read('larkfield-lc-28.layout.json'));
-export const drawing = drawBench(definition, layout);
-export const fitted = asFitted(definition, []);
-
-/** The oven with some lead ends moved: null lifted, or fitted to a terminal. */
-export const withLeads = (moved: Record<string, string | null>): OvenState => ({
-  ...fitted,
-  leadEnds: { ...fitted.leadEnds, ...moved },
-});
-
-export const sceneOf = (oven: OvenState = fitted, hand: Partial<BenchHand> = {}): BenchScene =>
-  buildScene(drawing, oven, { ...emptyHand, ...hand });
+export const { definition, layout, drawing, fitted, withLeads, sceneOf } =
+  ovenDrawing('larkfield-lc-28');

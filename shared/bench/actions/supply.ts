@@ -77,7 +77,7 @@ export const plugCord = action({
       'cord in',
       ...(isDisplayLit === undefined ? [] : [`display ${isDisplayLit ? 'lit' : 'dark'}`]),
       ...(runsByItself ? ['runs by itself'] : []),
-      ...(opened ?? []).map((ref) => `${ref} blew`),
+      ...(opened ? ['a bang inside'] : []),
     ].join(', '),
 });
 
@@ -153,7 +153,7 @@ const setDoor = (isDoorClosed: boolean) =>
       [
         `door ${isDoorClosed ? 'closed' : 'open'}`,
         ...(runsByItself ? ['runs by itself'] : []),
-        ...(opened ?? []).map((ref) => `${ref} blew`),
+        ...(opened ? ['a bang inside'] : []),
       ].join(', '),
   }) as const;
 

@@ -1,11 +1,17 @@
 import { memo, useCallback } from 'react';
 import type { Camera } from '../camera/camera.ts';
-import type { BenchScene } from '../geometry/bench-scene.ts';
+import type { BenchScene, ScenePart } from '../geometry/bench-scene.ts';
 import { paintClosedOven } from '../glyphs/closed-oven/paint-closed-oven.ts';
 import { Painted } from '../glyphs/paint/painted.tsx';
 import type { Pen } from '../glyphs/paint/pen.ts';
 import { BenchLayer } from './bench-layer.tsx';
 import { useSameValue } from './use-same-value.ts';
+
+/** Where a timer's knob stands: turned up while its run is watched, else at zero. */
+const minuteOf = (timer: ScenePart | undefined): number | null => {
+  if (timer === undefined) return null;
+  return timer.isTurning ? 8 : 0;
+};
 
 /** The oven as the customer knows it: cover on, seen from the front, its door closed or open. */
 export const ClosedOvenLayer = memo(function ClosedOvenLayer({
@@ -23,6 +29,7 @@ export const ClosedOvenLayer = memo(function ClosedOvenLayer({
     isTurning: scene.parts.some(({ variant, isTurning }) => variant === 'turntable' && isTurning),
     display:
       scene.parts.find(({ kind, isLit }) => kind === 'control-board' && isLit)?.stamp[0] ?? null,
+    atMinute: minuteOf(scene.parts.find(({ kind }) => kind === 'mechanical-timer')),
     isDisplayLit: scene.parts.some(({ kind, isLit }) => kind === 'control-board' && isLit),
   });
   const paint = useCallback((pen: Pen) => paintClosedOven(pen, oven), [oven]);

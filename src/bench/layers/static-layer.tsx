@@ -3,6 +3,7 @@ import type { Camera } from '../camera/camera.ts';
 import type { BenchScene } from '../geometry/bench-scene.ts';
 import { paintBattery } from '../glyphs/battery/paint-battery.ts';
 import { paintMat } from '../glyphs/mat/paint-mat.ts';
+import { isRoundPinned } from '../glyphs/plug/plug-glyph.ts';
 import { paintOutlet } from '../glyphs/outlet/paint-outlet.ts';
 import { Painted } from '../glyphs/paint/painted.tsx';
 import type { Pen } from '../glyphs/paint/pen.ts';
@@ -22,11 +23,15 @@ export const StaticLayer = memo(function StaticLayer({
   const parts = useSameValue(scene.parts);
   const chassis = useSameValue(scene.chassis);
   const { isCoverOn, isDoorOpen } = scene;
-  const paintGround = useCallback((pen: Pen) => {
-    paintMat(pen);
-    paintOutlet(pen);
-    paintBattery(pen);
-  }, []);
+  const isRound = parts.some(({ kind, stamp }) => kind === 'plug' && isRoundPinned(stamp));
+  const paintGround = useCallback(
+    (pen: Pen) => {
+      paintMat(pen);
+      paintOutlet(pen, isRound);
+      paintBattery(pen);
+    },
+    [isRound],
+  );
   const paintOpenOven = useCallback(
     (pen: Pen) => paintChassis(pen, chassis, isDoorOpen),
     [chassis, isDoorOpen],

@@ -11,11 +11,12 @@ const orders = [
   [120, '2 min'],
 ] as const;
 
-/** The control panel's keys, and what the last run looked, sounded and felt like. */
+/** The control panel's keys or its knob, and what the last run looked, sounded and felt like. */
 export const RunPanel = ({ onClose }: { onClose: () => void }) => {
   const operate = useBench((store) => store.operate);
   const running = useBench((store) => store.running);
   const last = useBench(({ state }) => state.runs.at(-1));
+  const isTimed = useBench(({ setup }) => setup.oven.definition.control === 'mechanical timer');
   const panel = useRef<HTMLElement>(null);
   useEffect(() => panel.current?.focus(), []);
   return (
@@ -27,7 +28,8 @@ export const RunPanel = ({ onClose }: { onClose: () => void }) => {
     >
       <div className="flex items-start justify-between gap-2">
         <p className="text-sm">
-          A jug of 1000 g of water stands inside. Set a time and press start.
+          A jug of 1000 g of water stands inside.{' '}
+          {isTimed ? 'Turn the timer to a time.' : 'Set a time and press start.'}
         </p>
         <IconX name="Close" onPress={onClose} />
       </div>

@@ -54,7 +54,9 @@ export function sceneHand(
     hovered: watching.hovered,
     focused: watching.focused,
     looks: Object.fromEntries(state.inspected.map((ref) => [ref, looksOf(definition, state, ref)])),
-    stamps: Object.fromEntries(definition.parts.map((part) => [part.ref, stampOf(part)])),
+    stamps: Object.fromEntries(
+      definition.parts.map((part) => [part.ref, stampOf(part, definition)]),
+    ),
     lit: [
       ...ofKind('lamp', run?.isLampLit ?? false, allBut('cooktop')),
       ...ofKind('lamp', run?.hood?.isLampLit ?? false, only('cooktop')),

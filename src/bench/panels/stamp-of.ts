@@ -1,8 +1,8 @@
-import type { OvenPart } from '../../../shared/oven/oven.ts';
+import type { OvenDefinition, OvenPart } from '../../../shared/oven/oven.ts';
 import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 
 /** What is printed on a part: its rating, never its drawn value. */
-export function stampOf(part: OvenPart): string[] {
+export function stampOf(part: OvenPart, { supply }: OvenDefinition): string[] {
   const rating = (name: string): number =>
     part.values?.[name] ?? partKinds[part.kind].values[name]?.nominal ?? NaN;
   switch (part.kind) {
@@ -18,11 +18,12 @@ export function stampOf(part: OvenPart): string[] {
       const celsius = rating('opensAt');
       return Number.isNaN(celsius) ? [] : [`${celsius} °C`];
     }
+    case 'plug':
+      return [`${supply.amps} A ${supply.volts > 150 ? 250 : 125} V~`];
     case 'hv-fuse':
       return [`${rating('rating')} A`, '5 kV'];
     case 'resistor':
       return [`${rating('resistance')} Ω`];
-    case 'plug':
     case 'chassis':
     case 'filter-board':
     case 'door-switch':

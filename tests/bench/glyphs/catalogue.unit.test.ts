@@ -5,6 +5,7 @@ import type { ScenePart } from '../../../src/bench/geometry/bench-scene.ts';
 import { glyphs } from '../../../src/bench/glyphs/catalogue.ts';
 import type { Pen } from '../../../src/bench/glyphs/paint/pen.ts';
 import { sceneOf } from '../../support/larkfield.ts';
+import { ovenDrawing } from '../../support/oven-drawing.ts';
 
 const margin = 60;
 
@@ -32,7 +33,7 @@ const changed = (a: Uint8ClampedArray, b: Uint8ClampedArray): number => {
   return count;
 };
 
-const { parts } = sceneOf();
+const parts = [...sceneOf().parts, ...ovenDrawing('tarnwick-tk-23').sceneOf().parts];
 const partOf = (kind: PartKindName, variant?: string): ScenePart =>
   parts.find((part) => part.kind === kind && (variant === undefined || part.variant === variant))!;
 
@@ -45,6 +46,13 @@ const looks: readonly [PartKindName, string][] = [
   ['relay', 'burnt'],
   ['board-transformer', 'burnt'],
   ['control-board', 'cracked'],
+  ['mechanical-timer', 'burnt-2'],
+  ['mechanical-timer', 'burnt-3'],
+  ['mechanical-timer', 'bell'],
+  ['mechanical-timer', 'greasy'],
+  ['resistor', 'burnt'],
+  ['hv-fuse', 'bridged'],
+  ['hv-fuse', 'burnt'],
   ['lamp', 'blown'],
   ['lamp', 'burnt'],
   ['motor', 'burnt'],
@@ -75,6 +83,8 @@ describe('what parts show', () => {
     ['control-board', 'isLit', undefined],
     ['motor', 'isTurning', 'fan'],
     ['motor', 'isTurning', 'turntable'],
+    ['mechanical-timer', 'isTurning', undefined],
+    ['mechanical-timer', 'isPressed', undefined],
     ['door-switch', 'isActuated', 'primary'],
     ['door-switch', 'isActuated', 'monitor'],
     ['door-switch', 'isPressed', 'primary'],
@@ -89,6 +99,12 @@ describe('what parts show', () => {
     const part = partOf('hv-capacitor');
     const printed = pixelsOf({ ...part, stamp: ['0.95 µF 2100 V~'] });
     expect(changed(pixelsOf(part), printed)).toBeGreaterThan(50);
+  });
+
+  it('gives a plug for 250 V round pins', () => {
+    const part = partOf('plug');
+    const round = pixelsOf({ ...part, stamp: ['16 A 250 V~'] });
+    expect(changed(pixelsOf({ ...part, stamp: ['15 A 125 V~'] }), round)).toBeGreaterThan(200);
   });
 
   it('hides a burnt-out wire in ceramic: nothing but a violent end shows on a fuse', () => {

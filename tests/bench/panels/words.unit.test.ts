@@ -107,6 +107,44 @@ describe('a run', () => {
   });
 });
 
+describe('a run of an oven with a timer', () => {
+  const { isDisplayLit: _, ...others } = run;
+  const timed: RunOutcome = {
+    ...others,
+    seconds: 60,
+    isTimerRunning: true,
+    hum: 'quiet',
+    atFirst: { hum: 'loud', seconds: 1.33 },
+  };
+
+  it('tells of the knob and not of a display, and what it sounded like before', () => {
+    const words = runWords(timed).map(({ label, value }) => `${label}: ${value}`);
+    expect(words).toContain('Timer: ticking, knob coming down');
+    expect(words).toContain('Sound: a loud hum for 1.3 s, then a quiet hum');
+    expect(words.join(' ')).not.toContain('Display');
+  });
+
+  it('says in the log that the knob stays when the gear does not turn it', () => {
+    const event = {
+      type: 'OvenRun',
+      version: 1 as const,
+      benchMs: 0,
+      data: { ...timed, isTimerRunning: false },
+    };
+    expect(logLine(manual2000, event)).toContain('timer knob stays where it is');
+  });
+
+  it('tells of a bang when a door opens on a welded switch, never of the fuse', () => {
+    const event = {
+      type: 'DoorOpened',
+      version: 1 as const,
+      benchMs: 0,
+      data: { opened: ['F1'] },
+    };
+    expect(logLine(manual2000, event)).toBe('door open, a bang inside');
+  });
+});
+
 describe('the log', () => {
   it('calls a setting by its name', () => {
     const event = {

@@ -5,6 +5,7 @@ import { brushed, louvres, screw } from '../paint/hardware.ts';
 import { box, chain, fill, rule, stroke, type Rect } from '../paint/outline.ts';
 import { linear, raised, type Pen } from '../paint/pen.ts';
 import { paintDoor, paintInside, paintOpenDoor } from './paint-door.ts';
+import { paintKnobPanel } from './paint-knob-panel.ts';
 import { paintPanel } from './paint-panel.ts';
 
 export interface ClosedOven extends BenchBox {
@@ -13,6 +14,8 @@ export interface ClosedOven extends BenchBox {
   isTurning: boolean;
   isDisplayLit: boolean;
   /** what the display shows; null: its own */ display: string | null;
+  /** where the timer's knob stands, minutes; null: the oven has keys and a display */
+  atMinute: number | null;
 }
 
 const rectOf = ({ at, size }: BenchBox): Rect => [at[0], at[1], size[0], size[1]];
@@ -37,7 +40,8 @@ export const paintClosedOven = (pen: Pen, oven: ClosedOven): void => {
     paintInside(pen, shape, oven.isLampLit, oven.isTurning);
     paintOpenDoor(pen, shape);
   } else paintDoor(pen, shape, oven.isLampLit, oven.isTurning);
-  paintPanel(pen, shape, oven.isDisplayLit, oven.display);
+  if (oven.atMinute === null) paintPanel(pen, shape, oven.isDisplayLit, oven.display);
+  else paintKnobPanel(pen, shape, oven.atMinute);
 };
 
 const paintTop = (pen: Pen, { front, rise }: ClosedOvenShape): void => {

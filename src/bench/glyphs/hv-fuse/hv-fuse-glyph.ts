@@ -38,8 +38,8 @@ export const hvFuseGlyph: Glyph = (pen, { size: [width, height], terminals, stam
     rule(pen, [width * 0.5 + dx, y - 13, width * 0.5 + dx, y + 13], material.nylon[3], 0.9);
   rule(pen, [32, y - 7, width - 32, y - 7], shade.gleam, 1.8);
   stamp.slice(0, 2).forEach((line, i) =>
-    write(pen, line, i === 0 ? width * 0.3 : width * 0.7, y + 1, {
-      size: 8.5,
+    write(pen, line, i === 0 ? width * 0.385 : width * 0.625, y + 1, {
+      size: 7.4,
       ink: material.plastic[1],
     }),
   );

@@ -1,8 +1,9 @@
 import type { SceneLead, ScenePart } from '../../geometry/bench-scene.ts';
-import { insulation, palette, shade } from '../../../styles/tokens.ts';
+import { palette, shade } from '../../../styles/tokens.ts';
 import { roundRect, stroke } from '../paint/outline.ts';
 import { apart, type Pen } from '../paint/pen.ts';
-import { paintWire, traceCurve } from './paint-curve.ts';
+import { traceCurve } from './paint-curve.ts';
+import { paintInsulated } from './paint-insulated.ts';
 import { leadWidth } from './paint-lead.ts';
 
 /** Marks the lead or part under the hand or with the keyboard's focus: blue on white. */
@@ -20,7 +21,7 @@ export const paintHover = (
     stroke(pen, palette.sheet, width + 7 + more);
     traceCurve(pen, lead.path);
     stroke(pen, palette.act, width + 4 + more);
-    paintWire(pen, lead.path, width, insulation[lead.insulation], shade.clear);
+    paintInsulated(pen, lead, width, shade.clear);
   }
   if (part !== null)
     apart(pen, () => {

@@ -1,10 +1,10 @@
 import { distance, type BenchPoint } from '../../geometry/bench-point.ts';
 import type { SceneLead } from '../../geometry/bench-scene.ts';
 import { flatten, smoothPath } from '../../geometry/smooth-path.ts';
-import { insulation, shade } from '../../../styles/tokens.ts';
+import { shade } from '../../../styles/tokens.ts';
 import type { Pen } from '../paint/pen.ts';
 import { paintConnector } from './paint-connector.ts';
-import { paintWire } from './paint-curve.ts';
+import { paintInsulated } from './paint-insulated.ts';
 
 /** Lead width, units: LOOK's 4 px, the high-voltage ones thicker by their insulation. */
 export const leadWidth = (lead: Pick<SceneLead, 'isHighVoltage'>): number =>
@@ -12,7 +12,7 @@ export const leadWidth = (lead: Pick<SceneLead, 'isHighVoltage'>): number =>
 
 /** One lead with its two connectors. `swing`: radians that a just lifted end is away from where it comes to lie. */
 export const paintLead = (pen: Pen, lead: SceneLead): void => {
-  paintWire(pen, lead.path, leadWidth(lead), insulation[lead.insulation], shade.soft);
+  paintInsulated(pen, lead, leadWidth(lead), shade.soft);
   const chain = flatten(smoothPath(lead.path));
   const { isHighVoltage } = lead;
   lead.ends.forEach((end, i) =>

@@ -12,7 +12,7 @@ export const mechanicalTimerGlyph: Glyph = (pen, part) => {
   const { size, looks, isTurning, isPressed } = part;
   const [width, height] = size;
   const plate = [6, 34, width - 12, height - 52] as const;
-  paintShaft(pen, width, height, isPressed);
+  paintShaft(pen, width, height, isPressed || isTurning);
   raised(pen, 7, shade.drop, () => box(pen, plate, 5, material.zinc[2]));
   box(
     pen,
@@ -35,24 +35,40 @@ export const mechanicalTimerGlyph: Glyph = (pen, part) => {
     [width - 14, height - 26],
   ] as const)
     rivet(pen, x, y, 3.2);
-  const middle = width * 0.42;
+  const middle = width * 0.56;
   paintWheel(pen, [middle - 24, height * 0.56, 19], 20);
   paintWheel(pen, [middle + 4, height * 0.62, 13], 14);
-  paintMotor(pen, [width - 40, height * 0.58, 27], isTurning);
-  paintBell(pen, [28, height * 0.66, 16], looks.includes('bell'));
+  paintMotor(pen, [42, height * 0.58, 27], isTurning);
+  paintBell(pen, [width - 44, height * 0.62, 17], looks.includes('bell'));
   paintContacts(pen, part);
 };
 
+/** The shaft through the front; a blue mark where the knob stands off zero. */
 const paintShaft = (pen: Pen, width: number, height: number, isTurned: boolean): void => {
-  const x = width * 0.42;
+  const x = width * 0.56;
   box(
     pen,
-    [x - 5, height - 22, 10, 22],
+    [x - 5, height - 22, 10, 28],
     2,
     linear(pen, [x - 5, 0, x + 5, 0], [material.brass[1], material.brass[0], material.brass[2]]),
     material.brass[3],
     0.8,
   );
+  // Outside the front: the knob.
+  raised(pen, 4, shade.drop, () => box(pen, [x - 24, height + 43, 48, 15], 5, material.plastic[2]));
+  box(
+    pen,
+    [x - 24, height + 43, 48, 15],
+    5,
+    linear(
+      pen,
+      [x - 24, 0, x + 24, 0],
+      [material.plastic[3], material.plastic[0], material.plastic[1], material.plastic[3]],
+    ),
+    material.plastic[3],
+    1,
+  );
+  rule(pen, [x, height + 45, x, height + 57], material.nylon[0], 2);
   if (!isTurned) return;
   disc(pen, [x, height - 6, 9], palette.act, palette.sheet, 2);
   pen.beginPath();

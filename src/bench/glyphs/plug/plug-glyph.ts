@@ -4,7 +4,7 @@ import { box, circle, disc, fill, rule, stroke } from '../paint/outline.ts';
 import { linear, radial, raised, type Pen } from '../paint/pen.ts';
 
 /** A moulded plug. Out of the outlet its pins look up at the trainee; in it (`isActuated`) its back does. */
-export const plugGlyph: Glyph = (pen, { size: [width, height], terminals, isActuated }) => {
+export const plugGlyph: Glyph = (pen, { size: [width, height], terminals, isActuated, stamp }) => {
   const middle = width / 2;
   const body = (): void => {
     pen.beginPath();
@@ -50,7 +50,33 @@ export const plugGlyph: Glyph = (pen, { size: [width, height], terminals, isActu
     ),
   );
   stroke(pen, shade.haze, 1);
-  for (const [id, at] of Object.entries(terminals)) pin(pen, id, at);
+  const isRound = isRoundPinned(stamp);
+  for (const [id, at] of Object.entries(terminals))
+    if (!isRound) pin(pen, id, at);
+    else if (id === 'E') earthClip(pen, at);
+    else roundPin(pen, at);
+};
+
+/** Plugs rated for 250 V have two round pins and an earth clip, those for 125 V blades and a round earth pin. */
+export const isRoundPinned = (stamp: readonly string[]): boolean =>
+  stamp.some((line) => line.includes('250 V'));
+
+const roundPin = (pen: Pen, [x, y]: readonly [number, number]): void => {
+  disc(pen, [x, y, 12], material.plastic[2], material.plastic[3], 1);
+  raised(pen, 3, shade.drop, () => disc(pen, [x, y, 8.5], material.tin[2]));
+  disc(pen, [x, y, 8.5], radial(pen, [x, y, 8.5], material.tin.slice(0, 3)), material.tin[3], 0.8);
+};
+
+const earthClip = (pen: Pen, [x, y]: readonly [number, number]): void => {
+  raised(pen, 2, shade.drop, () => box(pen, [x - 13, y - 7, 26, 14], 4, material.brass[2]));
+  box(
+    pen,
+    [x - 13, y - 7, 26, 14],
+    4,
+    linear(pen, [0, y - 7, 0, y + 7], [material.brass[0], material.brass[1], material.brass[2]]),
+    material.brass[3],
+    0.9,
+  );
 };
 
 const pin = (pen: Pen, id: string, [x, y]: readonly [number, number]): void => {

@@ -1,3 +1,4 @@
+import { readdirSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 import { boxesOverlap, distanceToBox } from '../../../src/bench/geometry/bench-box.ts';
@@ -5,17 +6,21 @@ import { benchSize } from '../../../src/bench/geometry/bench-furniture.ts';
 import { distance } from '../../../src/bench/geometry/bench-point.ts';
 import type { SceneTerminal } from '../../../src/bench/geometry/bench-scene.ts';
 import { distanceToChain, flatten, smoothPath } from '../../../src/bench/geometry/smooth-path.ts';
-import { definition, drawing, layout, sceneOf, withLeads } from '../../support/larkfield.ts';
+import { ovenDrawing } from '../../support/oven-drawing.ts';
 
 const everyPair = <T>(items: readonly T[]): [T, T][] =>
   items.flatMap((a, i) => items.slice(i + 1).map((b): [T, T] => [a, b]));
 
-/** Every target of the oven and the battery, and where it is. */
-const places = [...drawing.targets].map(([target, { at }]) => [target, at] as const);
+const ids = readdirSync('scenarios/ovens')
+  .filter((name) => name.endsWith('.layout.json'))
+  .map((name) => name.replace('.layout.json', ''));
 
-const allEnds = definition.leads.flatMap(({ ref }) => [`${ref}/a`, `${ref}/b`]);
+describe.each(ids)('the layout of the %s', (id) => {
+  const { definition, drawing, layout, sceneOf, withLeads } = ovenDrawing(id);
+  /** Every target of the oven and the battery, and where it is. */
+  const places = [...drawing.targets].map(([target, { at }]) => [target, at] as const);
+  const allEnds = definition.leads.flatMap(({ ref }) => [`${ref}/a`, `${ref}/b`]);
 
-describe('the layout of the Larkfield LC-28', () => {
   it('has a place for every part, terminal and lead of the oven and for nothing else', () => {
     const terminals = definition.parts.flatMap((part) =>
       partKinds[part.kind].terminals(part.variant).map(({ id }) => `${part.ref}.${id}`),
@@ -59,7 +64,9 @@ describe('the layout of the Larkfield LC-28', () => {
   });
 });
 
-describe('the labels of the Larkfield LC-28', () => {
+describe.each(ids)('the labels of the %s', (id) => {
+  const { definition, drawing, sceneOf, withLeads } = ovenDrawing(id);
+  const places = [...drawing.targets].map(([target, { at }]) => [target, at] as const);
   const { terminalLabels, partLabels } = drawing;
   const labels = [...terminalLabels, ...partLabels];
 
@@ -83,6 +90,7 @@ describe('the labels of the Larkfield LC-28', () => {
 
   it('ties tags to lifted ends that cover no target, no label and no other tag', () => {
     const ends = ['W23/a', 'W24/b', 'W7/a', 'W8/a', 'W11/b', 'W5/a', 'W17/a', 'W18/a', 'W19/a'];
+    expect(definition.leads.length).toBeGreaterThan(24);
     const oven = withLeads(Object.fromEntries(ends.map((end) => [end, null])));
     const scene = sceneOf(oven, {
       labels: Object.fromEntries(ends.map((end, i) => [end, `${i + 1} TAG`])),
