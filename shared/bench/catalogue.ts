@@ -18,7 +18,9 @@ import {
 } from './actions/meter.ts';
 import { cleanSpot, inspectPart, replacePart } from './actions/parts.ts';
 import { placeProbe, removeProbe } from './actions/probes.ts';
+import { repairDoor, repairLead } from './actions/repairs.ts';
 import { runOven } from './actions/run.ts';
+import { checkInterlocks, surveyLeakage, testFromPlug } from './actions/safety-checks.ts';
 import { giveVerdict, handIn, stateCause, writeReport } from './actions/sheet.ts';
 import { stepBack } from './actions/step-back.ts';
 import {
@@ -64,7 +66,12 @@ const actions = [
   inspectPart,
   cleanSpot,
   replacePart,
+  repairLead,
+  repairDoor,
   runOven,
+  surveyLeakage,
+  checkInterlocks,
+  testFromPlug,
   wait,
   stepBack,
   giveVerdict,

@@ -17,7 +17,9 @@ export const inspectPart = action({
   decide: (bench, data) => {
     const part = partOf(bench, data.part);
     if (!part) return refuse('no-such-part', `There is no part ${data.part}.`);
-    return part.isOutside ? accept(data) : (insideRefusal(bench) ?? accept(data));
+    // The door is the chassis' own, and it is seen from outside.
+    const isSeen = part.isOutside || part.kind === 'chassis';
+    return isSeen ? accept(data) : (insideRefusal(bench) ?? accept(data));
   },
   evolve: (state, { part }) => ({
     ...state,
