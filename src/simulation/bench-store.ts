@@ -3,6 +3,7 @@ import type { StoreApi } from 'zustand/vanilla';
 import type { BenchState } from '../../shared/bench/bench-state.ts';
 import type { BenchCommand } from '../../shared/bench/catalogue.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
+import { lastsSeconds, type LastingCommand } from '../../shared/bench/lasting.ts';
 import type { MeterView } from '../../shared/bench/reading.ts';
 import { runCommand, type Ran } from '../../shared/bench/run-command.ts';
 import type { Setup } from '../../shared/bench/setup.ts';
@@ -53,8 +54,8 @@ export interface BenchStore {
   show: (view: MeterView | null) => void;
   setSave: (save: SaveState) => void;
   /** Passes `ms` of bench time at once. */ wait: (ms: number) => void;
-  /** Start pressed for so many seconds: bench time goes on to the end of the run. */
-  operate: (seconds: number) => Promise<void>;
+  /** The oven run, alone or under a check: bench time goes on to the end of the run. */
+  operate: (command: LastingCommand) => Promise<void>;
 }
 
 export interface BenchStoreOptions {
@@ -148,10 +149,10 @@ function acting(
   return {
     run,
     wait: (ms) => pass(ms, { type: 'Wait', data: { ms } }),
-    operate: async (seconds) => {
+    operate: async (command) => {
       const { state, save, running } = get();
       if (running !== null || isClosedTo(save)) return;
-      const command: BenchCommand = { type: 'RunOven', data: { ordered: seconds } };
+      const seconds = lastsSeconds(command);
       set({ running: seconds });
       clock.skip(seconds * 1000);
       const ran = await thread

@@ -100,3 +100,28 @@ describe('what the rules look for', () => {
     expect(skill(assess(hands.setup, recorded(hands.events())), 'reason').score).toBe(100);
   });
 });
+
+describe('a lead put right and checked', () => {
+  it('earns the repair, and each check that came after it', () => {
+    const whole = opened(handsOn(setupWith([{ on: 'W8', fault: 'open-inside' }])));
+    whole.does('RepairLead', { lead: 'W8' });
+    whole.does('FitCover', {});
+    whole.does('TestFromPlug', {});
+    whole.does('PlugCord', {});
+    whole.does('RunOven', { ordered: 30 }, 30);
+    whole.does('SurveyLeakage', {}, 30);
+    whole.does('CheckInterlocks', {}, 5);
+    const judgedNow = skill(assess(whole.setup, recorded(whole.events())), 'repair and verify');
+    expect(judgedNow).toMatchObject({ score: 100 });
+    expect(judgedNow.marks.map(({ why }) => why)).toContain('You put W8 right.');
+    const unchecked = opened(handsOn(setupWith([{ on: 'W8', fault: 'open-inside' }])));
+    unchecked.does('RepairLead', { lead: 'W8' });
+    const { marks } = skill(
+      assess(unchecked.setup, recorded(unchecked.events())),
+      'repair and verify',
+    );
+    expect(marks.filter(({ points }) => points === 0).map(({ why }) => why)).toEqual(
+      expect.arrayContaining(['The door was not surveyed for leakage.']),
+    );
+  });
+});

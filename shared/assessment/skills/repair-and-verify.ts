@@ -1,25 +1,20 @@
+import type { RecordedEvent } from '../../bench/event.ts';
 import { asFitted } from '../../oven/initial-state.ts';
+import type { Mark } from '../debrief.ts';
 import type { Attempt, Skill } from '../moments.ts';
 import { mark, ofType, result } from '../moments.ts';
 
-/** The faulty part replaced and no other; every lead where it was; cover on; run again. */
+/** What was faulty put right and nothing else replaced; every lead where it was; cover on; run again; door and plug checked. */
 export const repairAndVerify: Skill = {
   name: 'repair and verify',
   judge(attempt) {
     const { end, setup } = attempt;
-    const parts = [...new Set(setup.faults.map((fault) => fault.on))].filter(
-      (on) => !on.startsWith('W'),
-    );
+    const faulty = [...new Set(setup.faults.map((fault) => fault.on))];
     const replacements = ofType(attempt, 'PartReplaced');
-    const replaced = parts.map((part) => {
-      const moment = replacements.find((one) => one.event.data['part'] === part);
-      return moment
-        ? mark(3, `You replaced ${part}.`, moment)
-        : mark(0, `${part} is still in the oven.`);
-    });
+    const putRight = faulty.map((on) => repairOf(attempt, on));
     const needless = replacements
       .filter(
-        ({ event }) => !parts.includes(String(event.data['part'])) && event.data['part'] !== 'F1',
+        ({ event }) => !faulty.includes(String(event.data['part'])) && !isFuse(attempt, event),
       )
       .map((moment) => mark(-1, `${String(moment.event.data['part'])} was good.`, moment));
     const last = ofType(attempt, 'LeadRefitted').at(-1);
@@ -38,11 +33,68 @@ export const repairAndVerify: Skill = {
         : mark(0, 'The repair was not run again with the cover on.');
     return result(
       'repair and verify',
-      [...replaced, ...needless, refitted, covered, verified],
-      3 * parts.length + 5,
+      [...putRight, ...needless, refitted, covered, verified, ...checks(attempt)],
+      3 * faulty.length + 8,
     );
   },
 };
+
+/** A fuse goes with what blew it. */
+const isFuse = ({ setup }: Attempt, event: RecordedEvent): boolean =>
+  setup.oven.definition.parts.some(
+    ({ ref, kind }) => ref === event.data['part'] && (kind === 'fuse' || kind === 'hv-fuse'),
+  );
+
+/** A part is replaced, a lead given new connectors or put where it belongs, the door set. */
+function repairOf(attempt: Attempt, on: string): Mark {
+  const part = attempt.setup.oven.definition.parts.find(({ ref }) => ref === on);
+  const is = (type: string, key: string) =>
+    ofType(attempt, type).find(({ event }) => event.data[key] === on);
+  if (part?.kind === 'chassis') {
+    const moment = ofType(attempt, 'DoorRepaired').at(-1);
+    return moment ? mark(3, 'You put the door right.', moment) : mark(0, 'The door is as it was.');
+  }
+  if (part) {
+    const moment = is('PartReplaced', 'part');
+    return moment ? mark(3, `You replaced ${on}.`, moment) : mark(0, `${on} is still in the oven.`);
+  }
+  const moment =
+    is('LeadRepaired', 'lead') ??
+    ofType(attempt, 'LeadRefitted').find(({ event }) =>
+      String(event.data['end']).startsWith(`${on}/`),
+    );
+  return moment ? mark(3, `You put ${on} right.`, moment) : mark(0, `${on} is as it was.`);
+}
+
+/** What belongs to every repair before the oven goes back (PRODUCT section 1, step 7; limits: FACTS 2). */
+function checks(attempt: Attempt): Mark[] {
+  const after = lastRepair(attempt);
+  const check = (type: string, done: string, open: string): Mark => {
+    const moment = ofType(attempt, type).findLast(({ event }) => event.sequence > after);
+    return moment ? mark(1, done, moment) : mark(0, open);
+  };
+  return [
+    check('LeakageSurveyed', 'You surveyed the door.', 'The door was not surveyed for leakage.'),
+    check(
+      'InterlocksChecked',
+      'You opened the door slowly and listened.',
+      'The door chain was not checked.',
+    ),
+    check(
+      'PlugTested',
+      'You tested earth and insulation.',
+      'Earth and insulation were not tested.',
+    ),
+  ];
+}
+
+const repairs = ['PartReplaced', 'LeadRepaired', 'DoorRepaired', 'LeadRefitted'];
+
+const lastRepair = (attempt: Attempt): number =>
+  Math.max(
+    -1,
+    ...repairs.flatMap((type) => ofType(attempt, type)).map(({ event }) => event.sequence),
+  );
 
 export function strayLeads({ setup, end }: Attempt): string[] {
   const fitted = asFitted(setup.oven.definition, []).leadEnds;

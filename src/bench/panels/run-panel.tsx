@@ -1,8 +1,11 @@
 import { useEffect, useRef } from 'react';
+import type { LastingCommand } from '../../../shared/bench/lasting.ts';
 import { useBench } from '../../simulation/bench-context.ts';
 import { BenchButton } from './bench-button.tsx';
+import { checkWords } from './check-words.ts';
 import { IconX } from './icon-x.tsx';
 import { runWords } from './run-words.ts';
+import { WordList } from './word-list.tsx';
 
 const orders = [
   [10, '10 s'],
@@ -11,20 +14,36 @@ const orders = [
   [120, '2 min'],
 ] as const;
 
-/** The control panel's keys or its knob, and what the last run looked, sounded and felt like. */
+const checks: readonly { name: string; command: LastingCommand }[] = [
+  { name: 'Survey the door', command: { type: 'SurveyLeakage', data: {} } },
+  { name: 'Open it slowly', command: { type: 'CheckInterlocks', data: {} } },
+];
+
+/** The control panel's keys or its knob, the checks of a finished repair, and what came of them last. */
 export const RunPanel = ({ onClose }: { onClose: () => void }) => {
   const operate = useBench((store) => store.operate);
+  const run = useBench((store) => store.run);
   const running = useBench((store) => store.running);
   const last = useBench(({ state }) => state.runs.at(-1));
+  const events = useBench((store) => store.events);
   const isTimed = useBench(({ setup }) => setup.oven.definition.control === 'mechanical timer');
+  const select = useBench((store) => store.select);
+  const door = useBench(
+    ({ setup }) => setup.oven.definition.parts.find(({ kind }) => kind === 'chassis')?.ref ?? 'CH',
+  );
   const panel = useRef<HTMLElement>(null);
   useEffect(() => panel.current?.focus(), []);
+  const lasting = ({ name, command }: (typeof checks)[number]) => (
+    <BenchButton key={name} aria-disabled={running !== null} onClick={() => void operate(command)}>
+      {name}
+    </BenchButton>
+  );
   return (
     <section
       ref={panel}
       tabIndex={-1}
       aria-label="Run the oven"
-      className="absolute bottom-2 left-2 z-[5] grid w-[320px] max-w-[calc(100%-16px)] gap-2.5 rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
+      className="absolute bottom-2 left-2 z-[5] grid max-h-[calc(100%-16px)] w-[340px] max-w-[calc(100%-16px)] gap-2.5 overflow-y-auto rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
     >
       <div className="flex items-start justify-between gap-2">
         <p className="text-sm">
@@ -34,32 +53,37 @@ export const RunPanel = ({ onClose }: { onClose: () => void }) => {
         <IconX name="Close" onPress={onClose} />
       </div>
       <div className="flex flex-wrap gap-2">
-        {orders.map(([seconds, name]) => (
-          <BenchButton
-            key={seconds}
-            aria-disabled={running !== null}
-            onClick={() => void operate(seconds)}
-          >
-            Run {name}
-          </BenchButton>
-        ))}
+        {orders.map(([seconds, name]) =>
+          lasting({
+            name: `Run ${name}`,
+            command: { type: 'RunOven', data: { ordered: seconds } },
+          }),
+        )}
       </div>
-      {running === null ? null : (
+      <div role="group" aria-label="Checks after a repair" className="grid gap-1.5">
+        <p className="text-sm text-bench-ink-2">
+          Checks after a repair: leakage at 5 cm with 275 ml inside, the door chain, earth and
+          insulation.
+        </p>
+        <div className="flex flex-wrap gap-2">
+          {checks.map(lasting)}
+          <BenchButton onClick={() => run({ type: 'TestFromPlug', data: {} })}>
+            Test from the plug
+          </BenchButton>
+          <BenchButton onClick={() => select({ kind: 'part', ref: door })}>The door</BenchButton>
+        </div>
+      </div>
+      {running === null ? (
+        <>
+          <WordList name="Last run" lines={last ? runWords(last) : []} />
+          <WordList name="Checks so far" lines={checkWords(events)} />
+        </>
+      ) : (
         <label className="grid gap-1 text-sm">
           The oven runs for {running} s
           <progress className="h-2 w-full accent-[var(--color-safe)]" />
         </label>
       )}
-      {last && running === null ? (
-        <dl aria-label="Last run" className="grid gap-1 border-t border-bench-line pt-2 text-sm">
-          {runWords(last).map(({ label, value }) => (
-            <div key={label} className="grid grid-cols-[84px_1fr]">
-              <dt className="text-bench-ink-2">{label}</dt>
-              <dd className="font-semibold">{value}</dd>
-            </div>
-          ))}
-        </dl>
-      ) : null}
     </section>
   );
 };

@@ -80,7 +80,7 @@ function targetChoices(definition: OvenDefinition, state: BenchState, ref: strin
           ? [command('Clean a spot with the pad', { type: 'CleanSpot', data: { terminal: ref } })]
           : []),
         { kind: 'take', label: 'Screwdriver blade here', hand: { kind: 'screwdriver', from: ref } },
-        ...(terminal && terminal.part !== 'CH'
+        ...(terminal
           ? [
               {
                 kind: 'go' as const,
@@ -205,7 +205,7 @@ function partChoices(definition: OvenDefinition, state: BenchState, ref: string)
         command('Look at it from close', { type: 'InspectPart', data: { part: ref } }),
         ...press,
         ...(part.kind === 'chassis'
-          ? []
+          ? [command('Set, clean and seal the door', { type: 'RepairDoor', data: {} })]
           : [command('Replace it with a new one', { type: 'ReplacePart', data: { part: ref } })]),
       ],
     },
@@ -242,5 +242,6 @@ function leadChoices(definition: OvenDefinition, state: BenchState, ref: string)
           ],
         };
   });
-  return { ref, name: lead.name, groups };
+  const repair = command('Give it new connectors', { type: 'RepairLead', data: { lead: ref } });
+  return { ref, name: lead.name, groups: [...groups, { title: 'This lead', choices: [repair] }] };
 }

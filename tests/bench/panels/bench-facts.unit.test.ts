@@ -228,13 +228,14 @@ describe('what can be done', () => {
     expect(labels(held, part)).toContain('Let the actuator go');
   });
 
-  it('with a lead: both its ends', () => {
+  it('with a lead: both its ends, and the lead itself', () => {
     expect(labels(withLifted('W23/a'), { kind: 'lead', ref: 'W23' })).toEqual([
       'Refit on T1.HV',
       'Take it to another terminal',
       'Label W23/a',
       'Lift W23/b off C1.1',
       'Label W23/b',
+      'Give it new connectors',
     ]);
   });
 });

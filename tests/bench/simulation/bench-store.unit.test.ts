@@ -55,7 +55,7 @@ describe('what is done on the bench', () => {
 
   it('runs the oven aside: meanwhile nothing else is done, and then it is one step at the end of the run', async () => {
     const { bench, clock, added } = benchOnPage();
-    const running = bench.getState().operate(10);
+    const running = bench.getState().operate({ type: 'RunOven', data: { ordered: 10 } });
     expect(bench.getState().running).toBe(10);
     expect(bench.getState().run({ type: 'OpenDoor', data: {} })).toBe(false);
     await running;
@@ -69,7 +69,7 @@ describe('what is done on the bench', () => {
     const { bench, clock, added } = benchOnPage(undefined, undefined, {
       thread: { run: () => Promise.reject(new Error('out of memory')) },
     });
-    await bench.getState().operate(10);
+    await bench.getState().operate({ type: 'RunOven', data: { ordered: 10 } });
     expect(bench.getState()).toMatchObject({ running: null, notice: { kind: 'refusal' } });
     expect(clock.now()).toBe(0);
     expect(added).toEqual([]);
