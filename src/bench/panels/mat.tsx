@@ -146,13 +146,14 @@ export const Mat = ({ layout, isRunOpen, onRunClose, isListOpen, onListClose, on
       <div className="pointer-events-none absolute inset-x-2 top-12 z-[6] grid max-h-[calc(100%-56px)] justify-items-center">
         <HazardNotice />
       </div>
-      <div className="pointer-events-none absolute bottom-2 left-2 z-[2] grid max-w-[min(440px,calc(100%-16px))] justify-items-start gap-1.5">
+      <div
+        className={`pointer-events-none absolute bottom-2 left-2 flex max-h-[calc(100%-60px)] max-w-[min(440px,calc(100%-16px))] flex-col items-start gap-1.5 ${isRunOpen ? 'z-[5]' : 'z-[2]'}`}
+      >
         <RefusalNotice />
-        <HandHint />
+        {isRunOpen ? <RunPanel onClose={onRunClose} /> : <HandHint />}
       </div>
       <HoverName place={name} isHidden={selection !== null} />
       {panelStyle ? <SelectionPanel style={panelStyle} onClose={closeSelection} /> : null}
-      {isRunOpen ? <RunPanel onClose={onRunClose} /> : null}
       <Mirror
         groups={groups}
         isShown={isListOpen}

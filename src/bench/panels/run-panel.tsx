@@ -43,7 +43,7 @@ export const RunPanel = ({ onClose }: { onClose: () => void }) => {
       ref={panel}
       tabIndex={-1}
       aria-label="Run the oven"
-      className="absolute bottom-2 left-2 z-[5] grid max-h-[calc(100%-16px)] w-[340px] max-w-[calc(100%-16px)] gap-2.5 overflow-y-auto rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
+      className="pointer-events-auto grid min-h-0 w-[340px] max-w-full gap-2.5 overflow-y-auto rounded-lg border border-bench-ink-2 bg-mat-deep p-3 text-bench-ink shadow-xl outline-none"
     >
       <div className="flex items-start justify-between gap-2">
         <p className="text-sm">
