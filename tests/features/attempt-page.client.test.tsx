@@ -134,6 +134,49 @@ describe('the debrief', () => {
     expect(lines()[0]).toHaveTextContent('job begun');
   });
 
+  it('adds what could not be seen, and marks what was taken back', async () => {
+    const first = events[0];
+    if (!first) throw new Error('no event');
+    const step = (sequence: number, type: string, data: Record<string, unknown>) => ({
+      ...first,
+      sequence,
+      type,
+      data,
+      benchMs: 1000 * sequence,
+    });
+    const run = {
+      ordered: 60,
+      seconds: 1.5,
+      isDisplayLit: true,
+      isLampLit: true,
+      isFanTurning: true,
+      isTurntableTurning: true,
+      hum: 'loud',
+      current: 31,
+      microwavePower: 0,
+      waterRise: 0,
+      opened: ['F1'],
+      charge: {},
+    };
+    handedIn().on(getEvents, {
+      events: [
+        first,
+        step(1, 'OvenRun', run),
+        step(2, 'CordPlugged', { isDisplayLit: true }),
+        step(3, 'SteppedBack', { undone: 'CordPlugged', doneAtMs: 2000 }),
+      ],
+    });
+    const { user } = await renderApp(path);
+    const lines = () =>
+      within(screen.getByRole('region', { name: 'Timeline' })).getAllByRole('button');
+    await timeline();
+    await user.click(screen.getByRole('checkbox', { name: /Show all 4 events/ }));
+    expect(lines()[1]).toHaveTextContent(
+      'run: display lit, lamp lit, a loud hum, water cold, over after 1.5 sUnseen then: F1 opened.',
+    );
+    expect(lines()[2]).toHaveTextContent('Taken back by a step back.');
+  });
+
   it('names what was truly wrong', async () => {
     handedIn();
     await renderApp(path);

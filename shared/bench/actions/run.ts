@@ -3,8 +3,9 @@ import { accept, action, refuse } from '../action.ts';
 import { beforeRun, warmthAfter } from '../cooling.ts';
 import { openAfter, poweredRun } from '../powered-run/powered-run.ts';
 import type { BenchState } from '../bench-state.ts';
-import type { HoodOutcome, RunOutcome } from '../record.ts';
+import type { RunOutcome } from '../record.ts';
 import { runOutcome } from '../record.ts';
+import { runLine } from '../run-words.ts';
 import type { Setup } from '../setup.ts';
 
 const asked = z.strictObject({ ordered: z.number().min(1).max(300) });
@@ -34,7 +35,7 @@ export const runOven = action({
       ...(outcome.heat ? { warmth: warmthAfter(setup, state, outcome.heat) } : {}),
     };
   },
-  describe: (outcome) => `run for ${outcome.seconds.toFixed(1)} s: ${seenAndHeard(outcome)}`,
+  describe: runLine,
 });
 
 /** Runs from before heat was reckoned tell only what they opened. */
@@ -49,31 +50,3 @@ function afterRun({ isDisplayLit, opened, seconds, ordered }: RunOutcome): boole
   if (!isDisplayLit || opened.length === 0) return isDisplayLit;
   return seconds >= ordered;
 }
-
-const humOf = (hum: RunOutcome['hum']): string => (hum === 'none' ? 'no hum' : `${hum} hum`);
-
-const humWords = ({ hum, atFirst }: RunOutcome): string =>
-  atFirst
-    ? `${humOf(atFirst.hum)} for ${atFirst.seconds.toFixed(1)} s, then ${humOf(hum)}`
-    : humOf(hum);
-
-function seenAndHeard(outcome: RunOutcome): string {
-  if (outcome.isDisplayLit === false) return 'dead, no display';
-  const parts = [
-    outcome.isLampLit ? 'lamp on' : 'lamp dark',
-    ...(outcome.isTimerRunning === undefined
-      ? []
-      : [outcome.isTimerRunning ? 'timer ticking' : 'timer not running']),
-    humWords(outcome),
-    outcome.waterRise < 0.05 ? 'water cold' : `water up ${outcome.waterRise.toFixed(1)} K`,
-    ...outcome.opened.map((ref) => `${ref} opened`),
-    ...(outcome.hood ? [vented(outcome.hood)] : []),
-  ];
-  return parts.join(', ');
-}
-
-const vented = ({ isVentTurningLow, isVentTurningHigh, isLampLit }: HoodOutcome): string => {
-  const speeds = [isVentTurningLow && 'low', isVentTurningHigh && 'high'].filter(Boolean);
-  const vent = speeds.length === 0 ? 'vent still' : `vent on ${speeds.join(' and ')}`;
-  return `${vent}, cooktop lamp ${isLampLit ? 'on' : 'dark'}`;
-};

@@ -1,10 +1,10 @@
 import { useEffect, useRef } from 'react';
 import type { LastingCommand } from '../../../shared/bench/lasting.ts';
+import { runWords } from '../../../shared/bench/run-words.ts';
 import { useBench } from '../../simulation/bench-context.ts';
 import { BenchButton } from './bench-button.tsx';
 import { checkWords } from './check-words.ts';
 import { IconX } from './icon-x.tsx';
-import { runWords } from './run-words.ts';
 import { WordList } from './word-list.tsx';
 
 const orders = [

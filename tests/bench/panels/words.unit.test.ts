@@ -5,7 +5,7 @@ import { expectedText } from '../../../src/bench/panels/expected-text.ts';
 import { figure, hazardWords } from '../../../src/bench/panels/hazard-words.ts';
 import { logLine } from '../../../src/bench/panels/log-line.ts';
 import { placeBeside } from '../../../src/bench/panels/place-beside.ts';
-import { runWords } from '../../../src/bench/panels/run-words.ts';
+import { runWords } from '../../../shared/bench/run-words.ts';
 import { saveText } from '../../../src/bench/panels/save-text.ts';
 import { manual2000 } from '../../../shared/instruments/manual-2000.ts';
 import { oven } from '../../support/client-fixtures.ts';
@@ -103,7 +103,9 @@ describe('a run', () => {
 
   it('gives no fuse away in the log either', () => {
     const event = { type: 'OvenRun', version: 1 as const, benchMs: 0, data: { ...run } };
-    expect(logLine(manual2000, event)).toBe('run: display lit, lamp lit, a loud hum, water cold');
+    expect(logLine(manual2000, event)).toBe(
+      'run: display lit, lamp lit, a loud hum, water cold, over after 2.3 s',
+    );
   });
 });
 

@@ -1,40 +1,47 @@
 import { useState } from 'react';
 import { describeEvent } from '../../../../shared/bench/describe.ts';
 import type { RecordedEvent } from '../../../../shared/bench/event.ts';
+import { undonePlaces } from '../../../../shared/bench/undone.ts';
 import type { Mark } from '../../../../shared/assessment/debrief.ts';
 import { benchClock } from '../../../components/bench-clock.ts';
 import { Checkbox } from '../../../components/checkbox.tsx';
+import { unseen } from '../unseen.ts';
 import { pointsText } from '../points-text.ts';
 
 interface LineProps {
   event: RecordedEvent;
   marks: readonly Mark[];
   isMoment: boolean;
+  /** taken back later */ isUndone: boolean;
   goTo: (sequence: number) => void;
 }
 
-const Line = ({ event, marks, isMoment, goTo }: LineProps) => (
-  <li>
-    <button
-      type="button"
-      aria-current={isMoment ? 'step' : undefined}
-      onClick={() => goTo(event.sequence)}
-      className="grid min-h-8 w-full grid-cols-[64px_1fr] gap-x-3 rounded px-3 py-1 text-left hover:bg-act-tint aria-[current=step]:bg-act-tint sm:grid-cols-[72px_1fr_auto]"
-    >
-      <span className="pt-px font-mono text-sm text-ink-2">{benchClock(event.benchMs)}</span>
-      <span
-        className={`first-letter:uppercase ${event.type === 'HazardHappened' ? 'font-semibold text-danger' : ''}`}
+const Line = ({ event, marks, isMoment, isUndone, goTo }: LineProps) => {
+  const note = isUndone ? 'Taken back by a step back.' : unseen(event);
+  return (
+    <li>
+      <button
+        type="button"
+        aria-current={isMoment ? 'step' : undefined}
+        onClick={() => goTo(event.sequence)}
+        className="grid min-h-8 w-full grid-cols-[64px_1fr] gap-x-3 rounded px-3 py-1 text-left hover:bg-act-tint aria-[current=step]:bg-act-tint sm:grid-cols-[72px_1fr_auto]"
       >
-        {describeEvent(event)}
-      </span>
-      {marks.length === 0 ? null : (
-        <span className="col-start-2 font-mono text-sm font-semibold sm:col-start-3">
-          {marks.map(({ points }) => pointsText(points)).join(' ')}
+        <span className="pt-px font-mono text-sm text-ink-2">{benchClock(event.benchMs)}</span>
+        <span
+          className={`first-letter:uppercase ${event.type === 'HazardHappened' ? 'font-semibold text-danger' : ''}`}
+        >
+          {describeEvent(event)}
+          {note === '' ? null : <span className="block text-sm text-ink-2">{note}</span>}
         </span>
-      )}
-    </button>
-  </li>
-);
+        {marks.length === 0 ? null : (
+          <span className="col-start-2 font-mono text-sm font-semibold sm:col-start-3">
+            {marks.map(({ points }) => pointsText(points)).join(' ')}
+          </span>
+        )}
+      </button>
+    </li>
+  );
+};
 
 interface Props {
   events: readonly RecordedEvent[];
@@ -46,6 +53,7 @@ interface Props {
 /** What happened on the bench, in words, by bench time: first the moments that counted, all on request. */
 export const Timeline = ({ events, marks, moment, goTo }: Props) => {
   const [isWhole, setIsWhole] = useState(false);
+  const undone = undonePlaces(events);
   const counted = new Set(marks.map(({ sequence }) => sequence));
   const shown = isWhole
     ? events
@@ -72,6 +80,7 @@ export const Timeline = ({ events, marks, moment, goTo }: Props) => {
               event={event}
               marks={marks.filter(({ sequence }) => sequence === event.sequence)}
               isMoment={moment === event.sequence}
+              isUndone={undone.has(event.sequence)}
               goTo={goTo}
             />
           ))}

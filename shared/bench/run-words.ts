@@ -1,4 +1,4 @@
-import type { RunOutcome } from '../../../shared/bench/record.ts';
+import type { RunOutcome } from './record.ts';
 
 const hums: Record<RunOutcome['hum'], string> = {
   none: 'no hum',
@@ -67,7 +67,10 @@ function hoodWords({ hood }: RunOutcome): { label: string; value: string }[] {
   ];
 }
 
-/** The same in one line, for the bench log. */
+/**
+ * The same in one line. Which fuse or cut-out opened is not among it: nobody sees that from in front
+ * of the oven.
+ */
 export const runLine = (run: RunOutcome): string =>
   `run: ${[
     ...(run.isDisplayLit === undefined ? [] : [run.isDisplayLit ? 'display lit' : 'display dark']),
@@ -75,6 +78,7 @@ export const runLine = (run: RunOutcome): string =>
     run.isLampLit ? 'lamp lit' : 'lamp dark',
     sound(run),
     run.waterRise < 0.1 ? 'water cold' : `water up ${run.waterRise.toFixed(1)} K`,
+    ...(run.seconds < run.ordered ? [`over after ${run.seconds.toFixed(1)} s`] : []),
     ...[...comingAndGoing(run), ...hoodWords(run)].map(
       ({ label, value }) => `${label.toLowerCase()} ${value}`,
     ),
