@@ -6,6 +6,7 @@ import type { Verified } from '../../shared/bench/verify.ts';
 import type { appendEvents } from '../../shared/contracts/attempts.ts';
 import type { Caller } from '../http/caller.ts';
 import { done, refused, type Outcome, type Refused } from '../outcome.ts';
+import { aheadOfClock } from './ahead-of-clock.ts';
 import { isOwner } from './attempt-access.ts';
 import type { AttemptState, AttemptStore, LockedAttempt } from './attempt.ts';
 import type { Bench, BenchKeeper } from './bench-keeper.ts';
@@ -45,16 +46,16 @@ async function newEvents(locked: LockedAttempt, batch: Batch): Promise<Outcome<W
 }
 
 function refuseEvents(
-  verified: Exclude<Verified, { ok: true }>,
+  why: Pick<Exclude<Verified, { ok: true }>, 'index' | 'message' | 'path'>,
   events: readonly WireEvent[],
   skipped: number,
 ): Refused {
-  const index = skipped + verified.index;
-  const type = events[verified.index]?.type ?? '';
-  const inside = verified.path === undefined ? '' : `.${verified.path}`;
-  const detail = `Event ${index} of the batch, ${type}: ${verified.message}`;
+  const index = skipped + why.index;
+  const type = events[why.index]?.type ?? '';
+  const inside = why.path === undefined ? '' : `.${why.path}`;
+  const detail = `Event ${index} of the batch, ${type}: ${why.message}`;
   return refused('cannot-have-happened', detail, {
-    errors: [{ path: `events.${index}${inside}`, message: verified.message }],
+    errors: [{ path: `events.${index}${inside}`, message: why.message }],
   });
 }
 
@@ -143,9 +144,12 @@ export class AppendService {
     const { attempt } = locked;
     const bench = await this.#benches.standing(locked);
     if (!bench) return refused('not-found', `The oven ${attempt.content.oven} is not available.`);
-    const verified = await this.#judge.verify(bench, bench.state, events);
-    if (!verified.ok) return refuseEvents(verified, events, batch.events.length - events.length);
     const at = this.#clock();
+    const known = batch.events.length - events.length;
+    const early = aheadOfClock(bench.state, events, at.getTime() - attempt.startedAt.getTime());
+    if (early) return refuseEvents({ ...early, path: 'benchMs' }, events, known);
+    const verified = await this.#judge.verify(bench, bench.state, events);
+    if (!verified.ok) return refuseEvents(verified, events, known);
     const recorded = record(events, attempt.next, at);
     const next = attempt.next + events.length;
     const isHandedIn = verified.state.isHandedIn;

@@ -26,6 +26,7 @@ export interface AttemptState extends PinnedAttempt {
   /** the next sequence number */ next: number;
   benchMs: number;
   status: AttemptStatus;
+  startedAt: Date;
 }
 
 /** One line of a list. */

@@ -21,12 +21,13 @@ interface LockedRow {
   next: number;
   benchMs: number;
   status: AttemptStatus;
+  startedAt: Date;
 }
 
 const select = `
   SELECT id, organisation_id AS organisation, person_id AS person, visitor_token_hash AS visitor,
          seed, content, engine_version AS "engineVersion", epoch, writer, next_sequence AS next,
-         bench_ms AS "benchMs", status
+         bench_ms AS "benchMs", status, started_at AS "startedAt"
     FROM attempt WHERE id = $1 FOR UPDATE`;
 
 /** Events and projection in one journey to the database. */

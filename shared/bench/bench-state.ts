@@ -15,6 +15,7 @@ export interface Warmth {
 /** Everything that is so on the bench at one moment: the fold of the attempt's events. Times in ms of bench time. */
 export interface BenchState {
   benchMs: number;
+  /** of it, what nobody sat through: waits, and runs as they were ordered */ skippedMs: number;
   isCordIn: boolean;
   isCoverOn: boolean;
   /** what is seen of the oven while it stands plugged in; null: it has no display */

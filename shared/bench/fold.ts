@@ -9,6 +9,7 @@ import type { Setup } from './setup.ts';
 /** The bench before its first event: a closed oven, plugged in, the meter off. */
 export const untouched = (setup: Setup): BenchState => ({
   benchMs: 0,
+  skippedMs: 0,
   isCordIn: true,
   isCoverOn: true,
   isDisplayLit: hasDisplay(setup.oven.definition) ? false : null,

@@ -7,6 +7,7 @@ import type { HazardFound } from './hazards.ts';
 import { meterHazards } from './hazards.ts';
 import { passTime } from './pass-time.ts';
 import type { Setup } from './setup.ts';
+import { skippedMs } from './skipped-ms.ts';
 import { withWayBack } from './way-back.ts';
 
 export type Ran =
@@ -47,7 +48,9 @@ export function runCommand(
 export function apply(setup: Setup, state: BenchState, event: WireEvent): BenchState {
   const evolver = evolverByEvent.get(event.type);
   if (!evolver) throw new Error(`no evolver for ${event.type}`);
-  const after = evolver.evolve(state, evolver.data.parse(event.data), setup);
+  const evolved = evolver.evolve(state, evolver.data.parse(event.data), setup);
+  const skipped = skippedMs(event);
+  const after = skipped > 0 ? { ...evolved, skippedMs: state.skippedMs + skipped } : evolved;
   const action = actionByEvent.get(event.type);
   return action && !action.isReturning ? withWayBack(setup, state, after, event) : after;
 }

@@ -21,6 +21,7 @@ export interface Surroundings {
 
 const state: BenchState = {
   benchMs: 0,
+  skippedMs: 0,
   isCordIn: true,
   isCoverOn: true,
   isDisplayLit: false,

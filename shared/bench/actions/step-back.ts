@@ -29,6 +29,7 @@ export const stepBack = action({
       ? {
           ...state.wayBack.before,
           benchMs: state.benchMs,
+          skippedMs: state.skippedMs,
           hazards: state.hazards,
           wayBack: null,
         }

@@ -1,7 +1,12 @@
 import { z } from 'zod';
 import { accept, action } from '../action.ts';
 
-const waited = z.strictObject({ ms: z.int().min(1000).max(600_000) });
+/** ms */
+export const waitLimits = { shortest: 1000, longest: 600_000 } as const;
+
+const waited = z.strictObject({
+  ms: z.int().min(waitLimits.shortest).max(waitLimits.longest),
+});
 
 /** Bench time that nobody sat through: its event stands at the end of the wait. */
 export const wait = action({

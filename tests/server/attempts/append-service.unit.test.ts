@@ -127,6 +127,39 @@ describe('judging events', () => {
     });
   });
 
+  test.each([1e300, 3_600_001])(
+    'bench time that cannot have come yet is refused: %d ms',
+    async (benchMs) => {
+      // Desk and attempt begin at the same moment: an hour's grace, and nothing was waited for.
+      const early: WireEvent = { type: 'DoorOpened', version: 1, data: {}, benchMs };
+      expect(await desk.send(1, [early])).toMatchObject({
+        ok: false,
+        problem: {
+          code: 'cannot-have-happened',
+          detail: expect.stringContaining('further ahead than time can have passed'),
+          errors: [{ path: 'events.0.benchMs' }],
+        },
+      });
+      expect(await stored()).toEqual(['AttemptBegan']);
+    },
+  );
+
+  test('waits carry bench time as far as they say, in this batch or before', async () => {
+    const waits = Array.from({ length: 12 }, () =>
+      desk.hands.does('Wait', { ms: 600_000 }, 600),
+    ).flat();
+    expect(await desk.send(1, waits)).toMatchObject({ ok: true });
+    const last = waits.at(-1)?.benchMs ?? 0;
+    expect(last).toBe(7_200_000);
+    const later = (benchMs: number): WireEvent[] => [
+      { type: 'DoorOpened', version: 1, data: {}, benchMs },
+    ];
+    expect(await desk.send(13, later(last + 3_600_001))).toMatchObject({
+      problem: { code: 'cannot-have-happened' },
+    });
+    expect(await desk.send(13, later(last + 3_600_000))).toMatchObject({ ok: true });
+  });
+
   test('a reading that the circuit does not give is refused', async () => {
     const events = begin();
     desk.hands.does('SetMeter', { setting: 'ohms-200' });
