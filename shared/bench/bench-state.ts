@@ -1,9 +1,15 @@
 import type { Storage } from '../engine/circuit/circuit.ts';
 import type { LeadEndRef, PartRef, TargetRef } from '../oven/oven.ts';
 import type { OvenState } from '../oven/oven-state.ts';
-import type { CapturedReading, Cause, Hazard, RunOutcome, Verdict } from './record.ts';
-
-export type ProbeColour = 'red' | 'black';
+import type {
+  CapturedReading,
+  Cause,
+  Hazard,
+  ProbeColour,
+  ProbeHold,
+  RunOutcome,
+  Verdict,
+} from './record.ts';
 
 /** Magnetrons cooling in still air since a run, and the cut-outs that close again on the way. */
 export interface Warmth {
@@ -24,6 +30,8 @@ export interface BenchState {
   oven: OvenState;
   labels: Readonly<Record<LeadEndRef, string>>;
   probes: Readonly<Record<ProbeColour, TargetRef | null>>;
+  /** how each probe is held, on a target or on its way */
+  holds: Readonly<Record<ProbeColour, ProbeHold>>;
   meter: {
     setting: string;
     /** what REL subtracts, in the unit of the setting; null: off */ relative: number | null;

@@ -2,6 +2,7 @@ import { meterBranch } from '../instruments/meter-branch.ts';
 import type { BenchBranch } from '../oven/oven-state.ts';
 import type { BenchState } from './bench-state.ts';
 import type { Setup } from './setup.ts';
+import { fingersBranch, meterOnLeads } from './test-leads.ts';
 
 /** Ohm; ENGINE: the discharge lead. */
 export const dischargeResistance = 20_000;
@@ -13,9 +14,12 @@ export function branches(setup: Setup, state: BenchState): BenchBranch[] {
   const { probes, discharge, battery, meter } = state;
   const found: BenchBranch[] = [];
   if (probes.red && probes.black && probes.red !== probes.black && !meter.isDestroyed) {
-    const branch = meterBranch(setup.meter, meter.setting, probes.red, probes.black);
+    const leads = meterOnLeads(setup, state);
+    const branch = meterBranch(leads, meter.setting, probes.red, probes.black);
     if (branch) found.push(branch);
   }
+  const body = fingersBranch(state);
+  if (body) found.push(body);
   if (discharge.clip && discharge.tip && discharge.clip !== discharge.tip) {
     found.push(resistor('discharge', discharge.clip, discharge.tip, dischargeResistance));
   }

@@ -17,7 +17,7 @@ import {
   takeReading,
 } from './actions/meter.ts';
 import { cleanSpot, inspectPart, replacePart } from './actions/parts.ts';
-import { placeProbe, removeProbe } from './actions/probes.ts';
+import { holdProbe, placeProbe, removeProbe } from './actions/probes.ts';
 import { repairDoor, repairLead } from './actions/repairs.ts';
 import { runOven } from './actions/run.ts';
 import { checkInterlocks, surveyLeakage, testFromPlug } from './actions/safety-checks.ts';
@@ -51,6 +51,7 @@ const actions = [
   refitLead,
   placeProbe,
   removeProbe,
+  holdProbe,
   setMeter,
   setRelative,
   clearRelative,

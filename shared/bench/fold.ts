@@ -5,6 +5,7 @@ import type { WireEvent } from './event.ts';
 import { passTime } from './pass-time.ts';
 import { apply } from './run-command.ts';
 import type { Setup } from './setup.ts';
+import { byHandle } from './test-leads.ts';
 
 /** The bench before its first event: a closed oven, plugged in, the meter off. */
 export const untouched = (setup: Setup): BenchState => ({
@@ -17,6 +18,7 @@ export const untouched = (setup: Setup): BenchState => ({
   oven: asFitted(setup.oven.definition, setup.faults),
   labels: {},
   probes: { red: null, black: null },
+  holds: byHandle,
   meter: { setting: 'off', relative: null, isDestroyed: false, lag: null },
   discharge: { clip: null, tip: null },
   battery: { neg: null, oneK: null },

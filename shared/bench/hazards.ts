@@ -7,6 +7,7 @@ import { liveVolts } from './live-volts.ts';
 import { circuitOf, integrate, pairOf } from './pass-time.ts';
 import type { Hazard } from './record.ts';
 import type { Setup } from './setup.ts';
+import { fingersBranch } from './test-leads.ts';
 
 export type HazardFound = Omit<Hazard, 'benchMs'>;
 
@@ -66,8 +67,13 @@ export function contact(
   };
 }
 
-export const bodyContact = (setup: Setup, state: BenchState, at: TargetRef): Contact =>
-  contact(setup, state, [at, 'CH.1'], bodyResistance, touchSeconds);
+/** From `at` through the body to `to`: the other hand, on the chassis unless it holds something else. */
+export const bodyContact = (
+  setup: Setup,
+  state: BenchState,
+  at: TargetRef,
+  to: TargetRef = 'CH.1',
+): Contact => contact(setup, state, [at, to], bodyResistance, touchSeconds);
 
 export const bladeContact = (
   setup: Setup,
@@ -99,6 +105,21 @@ export function touch(
   }
   // One charge, one shock: the hand that met the first terminal has emptied it.
   return found.slice(0, 1);
+}
+
+/** Both tips with fingers on their metal, as they are in `after`: one hand to the other, the chassis out of it. */
+export function pinch(setup: Setup, state: BenchState, after: BenchState): HazardFound[] {
+  const body = fingersBranch(after);
+  if (!body) return [];
+  const { from: at, to } = body;
+  const live = state.isCordIn ? liveVolts(setup, state, [at, to]) : 0;
+  if (live > touchVoltsAlternating) {
+    return [{ kind: 'mains-exposed', at, to, volts: live, charge: 0, energy: 0 }];
+  }
+  const volts = standingVolts(setup, state, [at, to]);
+  if (Math.abs(volts) <= touchVolts) return [];
+  const { charge, energy } = bodyContact(setup, state, at, to);
+  return charge > touchCharge ? [{ kind: 'shock', at, to, volts, charge, energy }] : [];
 }
 
 /** A blade across two targets. */

@@ -62,7 +62,9 @@ export const hazardWords: Record<z.infer<typeof hazard>['kind'], string> = {
 function afterHazard(setup: Setup, state: BenchState, data: z.infer<typeof hazard>): BenchState {
   switch (data.kind) {
     case 'shock':
-      return data.at ? { ...state, storage: bodyContact(setup, state, data.at).storage } : state;
+      return data.at
+        ? { ...state, storage: bodyContact(setup, state, data.at, data.to ?? undefined).storage }
+        : state;
     case 'capacitor-shorted':
       return data.at
         ? { ...state, storage: bladeContact(setup, state, [data.at, data.to ?? 'CH.1']).storage }

@@ -8,6 +8,7 @@ import type { Passed } from './pass-time.ts';
 import { pairOf, passTime } from './pass-time.ts';
 import type { ShownReading } from './record.ts';
 import type { Setup } from './setup.ts';
+import { heldOtherwise, meterOnLeads } from './test-leads.ts';
 import { magnitude } from '../engine/elementary/magnitude.ts';
 import { sin } from '../engine/elementary/sine.ts';
 
@@ -56,12 +57,13 @@ export const shown = (state: BenchState, view: MeterView): ShownReading | null =
     isSettled: view.isSettled,
     isBeeping,
     isRelative: state.meter.relative !== null,
+    ...heldOtherwise(state.holds),
   };
 };
 
 const readTrace = (setup: Setup, before: BenchState, atMs: number, trace: Trace): Reading =>
   read({
-    meter: setup.meter,
+    meter: meterOnLeads(setup, before),
     unit: setup.unit,
     settingId: before.meter.setting,
     trace,

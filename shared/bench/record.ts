@@ -6,6 +6,13 @@ export const target = z
   .string()
   .regex(/^([A-Z]{1,3}[0-9]{0,2}\.[A-Za-z0-9]{1,6}|W[0-9]{1,3}\/[ab])$/, 'a terminal or lead end');
 
+export const probeColour = z.enum(['red', 'black']);
+export type ProbeColour = z.infer<typeof probeColour>;
+
+/** By its insulated handle, through a clip lead, or with the metal of the tip between the fingers. */
+export const probeHold = z.enum(['handle', 'clip', 'fingers']);
+export type ProbeHold = z.infer<typeof probeHold>;
+
 /** What the display showed. Judged once, kept for ever: later engines never rewrite it. */
 export const shownReading = z.strictObject({
   red: target,
@@ -17,6 +24,8 @@ export const shownReading = z.strictObject({
   isSettled: z.boolean(),
   isBeeping: z.boolean(),
   isRelative: z.boolean(),
+  /** how the tips were held; absent: both by the handle */
+  held: z.strictObject({ red: probeHold, black: probeHold }).optional(),
 });
 export type ShownReading = z.infer<typeof shownReading>;
 

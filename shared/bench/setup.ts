@@ -7,7 +7,7 @@ import type { DrawnOven } from '../oven/oven-state.ts';
 import type { OvenDefinition } from '../oven/oven.ts';
 
 /** Written into every attempt: which rules and circuit engine judged it. */
-export const engineVersion = 3;
+export const engineVersion = 4;
 
 /** What does not change during an attempt: the drawn oven, its faults and the meter handed out. */
 export interface Setup {

@@ -65,6 +65,7 @@ export function meterTick(
 /** A reading written down, a verdict given: nothing about them is news to the display. */
 const isSameCircuit = (a: BenchState, b: BenchState): boolean =>
   a.probes === b.probes &&
+  a.holds === b.holds &&
   a.meter.setting === b.meter.setting &&
   a.meter.relative === b.meter.relative &&
   a.oven === b.oven &&
@@ -93,6 +94,6 @@ function changeRange({ setup, state, run }: BenchStore, view: MeterView, atMs: n
 /** Two displays a few counts apart are one reading: the last digit dithers. */
 function readingKey({ state }: BenchStore, { reading }: MeterView): string {
   const counts = reading.isOverRange ? 'OL' : Math.round((reading.counts ?? 0) / 4);
-  const { probes, meter, oven, replaced } = state;
-  return JSON.stringify([probes, meter.setting, meter.relative, counts, oven, replaced]);
+  const { probes, holds, meter, oven, replaced } = state;
+  return JSON.stringify([probes, holds, meter.setting, meter.relative, counts, oven, replaced]);
 }

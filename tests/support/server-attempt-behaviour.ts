@@ -37,6 +37,7 @@ const state: BenchState = {
   },
   labels: { 'W1/a': 'Ω' },
   probes: { red: 'C1.1', black: null },
+  holds: { red: 'handle', black: 'handle' },
   meter: { setting: 'off', relative: null, isDestroyed: false, lag: 1e-9 },
   discharge: { clip: null, tip: null },
   battery: { neg: null, oneK: null },

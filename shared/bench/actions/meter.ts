@@ -2,7 +2,8 @@ import { z } from 'zod';
 import { settingOf } from '../../instruments/meters.ts';
 import { accept, action, refuse } from '../action.ts';
 import { readMeter, shown } from '../reading.ts';
-import { shownReading } from '../record.ts';
+import { shownReading, type ShownReading } from '../record.ts';
+import { heldWords } from '../test-leads.ts';
 
 const nothing = z.strictObject({});
 const chosen = z.strictObject({ setting: z.string().max(24) });
@@ -107,5 +108,5 @@ export const captureReading = action({
   describe: (data) => `on the sheet: ${data.red}–${data.black} ${inWords(data)}`,
 });
 
-const inWords = (data: { display: string; unit: string; isBeeping: boolean }): string =>
-  `${data.display} ${data.unit}${data.isBeeping ? ', beeps' : ''}`;
+const inWords = ({ display, unit, isBeeping, held }: ShownReading): string =>
+  [`${display} ${unit}`, isBeeping ? 'beeps' : '', heldWords(held)].filter(Boolean).join(', ');

@@ -1,3 +1,4 @@
+import type { ProbeHold } from '../../../shared/bench/record.ts';
 import type { LeadEndRef, PartRef, TargetRef } from '../../../shared/oven/oven.ts';
 import type { BenchPoint } from './bench-point.ts';
 import type { ProbeColour } from './bench-scene.ts';
@@ -7,6 +8,7 @@ export interface BenchHand {
   isCoverOn: boolean;
   isCordIn: boolean;
   probes: Readonly<Record<ProbeColour, TargetRef | null>>;
+  holds: Readonly<Record<ProbeColour, ProbeHold>>;
   discharge: { clip: TargetRef | null; tip: TargetRef | null };
   battery: { neg: TargetRef | null; oneK: TargetRef | null };
   labels: Readonly<Record<LeadEndRef, string>>;
@@ -34,6 +36,7 @@ export const emptyHand: BenchHand = {
   isCoverOn: false,
   isCordIn: false,
   probes: { red: null, black: null },
+  holds: { red: 'handle', black: 'handle' },
   discharge: { clip: null, tip: null },
   battery: { neg: null, oneK: null },
   labels: {},

@@ -1,3 +1,4 @@
+import type { ProbeHold } from '../../../shared/bench/record.ts';
 import type { OvenLead, PartKindName, TargetRef } from '../../../shared/oven/oven.ts';
 import type { BenchBox } from './bench-box.ts';
 import type { BenchPoint } from './bench-point.ts';
@@ -71,6 +72,7 @@ export interface SceneProbe {
   colour: ProbeColour;
   at: BenchPoint | null;
   isInHand: boolean;
+  hold: ProbeHold;
 }
 
 /** The discharge lead, 20 kOhm between clip and tip. A null end lies at rest on the mat. */

@@ -41,6 +41,7 @@ export const buildScene = (drawing: BenchDrawing, oven: OvenState, hand: BenchHa
       colour,
       at: at(hand.probes[colour]),
       isInHand: hand.carrying?.tool === 'probe' && hand.carrying.colour === colour,
+      hold: hand.holds[colour],
     })),
     discharge: sceneDischarge(hand, at),
     battery: sceneBattery(hand, at),

@@ -46,6 +46,7 @@ export function sceneHand(
     isCoverOn: state.isCoverOn,
     isCordIn: state.isCordIn,
     probes: state.probes,
+    holds: state.holds,
     discharge: state.discharge,
     battery: state.battery,
     labels: state.labels,

@@ -29,6 +29,7 @@ export function shownThen(
 const changesDisplay = new Set([
   'ProbePlaced',
   'ProbeRemoved',
+  'ProbeHeld',
   'MeterSet',
   'RelativeSet',
   'RelativeCleared',
