@@ -101,6 +101,7 @@ export const material = {
   glass: ['#f3f8f8', '#c9d8da', '#8aa0a4', '#4b5f64'],
   wood: ['#caa77a', '#a98356', '#7d5c37', '#4d371e'],
   disc: ['#7fb1d6', '#4a86b5', '#2f628c', '#1a3d5b'],
+  skin: ['#f3d3b8', '#dcae8c', '#b27e5d', '#6f4a34'],
   soot: ['#6a4a2c', '#3e2816', '#1f140b', '#0b0704'],
   glow: ['#fffbe8', '#ffe7a3', '#ffc85a', '#d98a1e'],
   segment: ['#b6ffe4', '#63e6bd', '#1f6f5c', '#123a32'],

@@ -45,8 +45,8 @@ export interface Hands {
   ) => string;
 }
 
-export function handsOn(setup: Setup): Hands {
-  const started = begin(setup);
+/** `started`: where the bench stands when it is not from the beginning. */
+export function handsOn(setup: Setup, started = begin(setup)): Hands {
   let state = started.state;
   const events: WireEvent[] = [started.event];
   const at = (seconds: number): number => state.benchMs + Math.round(seconds * 1000);

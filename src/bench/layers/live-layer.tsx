@@ -79,22 +79,23 @@ const outlined = (scene: BenchScene) =>
 
 const paintOneProbe = (
   pen: Pen,
-  { colour, at, isInHand }: SceneProbe,
+  probe: SceneProbe,
   other: BenchPoint | null,
   handAt: BenchPoint | null,
   targets: readonly BenchPoint[],
   viewBottom: number,
 ): void => {
+  const { colour, at, isInHand } = probe;
   const jack: BenchPoint = [
     meterJacks[colour][0],
     Math.max(meterJacks[colour][1], viewBottom + 10),
   ];
   const isMoving = isInHand && handAt !== null;
   const tip = isMoving ? handAt : at;
-  if (tip === null) return paintProbe(pen, colour, rest.probe[colour], Math.PI, jack);
+  if (tip === null) return paintProbe(pen, probe, rest.probe[colour], Math.PI, jack);
   paintProbe(
     pen,
-    colour,
+    probe,
     tip,
     probeAngle(colour, tip, other, isMoving ? [] : targets, benchSize),
     jack,

@@ -1,4 +1,5 @@
 import { useBench } from '../../simulation/bench-context.ts';
+import { holdWords } from '../panels/hold-words.ts';
 import { targetWords } from '../panels/target-words.ts';
 
 /** What is under one tip, in words. */
@@ -7,9 +8,10 @@ export const ProbeLine = ({ probe }: { probe: 'red' | 'black' }) => {
   const state = useBench((store) => store.state);
   const target = state.probes[probe];
   const words = targetWords(definition, state, target);
+  const held = holdWords[state.holds[probe]];
   return (
     <p
-      title={target === null ? undefined : `${target}, ${words.full}`}
+      title={target === null ? undefined : `${target}, ${words.full}${held}`}
       className="flex min-w-0 items-center gap-1.5 text-xs text-bench-ink"
     >
       <span
@@ -20,8 +22,12 @@ export const ProbeLine = ({ probe }: { probe: 'red' | 'black' }) => {
       {target === null ? null : <b className="font-mono font-semibold">{target}</b>}
       <span aria-hidden className="truncate">
         {words.short}
+        {held}
       </span>
-      <span className="sr-only">{words.full}</span>
+      <span className="sr-only">
+        {words.full}
+        {held}
+      </span>
     </p>
   );
 };

@@ -4,6 +4,7 @@ import { describeTarget } from '../../../shared/oven/targets.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
 import type { BenchScene } from '../geometry/bench-scene.ts';
 import { seatedEnds } from '../panels/seated-ends.ts';
+import { holdWords } from '../panels/hold-words.ts';
 import { targetWords } from '../panels/target-words.ts';
 
 /** One thing on the bench that a tap can meet, as a button. */
@@ -93,15 +94,15 @@ function targetEntry(
 
 /** What sits on a target now, in words. */
 export function marksOn(
-  { probes, discharge, battery, oven, labels }: BenchState,
+  { probes, holds, discharge, battery, oven, labels }: BenchState,
   target: string,
 ): string[] {
   const on = (is: boolean, words: string): string[] => (is ? [words] : []);
   const ends = seatedEnds(oven, target);
   const label = labels[target];
   return [
-    ...on(probes.red === target, 'red probe on it'),
-    ...on(probes.black === target, 'black probe on it'),
+    ...on(probes.red === target, `red probe on it${holdWords[holds.red]}`),
+    ...on(probes.black === target, `black probe on it${holdWords[holds.black]}`),
     ...on(discharge.clip === target, 'discharge clip on it'),
     ...on(discharge.tip === target, 'discharge tip on it'),
     ...on(battery.neg === target, 'battery negative on it'),

@@ -1,5 +1,6 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import type { CapturedReading } from '../../../shared/bench/record.ts';
+import { heldWords } from '../../../shared/bench/test-leads.ts';
 import { partOfReading } from './part-of-target.ts';
 
 /** Captured readings under the part they say something about; under `''` those that fit none. */
@@ -28,6 +29,7 @@ export function readingText(reading: CapturedReading, settingName: string): stri
   const more = [
     reading.isBeeping ? 'beeps' : '',
     reading.isRelative ? 'REL' : '',
+    heldWords(reading.held),
     reading.isSettled ? '' : 'not settled',
   ].filter(Boolean);
   return [`${shown} on ${settingName}`, ...more].join(', ');

@@ -5,6 +5,7 @@ import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 import { describeTarget, liftedEnds, terminalsOf } from '../../../shared/oven/targets.ts';
 import type { Selection } from '../../simulation/bench-store.ts';
 import type { Hand } from '../tools/tool.ts';
+import { holdChoices } from './hold-words.ts';
 import { seatedEnds } from './seated-ends.ts';
 
 /** One thing that can be done with what is picked out. */
@@ -62,6 +63,7 @@ function targetChoices(definition: OvenDefinition, state: BenchState, ref: strin
         ...toolChoices(state, ref),
       ],
     },
+    ...holdGroups(state, ref),
     {
       title: isEnd ? 'This lead end' : 'Leads here',
       choices: isEnd
@@ -115,6 +117,22 @@ const probeChoice = (state: BenchState, probe: 'red' | 'black', target: string):
     { type: 'PlaceProbe', data: { probe, target } },
     { type: 'RemoveProbe', data: { probe } },
   );
+
+/** A probe that sits here, and how else it could be held. */
+const holdGroups = (state: BenchState, target: string): ChoiceGroup[] =>
+  (['red', 'black'] as const)
+    .filter((probe) => state.probes[probe] === target)
+    .map((probe) => ({
+      title: `Hold the ${probe} probe`,
+      choices: holdChoices
+        .filter(([hold]) => hold !== state.holds[probe])
+        .map(([hold, words]) => ({
+          kind: 'command',
+          label: `${words} for the ${probe} probe`,
+          short: words,
+          command: { type: 'HoldProbe', data: { probe, hold } },
+        })),
+    }));
 
 const labelChoice = (state: BenchState, end: string, text: string): Choice => {
   const now = state.labels[end];

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { useBench } from '../../simulation/bench-context.ts';
+import { HoldChoice } from './hold-choice.tsx';
 import { ToolButton } from './tool-button.tsx';
 
 const Card = ({ title, more, children }: { title: string; more?: string; children: ReactNode }) => (
@@ -27,25 +28,29 @@ const Dot = ({ probe }: { probe: 'red' | 'black' }) => (
 );
 
 const useConnected = () => {
-  const probes = useBench(({ state }) => state.probes);
   const discharge = useBench(({ state }) => state.discharge);
   const battery = useBench(({ state }) => state.battery);
-  return { probes, discharge, battery };
+  return { discharge, battery };
 };
 
-const ProbeTools = () => {
-  const { probes } = useConnected();
+const ProbeTool = ({ probe, shortcut }: { probe: 'red' | 'black'; shortcut: string }) => {
+  const target = useBench(({ state }) => state.probes[probe]);
   return (
-    <>
-      <ToolButton hand={{ kind: 'probe', probe: 'red' }} target={probes.red} shortcut="r">
-        <Dot probe="red" /> {probes.red === null ? 'red' : ''}
+    <div className="grid min-w-0 grid-cols-[minmax(0,1fr)_auto] gap-1">
+      <ToolButton hand={{ kind: 'probe', probe }} target={target} shortcut={shortcut}>
+        <Dot probe={probe} /> {target === null ? probe : ''}
       </ToolButton>
-      <ToolButton hand={{ kind: 'probe', probe: 'black' }} target={probes.black} shortcut="b">
-        <Dot probe="black" /> {probes.black === null ? 'black' : ''}
-      </ToolButton>
-    </>
+      <HoldChoice probe={probe} />
+    </div>
   );
 };
+
+const ProbeTools = () => (
+  <>
+    <ProbeTool probe="red" shortcut="r" />
+    <ProbeTool probe="black" shortcut="b" />
+  </>
+);
 
 const DischargeTools = () => {
   const { discharge } = useConnected();

@@ -1,4 +1,5 @@
 import type { ServiceMeasurement } from '../../../shared/oven/oven.ts';
+import { heldWords } from '../../../shared/bench/test-leads.ts';
 import { Badge } from '../../components/badge.tsx';
 import { benchClock } from '../../components/bench-clock.ts';
 import type { Column } from '../../components/table/column.ts';
@@ -43,6 +44,9 @@ export const readingColumns = (goTo: (sequence: number) => void): readonly Colum
     cell: ({ reading }) => (
       <span className="font-mono text-sm">
         {reading.red} – {reading.black}
+        {reading.held ? (
+          <span className="block font-sans text-ink-2">{heldWords(reading.held)}</span>
+        ) : null}
       </span>
     ),
   },

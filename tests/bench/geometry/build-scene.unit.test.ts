@@ -83,10 +83,11 @@ describe('hand and tools', () => {
   it('puts a probe exactly on what it touches, also on a lifted end', () => {
     const scene = sceneOf(withLeads({ 'W23/a': null }), {
       probes: { red: 'W23/a', black: 'T1.core' },
+      holds: { red: 'handle', black: 'clip' },
     });
     expect(scene.probes).toEqual([
-      { colour: 'red', at: terminalOf(scene, 'W23/a')!.at, isInHand: false },
-      { colour: 'black', at: placeOf('T1.core'), isInHand: false },
+      { colour: 'red', at: terminalOf(scene, 'W23/a')!.at, isInHand: false, hold: 'handle' },
+      { colour: 'black', at: placeOf('T1.core'), isInHand: false, hold: 'clip' },
     ]);
     expect(terminalOf(scene, 'T1.core')!.probes).toEqual(['black']);
   });

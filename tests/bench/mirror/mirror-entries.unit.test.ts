@@ -74,6 +74,7 @@ it('says in the name what sits on a terminal', () => {
     oven: lifted('W24/a'),
     labels: { 'W24/a': '2 cap' },
     probes: { red: 'C1.2', black: 'W24/a' },
+    holds: { red: 'handle', black: 'clip' },
     discharge: { clip: 'CH.2', tip: null },
   };
   const nameOf = (ref: string) => entriesOf(state).find((one) => one.ref === ref)?.name;
@@ -81,7 +82,7 @@ it('says in the name what sits on a terminal', () => {
     'C1.2, High-voltage capacitor, diode side, red probe on it, W27 on it',
   );
   expect(nameOf('W24/a')).toBe(
-    'W24/a, capacitor to magnetron, end for C1.2, black probe on it, labelled 2 cap',
+    'W24/a, capacitor to magnetron, end for C1.2, black probe on it, through a clip lead, labelled 2 cap',
   );
   expect(nameOf('CH.2')).toContain('discharge clip on it');
 });

@@ -1,10 +1,11 @@
 import { along, type BenchPoint } from '../../geometry/bench-point.ts';
-import type { ProbeColour } from '../../geometry/bench-scene.ts';
+import type { SceneProbe } from '../../geometry/bench-scene.ts';
 import { probeLength } from '../../geometry/probe-pose.ts';
 import { insulation, material, palette, shade } from '../../../styles/tokens.ts';
+import { paintClip } from '../battery/paint-clip.ts';
 import { paintWire } from '../lead/paint-curve.ts';
 import { box, chain, disc, fill, rule, stroke } from '../paint/outline.ts';
-import { apart, linear, type Pen } from '../paint/pen.ts';
+import { apart, cast, linear, type Pen } from '../paint/pen.ts';
 
 const colours = {
   red: { body: [insulation.red[0], palette['probe-red'], insulation.red[2]], wire: insulation.red },
@@ -14,18 +15,22 @@ const colours = {
   },
 } as const;
 
+/** From the jaws of a clip lead to the tip it takes in its sleeve, units. */
+const clipLength = 34;
+
 /**
- * A test probe: its steel tip exactly on `tip`, its handle away from it in direction `angle` (radians),
- * its cable in one sweep to the meter.
+ * A test probe: its steel tip, or the clip lead on it, exactly `at` what it touches, its handle away from
+ * it in direction `angle` (radians), its cable in one sweep to the meter.
  */
 export const paintProbe = (
   pen: Pen,
-  colour: ProbeColour,
-  tip: BenchPoint,
+  { colour, hold }: Pick<SceneProbe, 'colour' | 'hold'>,
+  at: BenchPoint,
   angle: number,
   jack: BenchPoint,
 ): void => {
   const { body, wire } = colours[colour];
+  const tip = hold === 'clip' ? along(at, angle, clipLength) : at;
   const tail = along(tip, angle, probeLength - 4);
   const out = along(tip, angle, probeLength + 46);
   const sag: BenchPoint = [
@@ -39,7 +44,9 @@ export const paintProbe = (
     pen.rotate(angle);
     paintTip(pen);
     paintHandle(pen, body);
+    if (hold === 'fingers') paintFingers(pen);
   });
+  if (hold === 'clip') paintClip(pen, at, angle, wire);
 };
 
 const paintHandleShadow = (pen: Pen, angle: number): void =>
@@ -94,4 +101,24 @@ const paintHandle = (pen: Pen, tones: readonly string[]): void => {
   for (let i = 0; i < 4; i++) rule(pen, [114 + i * 4, -4.4, 114 + i * 4, 4.4], tones[2]!, 1);
   rule(pen, [46, -4, 110, -4.6], shade.sheen, 1.6);
   disc(pen, [0, 0, 0.9], material.tin[3]);
+};
+
+/** Thumb and finger on the bare metal, where they do not belong. */
+const paintFingers = (pen: Pen): void => {
+  for (const side of [-1, 1] as const) {
+    apart(pen, () => {
+      pen.translate(17, side * 6.5);
+      pen.rotate(side * 0.5);
+      cast(pen, 2.4, () => box(pen, [-9, -6.5, 36, 13], 6.5, shade.soft));
+      box(
+        pen,
+        [-9, -6.5, 36, 13],
+        6.5,
+        linear(pen, [0, -6.5, 0, 6.5], material.skin.slice(0, 3)),
+        material.skin[2],
+        0.8,
+      );
+      box(pen, [-7, -3.4, 8, 6.8], 3, material.skin[0], material.skin[2], 0.5);
+    });
+  }
 };

@@ -1,0 +1,15 @@
+import type { ProbeHold } from '../../../shared/bench/record.ts';
+
+/** Behind a probe and where it is; the handle is the usual and needs no word. */
+export const holdWords: Readonly<Record<ProbeHold, string>> = {
+  handle: '',
+  clip: ', through a clip lead',
+  fingers: ', tip in the fingers',
+};
+
+/** As choices, the usual first. */
+export const holdChoices = [
+  ['handle', 'by handle'],
+  ['clip', 'clip lead'],
+  ['fingers', 'fingers on tip'],
+] as const satisfies readonly (readonly [ProbeHold, string])[];
