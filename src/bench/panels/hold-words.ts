@@ -9,7 +9,7 @@ export const holdWords: Readonly<Record<ProbeHold, string>> = {
 
 /** As choices, the usual first. */
 export const holdChoices = [
-  ['handle', 'by handle'],
+  ['handle', 'handle'],
   ['clip', 'clip lead'],
-  ['fingers', 'fingers on tip'],
+  ['fingers', 'fingers'],
 ] as const satisfies readonly (readonly [ProbeHold, string])[];

@@ -36,12 +36,9 @@ const useConnected = () => {
 const ProbeTool = ({ probe, shortcut }: { probe: 'red' | 'black'; shortcut: string }) => {
   const target = useBench(({ state }) => state.probes[probe]);
   return (
-    <div className="grid min-w-0 grid-cols-[minmax(0,1fr)_auto] gap-1">
-      <ToolButton hand={{ kind: 'probe', probe }} target={target} shortcut={shortcut}>
-        <Dot probe={probe} /> {target === null ? probe : ''}
-      </ToolButton>
-      <HoldChoice probe={probe} />
-    </div>
+    <ToolButton hand={{ kind: 'probe', probe }} target={target} shortcut={shortcut}>
+      <Dot probe={probe} /> {target === null ? probe : ''}
+    </ToolButton>
   );
 };
 
@@ -49,6 +46,17 @@ const ProbeTools = () => (
   <>
     <ProbeTool probe="red" shortcut="r" />
     <ProbeTool probe="black" shortcut="b" />
+  </>
+);
+
+const HoldChoices = () => (
+  <>
+    {(['red', 'black'] as const).map((probe) => (
+      <span key={probe} className="flex min-w-0 items-center gap-1">
+        <Dot probe={probe} />
+        <HoldChoice probe={probe} />
+      </span>
+    ))}
   </>
 );
 
@@ -98,15 +106,18 @@ export const ToolCards = () => {
       <Card title="Battery 12.6 V">
         <BatteryTools />
       </Card>
-      <Card title="Lead labels" more={`${labels}`}>
-        <ToolButton hand={{ kind: 'label' }}>label</ToolButton>
+      <Card title="Tips held by">
+        <HoldChoices />
       </Card>
-      <Card title="Abrasive pad">
-        <ToolButton hand={{ kind: 'pad' }}>pad</ToolButton>
-      </Card>
-      <Card title="Screwdriver">
-        <ToolButton hand={{ kind: 'screwdriver', from: null }}>blade</ToolButton>
-      </Card>
+      <div className="col-span-2 grid min-w-0">
+        <Card title="Labels, pad, screwdriver" more={`${labels} labelled`}>
+          <div className="grid grid-cols-2 gap-1">
+            <ToolButton hand={{ kind: 'label' }}>label</ToolButton>
+            <ToolButton hand={{ kind: 'pad' }}>pad</ToolButton>
+          </div>
+          <ToolButton hand={{ kind: 'screwdriver', from: null }}>screwdriver blade</ToolButton>
+        </Card>
+      </div>
     </div>
   );
 };
@@ -129,6 +140,9 @@ export const ToolRow = () => (
   >
     <RowGroup title="Probes">
       <ProbeTools />
+    </RowGroup>
+    <RowGroup title="Held by">
+      <HoldChoices />
     </RowGroup>
     <RowGroup title="Discharge">
       <DischargeTools />
