@@ -1,4 +1,5 @@
 import type { Step } from '../../shared/bench/perform.ts';
+import type { DemoAttempt } from './demo-attempt.ts';
 import {
   cause,
   closeUp,
@@ -17,14 +18,7 @@ import {
   verdict,
   zero,
 } from './steps.ts';
-
-/** A trainee of the demo school and what they did on a job; the bench gives the readings. */
-export interface DemoAttempt {
-  email: string;
-  /** file name of the job in `scenarios/jobs` */ job: string;
-  seed: number;
-  steps: readonly Step[];
-}
+import { timerAttempts } from './timer-attempts.ts';
 
 const carefulDiode: Step[] = [
   ...openUp,
@@ -98,7 +92,7 @@ const shockedHeater: Step[] = [
   handIn,
 ];
 
-/** One careful, one hurried, one who forgot the capacitor. */
+/** One careful, one hurried, one who forgot the capacitor; then expert work on the oven with a timer. */
 export const demoAttempts: readonly DemoAttempt[] = [
   { email: 'tom@northgate.example', job: 'loud-hum-no-heat', seed: 417, steps: carefulDiode },
   { email: 'mina@northgate.example', job: 'dead-no-display', seed: 2208, steps: hurriedBoard },
@@ -108,4 +102,5 @@ export const demoAttempts: readonly DemoAttempt[] = [
     seed: 91,
     steps: shockedHeater,
   },
+  ...timerAttempts,
 ];

@@ -87,4 +87,18 @@ export const closeUp: Step[] = [
   step(4, 'PlugCord', {}),
   step(65, 'RunOven', { ordered: 60 }),
 ];
+/** What belongs to every repair before the oven goes back: door surveyed, opened slowly, earth and insulation. */
+export const finalChecks: Step[] = [
+  step(50, 'SurveyLeakage', {}),
+  step(12, 'CheckInterlocks', {}),
+  step(3, 'CloseDoor', {}),
+  step(4, 'PullCord', {}),
+  step(20, 'TestFromPlug', {}),
+];
 export const handIn: Step = step(10, 'HandIn', {});
+export const runCold: Step = step(16, 'RunOven', { ordered: 10 });
+export const openDoor: Step = step(4, 'OpenDoor', {});
+export const closeDoor: Step = step(3, 'CloseDoor', {});
+export const press = (part: string): Step => step(3, 'PressSwitch', { part });
+export const letGo = (part: string): Step => step(2, 'ReleaseSwitch', { part });
+export const clean = (terminal: string): Step => step(12, 'CleanSpot', { terminal });

@@ -18,6 +18,8 @@ const touchSeconds = 0.3;
 /** V DC and C: above both a touch is a hazard. ENGINE section 5; 45 uC as quoted from IEC 60335-1 (FACTS 1.3, second hand). */
 const touchVolts = 60;
 const touchCharge = 45e-6;
+/** C that a meter on ohms takes up without harm or a warning. Judgement. */
+const noticedCharge = 5e-6;
 /** V AC rms */
 const touchVoltsAlternating = 30;
 /** Ohm, a screwdriver blade with its two contacts (FACTS 1.2 takes 2 Ohm for the loop) */
@@ -29,13 +31,20 @@ export interface Contact {
   storage: Storage;
 }
 
+/** Charge stands on capacitors alone: what a winding still carries of a meter's current is no danger. */
+const still = (state: BenchState): BenchState => ({
+  ...state,
+  storage: { voltages: state.storage.voltages, currents: {} },
+});
+
 /** V of stored charge between two targets, before anything bridges them. */
 export function standingVolts(
   setup: Setup,
   state: BenchState,
   [a, b]: readonly [TargetRef, TargetRef],
 ): number {
-  const result = integrate(circuitOf(setup, state), state.storage, 0, [pairOf(state, a, b)]);
+  const { storage } = still(state);
+  const result = integrate(circuitOf(setup, state), storage, 0, [pairOf(state, a, b)]);
   return result.samples.values[0]?.at(-1) ?? 0;
 }
 
@@ -134,6 +143,18 @@ export function short(
   return [{ kind: 'capacitor-shorted', at: pair[0], to: pair[1], volts, charge, energy }];
 }
 
+/** Whether more stands behind stored volts than the nanofarads of a filter, which empty into a meter unnoticed. */
+const isBacked = (
+  setup: Setup,
+  state: BenchState,
+  pair: readonly [TargetRef, TargetRef],
+  live: number,
+): boolean => {
+  if (live > touchVoltsAlternating) return true;
+  const withoutMeter = { ...still(state), probes: { red: null, black: null } };
+  return contact(setup, withoutMeter, pair, bodyResistance, touchSeconds).charge > noticedCharge;
+};
+
 /** What the meter's tips meet, the moment they land or its setting changes. */
 export function meterHazards(setup: Setup, state: BenchState): HazardFound[] {
   const { red, black } = state.probes;
@@ -156,6 +177,7 @@ export function meterHazards(setup: Setup, state: BenchState): HazardFound[] {
   const isDriving = setting.function !== 'dc-volts' && setting.function !== 'ac-volts';
   const { limits } = setup.meter;
   if (volts > (isDriving ? limits.passive : limits.any)) return hazard('meter-destroyed');
-  if (isDriving && volts > limits.warning) return hazard('ohms-on-live');
+  if (isDriving && volts > limits.warning && isBacked(setup, state, [red, black], live))
+    return hazard('ohms-on-live');
   return live > touchVoltsAlternating ? hazard('live-probing') : [];
 }

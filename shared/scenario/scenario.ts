@@ -13,6 +13,8 @@ export const symptom = z.enum([
   'intermittent cut-out',
   'arcing in cavity',
   'weak heat',
+  'does not stop by itself',
+  'no complaint, safety check',
 ]);
 
 const line = (max: number) => z.string().trim().min(1).max(max);

@@ -31,14 +31,16 @@ export const isolate: Skill = {
 const pairOf = (moment: Moment): string =>
   `${String(moment.event.data['red'])}–${String(moment.event.data['black'])}`;
 
-/** Ohms across one part that has leads on it: to the chassis counts, bench tools do not. */
+/** Ohms across one part that has leads on it: to the chassis counts, bench tools and the plug's cord do not. */
 function needsIsolation(attempt: Attempt, moment: Moment): boolean {
   const setting = String(moment.event.data['setting']);
   if (!/^(ohms|beep|diode)/.test(setting)) return false;
   const parts = partsOf(moment).filter((part) => part !== 'CH' && part !== 'BAT');
   if (parts.length === 0) return false;
   const kinds = attempt.setup.oven.definition.parts;
-  return parts.every((ref) => kinds.some((part) => part.ref === ref && part.kind !== 'fuse'));
+  return parts.every((ref) =>
+    kinds.some(({ ref: own, kind }) => own === ref && kind !== 'fuse' && kind !== 'plug'),
+  );
 }
 
 function isIsolated(moment: Moment): boolean {

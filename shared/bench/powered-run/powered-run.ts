@@ -35,7 +35,8 @@ export function poweredRun(
   const timers = refsOf(oven, 'mechanical-timer');
   const before = first === last ? humming : hum(oven, first.ran);
   const hood = hoodOf(oven, state, first.isDisplayLit ?? true);
-  const isSupplied = first === last || humming !== 'none';
+  const isCutOff = humming === 'none' || stretches.slice(0, -1).some(isHighVoltageBlown(oven));
+  const cutOff = first !== last && isCutOff ? last.seconds : 0;
   return {
     ordered,
     seconds: round(
@@ -58,11 +59,17 @@ export function poweredRun(
       ...stretches.flatMap(({ blown }) => blown),
       ...heat.open.filter((ref) => !state.opened.includes(ref)),
     ],
-    charge: chargeLeft(oven, last.state, last.ran, isSupplied ? 0 : last.seconds),
+    charge: chargeLeft(oven, last.state, last.ran, cutOff),
     heat,
     ...(hood ? { hood } : {}),
   };
 }
+
+/** After its fuse has gone, the high-voltage side has no supply however loud the transformer is. */
+const isHighVoltageBlown =
+  (oven: DrawnOven) =>
+  ({ blown }: Stretch): boolean =>
+    refsOf(oven, 'hv-fuse').some((ref) => blown.includes(ref));
 
 /** All that is open after a run: fuses blown before and by it, and the cut-outs that are open at its end. */
 export const openAfter = (

@@ -13,6 +13,18 @@ const charged = () =>
 const hazardsOf = (events: readonly { type: string; data: object }[]) =>
   events.filter((event) => event.type === 'HazardHappened').map((event) => event.data);
 
+describe('the few nanofarads of a line filter', () => {
+  it('keep their charge against the chassis, and are no hazard to a meter on ohms', () => {
+    const hands = handsOn(setupWith());
+    hands.does('PullCord', {}, 7.0042);
+    hands.does('RemoveCover', {});
+    hands.does('SetMeter', { setting: 'dc-200' });
+    hands.does('PlaceProbe', { probe: 'red', target: 'CH.1' });
+    hands.does('SetMeter', { setting: 'ohms-200' });
+    expect(hazardsOf(hands.does('PlaceProbe', { probe: 'black', target: 'S2.COM' }))).toEqual([]);
+  });
+});
+
 describe('a capacitor that nobody discharged', () => {
   it('shocks the hand that lifts its lead, and is empty afterwards', () => {
     const hands = charged();
