@@ -53,6 +53,7 @@ export const hazardHappened = outcome({
 export const hazardWords: Record<z.infer<typeof hazard>['kind'], string> = {
   shock: 'shock',
   'mains-exposed': 'mains within reach',
+  'microwave-leakage': 'microwaves past the door',
   'live-probing': 'probing live',
   'capacitor-shorted': 'charged capacitor shorted, bang',
   'ohms-on-live': 'ohms on a live circuit',
@@ -72,6 +73,7 @@ function afterHazard(setup: Setup, state: BenchState, data: z.infer<typeof hazar
     case 'meter-destroyed':
       return { ...state, meter: { ...state.meter, isDestroyed: true } };
     case 'mains-exposed':
+    case 'microwave-leakage':
     case 'live-probing':
     case 'ohms-on-live':
       return state;

@@ -47,6 +47,7 @@ export type Cause = z.infer<typeof cause>;
 export const hazardKind = z.enum([
   'shock',
   'mains-exposed',
+  'microwave-leakage',
   'live-probing',
   'capacitor-shorted',
   'ohms-on-live',

@@ -1,6 +1,8 @@
 import { z } from 'zod';
 import { accept, action, refuse } from '../action.ts';
 import { beforeRun, warmthAfter } from '../cooling.ts';
+import type { HazardFound } from '../hazards.ts';
+import { leakageAround, leakageLimit } from '../safety/leakage.ts';
 import { openAfter, poweredRun } from '../powered-run/powered-run.ts';
 import type { BenchState } from '../bench-state.ts';
 import type { RunOutcome } from '../record.ts';
@@ -18,11 +20,13 @@ export const runOven = action({
   data: runOutcome,
   decide: ({ setup, state, before }, { ordered }) => {
     if (!state.isCordIn) return refuse('cord-is-out', 'The cord is out: nothing can run.');
-    const hazards = state.isCoverOn
-      ? []
-      : [{ kind: 'mains-exposed' as const, at: null, to: null, volts: 0, charge: 0, energy: 0 }];
     const { oven, celsius } = beforeRun(before, state.benchMs - ordered * 1000);
-    return accept(poweredRun(setup.oven, oven, ordered, celsius), hazards);
+    const outcome = poweredRun(setup.oven, oven, ordered, celsius);
+    const leaks = Object.values(leakageAround(setup.oven, oven, outcome.microwavePower));
+    return accept(outcome, [
+      ...(state.isCoverOn ? [] : [hazardOf('mains-exposed')]),
+      ...(Math.max(...leaks) > leakageLimit ? [hazardOf('microwave-leakage')] : []),
+    ]);
   },
   evolve: (state, outcome, setup) => {
     const opened = openedBy(setup, state, outcome);
@@ -36,6 +40,15 @@ export const runOven = action({
     };
   },
   describe: runLine,
+});
+
+const hazardOf = (kind: HazardFound['kind']): HazardFound => ({
+  kind,
+  at: null,
+  to: null,
+  volts: 0,
+  charge: 0,
+  energy: 0,
 });
 
 /** Runs from before heat was reckoned tell only what they opened. */

@@ -8,6 +8,9 @@
 import type { DrawnOven, OvenState } from '../../oven/oven-state.ts';
 import { partKinds } from '../../oven/parts/catalogue.ts';
 
+/** mW/cm² at 5 cm, of an oven in use */
+export const leakageLimit = 5;
+
 export const doorPlaces = [
   'top edge',
   'handle side',

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import type { hazard } from '../../../shared/bench/record.ts';
+import { leakageLimit } from '../../../shared/bench/safety/leakage.ts';
 
 export type HazardData = z.infer<typeof hazard>;
 
@@ -41,6 +42,14 @@ const byKind: Readonly<Record<HazardData['kind'], (data: HazardData) => HazardWo
           meter: noMeter,
           first: 'Pull the cord and keep the plug in sight before the cover comes off.',
         },
+  'microwave-leakage': () => ({
+    title: 'Microwaves past the door',
+    happened: `It ran while its door let through more than ${leakageLimit} mW/cm² at 5 cm, and nobody had surveyed it.`,
+    person: 'Eyes warm first and feel it last. Nothing hurts, and harm is done.',
+    meter: noMeter,
+    first:
+      'Look at the door, its hinges and its seal before a run. After any work on it go around it with the survey meter first, at arm’s length.',
+  }),
   'live-probing': (data) => ({
     title: 'Probing live',
     happened: `The tips met ${volts(data)} AC between ${pair(data)}, the cord in.`,

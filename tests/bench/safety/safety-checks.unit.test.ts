@@ -95,6 +95,15 @@ describe('safety checks on the bench', () => {
     expect(hands.does('TestFromPlug', {})[0]).toMatchObject({ type: 'PlugTested' });
   });
 
+  it('running with a door that leaks is a hazard, surveying it is not', () => {
+    const hands = handsOn(setupWith([{ on: 'CH', fault: 'door-hinge-bent' }]));
+    expect(hands.does('SurveyLeakage', {}, 30)).toHaveLength(1);
+    expect(hands.does('RunOven', { ordered: 10 }, 10)[1]).toMatchObject({
+      type: 'HazardHappened',
+      data: { kind: 'microwave-leakage' },
+    });
+  });
+
   it('a bent door is repaired and then passes', () => {
     const hands = handsOn(setupWith([{ on: 'CH', fault: 'door-hinge-bent' }]));
     const worst = () => {
