@@ -1,5 +1,5 @@
 import { useBench } from '../../simulation/bench-context.ts';
-import { holdWords } from '../panels/hold-words.ts';
+import { heldFirst, holdWords } from '../panels/hold-words.ts';
 import { targetWords } from '../panels/target-words.ts';
 
 /** What is under one tip, in words. */
@@ -21,8 +21,8 @@ export const ProbeLine = ({ probe }: { probe: 'red' | 'black' }) => {
       <span className="sr-only">{probe} probe on </span>
       {target === null ? null : <b className="font-mono font-semibold">{target}</b>}
       <span aria-hidden className="truncate">
+        {heldFirst[state.holds[probe]]}
         {words.short}
-        {held}
       </span>
       <span className="sr-only">
         {words.full}

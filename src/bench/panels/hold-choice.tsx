@@ -13,11 +13,11 @@ export const HoldChoice = ({ probe }: { probe: 'red' | 'black' }) => {
       onChange={({ target }) =>
         run({ type: 'HoldProbe', data: { probe, hold: target.value as ProbeHold } })
       }
-      className={`h-[26px] min-w-0 grow rounded border bg-mat-deep px-0.5 text-xs font-semibold text-bench-ink hover:border-bench-ink-2 ${
+      className={`h-[26px] min-w-0 grow rounded border bg-mat-deep text-xs font-semibold text-bench-ink hover:border-bench-ink-2 ${
         hold === 'fingers' ? 'border-caution' : 'border-bench-line'
       }`}
     >
-      {holdChoices.map(([value, words]) => (
+      {holdChoices.map(([value, , words]) => (
         <option key={value} value={value}>
           {words}
         </option>

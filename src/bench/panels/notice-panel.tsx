@@ -20,7 +20,7 @@ const HazardPanel = ({ data, onClose }: { data: HazardData; onClose: () => void 
   return (
     <section
       aria-label="Hazard"
-      className="pointer-events-auto grid min-h-0 w-[520px] max-w-full gap-2.5 overflow-y-auto rounded-lg border-2 border-danger-lamp bg-mat-deep p-4 text-bench-ink shadow-xl"
+      className="pointer-events-auto grid min-h-0 w-full max-w-[520px] gap-2.5 overflow-y-auto rounded-lg border-2 border-danger-lamp bg-mat-deep p-4 text-bench-ink shadow-xl"
     >
       <p className="flex items-center gap-2 text-lg font-bold">
         <OctagonAlert aria-hidden size={22} className="shrink-0 text-danger-lamp" />

@@ -52,7 +52,7 @@ const ProbeTools = () => (
 const HoldChoices = () => (
   <>
     {(['red', 'black'] as const).map((probe) => (
-      <span key={probe} className="flex min-w-0 items-center gap-1">
+      <span key={probe} className="flex min-w-0 items-center gap-0.5">
         <Dot probe={probe} />
         <HoldChoice probe={probe} />
       </span>
@@ -106,16 +106,18 @@ export const ToolCards = () => {
       <Card title="Battery 12.6 V">
         <BatteryTools />
       </Card>
-      <Card title="Tips held by">
-        <HoldChoices />
-      </Card>
-      <div className="col-span-2 grid min-w-0">
-        <Card title="Labels, pad, screwdriver" more={`${labels} labelled`}>
+      <div className="col-span-3 grid min-w-0 grid-cols-[1.25fr_1fr] gap-1.5">
+        <Card title="Tips held by">
           <div className="grid grid-cols-2 gap-1">
+            <HoldChoices />
+          </div>
+        </Card>
+        <Card title="Labels, pad, blade" more={`${labels}`}>
+          <div className="grid grid-cols-3 gap-0.5">
             <ToolButton hand={{ kind: 'label' }}>label</ToolButton>
             <ToolButton hand={{ kind: 'pad' }}>pad</ToolButton>
+            <ToolButton hand={{ kind: 'screwdriver', from: null }}>blade</ToolButton>
           </div>
-          <ToolButton hand={{ kind: 'screwdriver', from: null }}>screwdriver blade</ToolButton>
         </Card>
       </div>
     </div>
