@@ -16,10 +16,13 @@ import { predict, predictionBase, probingOf } from './prediction.ts';
 /** What `counts` holds where the display shows OL. */
 export const OVER_RANGE = 0x7fffffff;
 
+/** A line of service data, or what somebody measured somewhere else. */
+export type Measured = Pick<ServiceMeasurement, 'between' | 'setting' | 'lift' | 'clean' | 'press'>;
+
 /** The settled reading of every candidate at every measurement in every drawn oven. */
 export interface FaultTable {
   readonly candidates: readonly Candidate[];
-  readonly lines: readonly ServiceMeasurement[];
+  readonly lines: readonly Measured[];
   readonly seeds: readonly number[];
   /** counts of the display, or OVER_RANGE: candidate by candidate, line by line, seed by seed */
   readonly counts: Int32Array;
@@ -28,7 +31,7 @@ export interface FaultTable {
 export interface FaultTableInput {
   readonly definition: OvenDefinition;
   readonly candidates: readonly Candidate[];
-  readonly lines: readonly ServiceMeasurement[];
+  readonly lines: readonly Measured[];
   readonly seeds: readonly number[];
   readonly meter: MeterDefinition;
 }

@@ -10,7 +10,11 @@ export interface Position {
   readonly pressed: readonly string[];
 }
 
-export const positionOf = ({ lift, clean = [], press = [] }: ServiceMeasurement): Position => ({
+export const positionOf = ({
+  lift,
+  clean = [],
+  press = [],
+}: Pick<ServiceMeasurement, 'lift' | 'clean' | 'press'>): Position => ({
   lifted: lift,
   cleaned: clean,
   pressed: press,
