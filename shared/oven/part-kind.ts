@@ -47,6 +47,14 @@ export interface Running {
   /** elements whose power is seen or felt */ powers?: readonly string[];
 }
 
+/** Sizes a new part can be had in. One that is not the oven's own is a fault of the repair. */
+export interface Spares {
+  /** the value that is the size */ value: string;
+  unit: string;
+  sizes: readonly number[];
+  wrongSize: { fault: string; parameter: string };
+}
+
 /** One kind of part: its terminals, values, faults and circuit. One file each in `parts/`. */
 export interface PartKind {
   kind: PartKindName;
@@ -61,5 +69,6 @@ export interface PartKind {
     letGo: string;
   };
   running?: Running;
+  /** new ones of other sizes lie in the drawer too */ spares?: Spares;
   circuit: (part: PartContext) => Element[];
 }

@@ -17,6 +17,11 @@ export const repairAndVerify: Skill = {
         ({ event }) => !faulty.includes(String(event.data['part'])) && !isFuse(attempt, event),
       )
       .map((moment) => mark(-1, `${String(moment.event.data['part'])} was good.`, moment));
+    const wrong = end.oven.faults
+      .filter(({ on, fault }) => !setup.faults.some((one) => one.on === on && one.fault === fault))
+      .map(({ on }) =>
+        mark(-2, `${on} is not of the size that belongs there.`, replacementOf(attempt, on)),
+      );
     const last = ofType(attempt, 'LeadRefitted').at(-1);
     const astray = strayLeads(attempt);
     const refitted =
@@ -33,11 +38,14 @@ export const repairAndVerify: Skill = {
         : mark(0, 'The repair was not run again with the cover on.');
     return result(
       'repair and verify',
-      [...putRight, ...needless, refitted, covered, verified, ...checks(attempt)],
+      [...putRight, ...needless, ...wrong, refitted, covered, verified, ...checks(attempt)],
       3 * faulty.length + 8,
     );
   },
 };
+
+const replacementOf = (attempt: Attempt, on: string) =>
+  ofType(attempt, 'PartReplaced').findLast(({ event }) => event.data['part'] === on);
 
 /** A fuse goes with what blew it. */
 const isFuse = ({ setup }: Attempt, event: RecordedEvent): boolean =>

@@ -1,5 +1,7 @@
 import { z } from 'zod';
+import { formatQuantity } from '../../engine/quantities/format-quantity.ts';
 import { partRef, terminalRef } from '../../oven/oven.ts';
+import { sparesOf, wrongSize } from '../../oven/spares.ts';
 import { terminalsOf } from '../../oven/targets.ts';
 import { accept, action, refuse } from '../action.ts';
 import type { Bench } from '../action.ts';
@@ -7,6 +9,8 @@ import { touch } from '../hazards.ts';
 import { insideRefusal } from '../reach.ts';
 
 const onPart = z.strictObject({ part: partRef });
+/** `size`, of parts that come in several, SI units; absent: the oven's own */
+const fitted = z.strictObject({ part: partRef, size: z.number().positive().optional() });
 const onTerminal = z.strictObject({ terminal: terminalRef });
 
 export const inspectPart = action({
@@ -51,17 +55,20 @@ export const cleanSpot = action({
   describe: ({ terminal }) => `${terminal} cleaned to bare metal`,
 });
 
-/** A new part of the same rating. Its connectors must be off first; a fuse only snaps into its holder. */
+/** A new part, of a size that may be the wrong one. Its connectors must be off first; a fuse only snaps into its holder. */
 export const replacePart = action({
   command: 'ReplacePart',
   event: 'PartReplaced',
-  input: onPart,
-  data: onPart,
+  input: fitted,
+  data: fitted,
   decide: (bench, data) => {
     const { setup, state } = bench;
     const part = partOf(bench, data.part);
     if (!part || part.kind === 'chassis') {
       return refuse('no-such-part', `There is no spare for ${data.part}.`);
+    }
+    if (data.size !== undefined && !sparesOf(part)?.sizes.includes(data.size)) {
+      return refuse('no-such-size', `There is no spare for ${data.part} of that size.`);
     }
     const inside = part.isOutside ? null : insideRefusal(bench);
     if (inside) return inside;
@@ -78,7 +85,7 @@ export const replacePart = action({
       .map((one) => one.ref);
     return accept(data, touch(setup, state, terminals));
   },
-  evolve: (state, { part }) => ({
+  evolve: (state, { part, size }, setup) => ({
     ...state,
     replaced: state.replaced.includes(part) ? state.replaced : [...state.replaced, part],
     storage: {
@@ -90,12 +97,19 @@ export const replacePart = action({
       : {}),
     oven: {
       ...state.oven,
-      faults: state.oven.faults.filter((fault) => fault.on !== part),
+      faults: [
+        ...state.oven.faults.filter((fault) => fault.on !== part),
+        ...wrongSize(setup.oven.definition, part, size),
+      ],
       opened: state.oven.opened.filter((one) => one !== part),
       cleaned: state.oven.cleaned.filter((terminal) => terminal.split('.')[0] !== part),
     },
   }),
-  describe: ({ part }) => `${part} replaced`,
+  // Capacitors and fuses are what comes in sizes, and no capacitor here reaches a millifarad.
+  describe: ({ part, size }) =>
+    size === undefined
+      ? `${part} replaced`
+      : `${part} replaced, ${formatQuantity(size, size < 1e-3 ? 'F' : 'A')}`,
 });
 
 const partOf = (bench: Bench, ref: string) =>

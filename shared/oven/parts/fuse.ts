@@ -39,6 +39,12 @@ const faults: FaultKind[] = [
 export const fuse: PartKind = {
   kind: 'fuse',
   name: 'fuse',
+  spares: {
+    value: 'rating',
+    unit: 'A',
+    sizes: [8, 10, 15, 20, 30],
+    wrongSize: { fault: 'wrong-rating', parameter: 'amps' },
+  },
   terminals: () => [
     { id: '1', name: 'line side' },
     { id: '2', name: 'load side' },

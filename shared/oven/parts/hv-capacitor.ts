@@ -73,6 +73,17 @@ const faults: FaultKind[] = [
     },
   },
   {
+    id: 'wrong-size',
+    name: 'wrong size fitted',
+    description: 'An earlier repair fitted a capacitor of another size.',
+    weight: 1,
+    source: judgement,
+    parameters: {
+      farads: { name: 'size fitted', unit: 'F', min: 0.5e-6, max: 1.4e-6, usual: 0.7e-6 },
+    },
+    look: 'The size printed on the can is not the one on the label of the chassis.',
+  },
+  {
     id: 'breaks-down',
     name: 'breaks down in use',
     description: 'The film gives way above a voltage; on an ohmmeter it is good.',
@@ -87,6 +98,12 @@ const seen = 'SM-2, SM-3, FACTS 1.3';
 export const hvCapacitor: PartKind = {
   kind: 'hv-capacitor',
   name: 'high-voltage capacitor',
+  spares: {
+    value: 'capacitance',
+    unit: 'F',
+    sizes: [0.7e-6, 0.8e-6, 0.9e-6, 0.95e-6, 1e-6, 1.1e-6, 1.2e-6],
+    wrongSize: { fault: 'wrong-size', parameter: 'farads' },
+  },
   terminals: () => [
     { id: '1', name: 'transformer side' },
     { id: '2', name: 'diode side' },
@@ -107,6 +124,9 @@ export const hvCapacitor: PartKind = {
   circuit: ({ node, inner, value, faults: applied }) => {
     const fault = readFaults(faults, applied);
     const left = fault.has('drifted') ? fault.value('drifted', 'fraction') : 1;
+    const size = fault.has('wrong-size')
+      ? fault.value('wrong-size', 'farads')
+      : value('capacitance');
     const between = (name: string, from: string, to: string, ohms: number) =>
       resistance(inner(name), node(from), node(to), ohms);
     const foil = fault.has('open') ? inner('foil') : node('1');
@@ -115,7 +135,7 @@ export const hvCapacitor: PartKind = {
         kind: 'capacitor' as const,
         name: inner('foils'),
         nodes: [foil, node('2')] as const,
-        capacitance: value('capacitance') * left,
+        capacitance: size * left,
       },
       between('bleeder', '1', '2', fault.has('bleeder-open') ? BROKEN : value('bleeder')),
       between('can-1', '1', 'can', value('toCan')),

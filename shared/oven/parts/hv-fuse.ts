@@ -54,6 +54,12 @@ const BRIDGE = 1e-3;
 export const hvFuse: PartKind = {
   kind: 'hv-fuse',
   name: 'high-voltage fuse',
+  spares: {
+    value: 'rating',
+    unit: 'A',
+    sizes: [0.5, 0.65, 0.75, 0.9, 1.2, 1.6],
+    wrongSize: { fault: 'wrong-rating', parameter: 'amps' },
+  },
   terminals: () => [
     { id: '1', name: 'transformer side' },
     { id: '2', name: 'capacitor side' },

@@ -1,7 +1,9 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
 import type { BenchCommand } from '../../../shared/bench/catalogue.ts';
-import type { OvenDefinition } from '../../../shared/oven/oven.ts';
+import { formatQuantity } from '../../../shared/engine/quantities/format-quantity.ts';
+import type { OvenDefinition, OvenPart } from '../../../shared/oven/oven.ts';
 import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
+import { sparesOf } from '../../../shared/oven/spares.ts';
 import { describeTarget, liftedEnds, terminalsOf } from '../../../shared/oven/targets.ts';
 import type { Selection } from '../../simulation/bench-store.ts';
 import type { Hand } from '../tools/tool.ts';
@@ -224,7 +226,7 @@ function partChoices(definition: OvenDefinition, state: BenchState, ref: string)
         ...press,
         ...(part.kind === 'chassis'
           ? [command('Set, clean and seal the door', { type: 'RepairDoor', data: {} })]
-          : [command('Replace it with a new one', { type: 'ReplacePart', data: { part: ref } })]),
+          : replacements(part)),
       ],
     },
     {
@@ -239,6 +241,19 @@ function partChoices(definition: OvenDefinition, state: BenchState, ref: string)
     },
   ];
   return { ref, name: part.name, groups: groups.filter(hasAny) };
+}
+
+/** Which size belongs here says the oven's own label, not this list. */
+function replacements(part: OvenPart): Choice[] {
+  const spares = sparesOf(part);
+  const data = { part: part.ref };
+  if (!spares) return [command('Replace it with a new one', { type: 'ReplacePart', data })];
+  return spares.sizes.map((size) =>
+    command(`Replace it: ${formatQuantity(size, spares.unit)}`, {
+      type: 'ReplacePart',
+      data: { ...data, size },
+    }),
+  );
 }
 
 function leadChoices(definition: OvenDefinition, state: BenchState, ref: string): Choices | null {
