@@ -8,7 +8,7 @@ export const nothingTyped: TypeAhead = { typed: '', at: -Infinity };
 
 /** ms after which typing begins anew */
 const pause = 1200;
-const shortcuts = /^[rbcd?]$/i;
+const shortcuts = /^[rbcdu?]$/i;
 
 /** One key further; null: the key is no part of a name. `/` begins a name that starts like a shortcut. */
 export function typeKey(before: TypeAhead, key: string, atMs: number): TypeAhead | null {

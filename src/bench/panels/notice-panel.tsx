@@ -40,7 +40,11 @@ const HazardPanel = ({ data, onClose }: { data: HazardData; onClose: () => void 
         </p>
         <div className="ml-auto flex gap-2">
           {isOffered ? (
-            <BenchButton isMain onClick={() => run({ type: 'StepBack', data: {} })}>
+            <BenchButton
+              isMain
+              aria-keyshortcuts="u"
+              onClick={() => run({ type: 'StepBack', data: {} })}
+            >
               Step back
             </BenchButton>
           ) : null}

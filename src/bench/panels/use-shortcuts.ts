@@ -13,6 +13,7 @@ export const shortcuts: readonly Shortcut[] = [
   { key: 'B', name: 'Take the black probe' },
   { key: 'C', name: 'Write the reading on the job sheet' },
   { key: 'D', name: 'Take the discharge lead: its clip first, then its tip' },
+  { key: 'U', name: 'Step back right after a hazard, in guided practice' },
   { key: 'Esc', name: 'Put down what is in the hand, close what is open' },
   { key: 'Arrows', name: 'Go to the neighbouring terminal' },
   { key: 'Page', name: 'Page down or up: the next or previous terminal, part or lead in the list' },
@@ -25,12 +26,13 @@ const acts: Readonly<Record<string, (store: BenchStore) => void>> = {
   r: ({ take }) => take({ kind: 'probe', probe: 'red' }),
   b: ({ take }) => take({ kind: 'probe', probe: 'black' }),
   c: ({ run }) => run({ type: 'CaptureReading', data: {} }),
+  u: ({ run }) => run({ type: 'StepBack', data: {} }),
   d: ({ take, state }) =>
     take(state.discharge.clip === null ? { kind: 'discharge-clip' } : { kind: 'discharge-tip' }),
 };
 
-/** Escape takes one step back: the hand first, then what was picked out, then the note. */
-function stepBack({ hand, selection, putDown, select, dismiss }: BenchStore): void {
+/** Escape closes one thing after the other: the hand first, then what was picked out, then the note. */
+function closeOne({ hand, selection, putDown, select, dismiss }: BenchStore): void {
   if (hand.kind !== 'empty') return putDown();
   if (selection) return select(null);
   dismiss();
@@ -45,7 +47,7 @@ export function useShortcuts(onHelp: () => void, onFind: () => void, cancel: () 
   return (event: KeyboardEvent): void => {
     if (event.ctrlKey || event.altKey || event.metaKey || event.repeat) return;
     if (event.key === 'Escape') {
-      if (!cancel()) stepBack(bench.getState());
+      if (!cancel()) closeOne(bench.getState());
       return;
     }
     if (isTyping(event.target)) return;

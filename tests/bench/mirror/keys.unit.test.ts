@@ -56,7 +56,7 @@ describe('typing a name', () => {
   });
 
   it('leaves the letters of the shortcuts alone unless a name has begun', () => {
-    for (const key of ['r', 'b', 'c', 'd', '?', 'C'])
+    for (const key of ['r', 'b', 'c', 'd', 'u', '?', 'C'])
       expect(typeKey(nothingTyped, key, 0)).toBeNull();
     expect(typeKey({ typed: 't1.', at: 0 }, 'c', 100)?.typed).toBe('t1.c');
   });

@@ -6,6 +6,7 @@ import { Mat } from '../../../src/bench/panels/mat.tsx';
 import { useShortcuts } from '../../../src/bench/panels/use-shortcuts.ts';
 import { layout } from '../../support/client-fixtures.ts';
 import { benchOnPage, openBenchOnPage } from '../../support/bench-on-page.ts';
+import { setupWith } from '../../support/bench.ts';
 import { renderOnBench } from '../../support/render-on-bench.tsx';
 
 const Place = ({ onHelp = vi.fn(), onLeave = vi.fn() }) => {
@@ -92,6 +93,26 @@ describe('the bench by keyboard', () => {
     expect(button('C1.2')).toHaveAccessibleName(
       'C1.2, High-voltage capacitor, diode side, red probe on it, W24 and W27 on it',
     );
+  });
+
+  it('steps back from a hazard, and says why not where there was none', async () => {
+    const page = benchOnPage(setupWith([], { condition: 'guided' }), {
+      isCordIn: false,
+      isCoverOn: false,
+    });
+    const { user } = renderOnBench(page, <Place />);
+    focus('C1.2');
+    await user.keyboard('u');
+    expect(page.bench.getState().notice).toMatchObject({
+      kind: 'refusal',
+      text: 'You can step back only right after a hazard.',
+    });
+    act(() => {
+      page.bench.getState().run({ type: 'PlugCord', data: {} });
+    });
+    await user.keyboard('u');
+    expect(page.bench.getState().state).toMatchObject({ isCordIn: false, hazards: [{}] });
+    expect(here()).toBe('C1.2');
   });
 
   it('opens what can be done there, and comes back to the terminal by Escape', async () => {
