@@ -1,6 +1,6 @@
 import type { z } from 'zod';
 import { checkService, namesOf } from './check-service.ts';
-import type { OvenDefinition } from './oven.ts';
+import type { OvenDefinition, OvenPart } from './oven.ts';
 import { ovenDefinition, ovenLead, ovenPart, partKindName, serviceMeasurement } from './oven.ts';
 import { partKinds } from './parts/catalogue.ts';
 import type { Problem } from './problem.ts';
@@ -69,6 +69,30 @@ function malformedRefs(input: unknown, key: string, formed: readonly { at: strin
   });
 }
 
+const controlPart = {
+  electronic: 'control-board',
+  'mechanical timer': 'mechanical-timer',
+} as const;
+
+/** What starts the oven has to be among its parts: a run asks the parts, not the word. */
+function controlProblems(
+  input: unknown,
+  parts: readonly { value: OvenPart }[],
+  unjudged: readonly string[],
+): Problem[] {
+  const control = ovenDefinition.shape.control.safeParse(valueAt(input, ['control']));
+  if (!control.success) return [];
+  const wanted = controlPart[control.data];
+  const others = Object.values(controlPart).filter((kind) => kind !== wanted);
+  const has = (kind: string): boolean => parts.some(({ value }) => value.kind === kind);
+  const missing =
+    has(wanted) || unjudged.length > 0 ? [] : [`${control.data} control needs a ${wanted}`];
+  const surplus = others
+    .filter(has)
+    .map((kind) => `${control.data} control has no place for a ${kind}`);
+  return [...missing, ...surplus].map((message) => ({ path: 'control', message }));
+}
+
 const named = (entries: readonly { at: string; value: { ref: string } }[]) =>
   entries.map(({ at, value }) => ({ at, name: value.ref }));
 
@@ -102,6 +126,7 @@ export function parseOven(input: unknown): ParsedOven {
     ...(chassis === 1
       ? []
       : [{ path: 'parts', message: `an oven has one chassis, not ${chassis}` }]),
+    ...controlProblems(input, parts, unjudged),
     ...ends,
     ...repeatedNames('measurement', ids),
     ...checkService(service, names),

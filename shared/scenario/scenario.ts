@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { appliedFault } from '../oven/fault.ts';
 
-/** The complaint rows of the trade; a job is filed under one. */
+/** The complaint rows of the trade; a job is filed under one. The last five are for what has no display, or no complaint. */
 export const symptom = z.enum([
   'dead, no display',
   'display, normal sounds, no heat',
@@ -13,6 +13,8 @@ export const symptom = z.enum([
   'intermittent cut-out',
   'arcing in cavity',
   'weak heat',
+  'dead, nothing runs',
+  'runs normally, no heat',
   'does not stop by itself',
   'no complaint, safety check',
 ]);

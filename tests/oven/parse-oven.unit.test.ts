@@ -87,6 +87,18 @@ describe('reading an oven definition', () => {
   });
 });
 
+describe('what starts an oven', () => {
+  it('has to be among its parts, and nothing else that would', () => {
+    const asTimer = problemsOf((oven) => {
+      (oven as unknown as { control: string }).control = 'mechanical timer';
+    });
+    expect(asTimer).toEqual([
+      'control: mechanical timer control needs a mechanical-timer',
+      'control: mechanical timer control has no place for a control-board',
+    ]);
+  });
+});
+
 describe('checking faults against an oven', () => {
   it('finds nothing wrong with known faults', () => {
     expect(

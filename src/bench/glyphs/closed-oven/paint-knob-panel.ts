@@ -27,14 +27,14 @@ export const paintKnobPanel = (pen: Pen, shape: ClosedOvenShape, atMinute: numbe
   rule(pen, [x + 10, y + 1.5, x + width - 10, y + 1.5], shade.gleam, 1.4);
   const middle = x + width / 2;
   const radius = Math.min(width * 0.2, height * 0.1);
-  const upper = y + height * 0.27;
-  const lower = y + height * 0.68;
+  const upper = y + height * 0.285;
+  const lower = y + height * 0.71;
   paintPowers(pen, middle, upper, radius);
   paintKnob(pen, middle, upper, radius, turnOf(3, 3));
-  title(pen, 'Power', middle, y + height * 0.085);
-  paintMinutes(pen, middle, lower, radius * 1.22);
-  paintKnob(pen, middle, lower, radius * 1.22, turnOf(atMinute, 30));
-  title(pen, 'Minutes', middle, y + height * 0.47);
+  title(pen, 'Power', middle, y + height * 0.05);
+  paintMinutes(pen, middle, lower, radius * 1.15);
+  paintKnob(pen, middle, lower, radius * 1.15, turnOf(atMinute, 30));
+  title(pen, 'Minutes', middle, y + height * 0.478);
 };
 
 /** The angle of a mark on a scale that ends at `last`. */

@@ -35,7 +35,7 @@ export const mechanicalTimerGlyph: Glyph = (pen, part) => {
     [width - 14, height - 26],
   ] as const)
     rivet(pen, x, y, 3.2);
-  const middle = width * 0.56;
+  const middle = width * 0.5;
   paintWheel(pen, [middle - 24, height * 0.56, 19], 20);
   paintWheel(pen, [middle + 4, height * 0.62, 13], 14);
   paintMotor(pen, [42, height * 0.58, 27], isTurning);
@@ -45,7 +45,7 @@ export const mechanicalTimerGlyph: Glyph = (pen, part) => {
 
 /** The shaft through the front; a blue mark where the knob stands off zero. */
 const paintShaft = (pen: Pen, width: number, height: number, isTurned: boolean): void => {
-  const x = width * 0.56;
+  const x = width * 0.67;
   box(
     pen,
     [x - 5, height - 22, 10, 28],

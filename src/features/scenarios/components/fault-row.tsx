@@ -1,7 +1,9 @@
 import { useFormContext, useWatch } from 'react-hook-form';
 import { faultsOf } from '../../../../shared/oven/check-faults.ts';
 import type { FaultKind } from '../../../../shared/oven/fault.ts';
+import { homes } from '../../../../shared/oven/misplaced-leads.ts';
 import type { OvenDefinition } from '../../../../shared/oven/oven.ts';
+import { terminalsOf } from '../../../../shared/oven/targets.ts';
 import type { ScenarioContent } from '../../../../shared/scenario/scenario.ts';
 import { Button } from '../../../components/button.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
@@ -13,6 +15,13 @@ const valuesOf = (kind: FaultKind | undefined): { values?: Record<string, number
   const values = usualValues(kind);
   return values ? { values } : {};
 };
+
+const blankIsAbsent = (chosen: string | undefined): string | undefined => chosen || undefined;
+
+const othersFor = (definition: OvenDefinition, what: 'terminal' | 'lead end'): string[] =>
+  what === 'terminal'
+    ? terminalsOf(definition).map(({ ref }) => ref)
+    : [...homes(definition).keys()];
 
 interface Props {
   index: number;
@@ -90,6 +99,20 @@ export const FaultRow = ({ index, definition, onRemove }: Props) => {
           limits={limits}
         />
       ))}
+      {kind?.other ? (
+        <SelectField
+          label={kind.other === 'terminal' ? 'Put on' : 'Swapped with'}
+          error={errors?.other?.message}
+          {...register(`faults.${index}.other`, { setValueAs: blankIsAbsent })}
+        >
+          <option value="">the nearest on the same part</option>
+          {othersFor(definition, kind.other).map((ref) => (
+            <option key={ref} value={ref}>
+              {ref}
+            </option>
+          ))}
+        </SelectField>
+      ) : null}
       {kind?.look ? <p className="text-sm text-ink-2">Seen from close: {kind.look}</p> : null}
       <div>
         <Button isSmall onClick={onRemove}>
