@@ -8,7 +8,7 @@ export interface RouteStep {
   readonly line: number;
   readonly seconds: number;
   /** class of the outcome */ readonly seen: number;
-  /** candidates that still explain everything */ readonly left: number;
+  /** candidates that still explain everything, as `count` counts them */ readonly left: number;
 }
 
 export interface Route {
@@ -33,6 +33,7 @@ export function shortestRoute(
   priors: readonly number[],
   truth: number,
   isSought: (candidate: number) => boolean,
+  count: (candidates: ReadonlySet<number>) => number = ({ size }) => size,
 ): Route {
   let at: AtBench = { ...atTheStart, isMadeSafe: true };
   let weights = [...priors];
@@ -52,7 +53,7 @@ export function shortestRoute(
     for (const c of consistent) if (!isConsistent(outcomes, c, seen)) consistent.delete(c);
     at = after(at, knowledge.lines[line.line]!);
     seconds += line.seconds;
-    steps.push({ line: line.line, seconds: line.seconds, seen, left: consistent.size });
+    steps.push({ line: line.line, seconds: line.seconds, seen, left: count(consistent) });
   }
   return { steps, seconds, certainty: certainty() };
 }

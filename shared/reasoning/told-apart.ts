@@ -39,12 +39,16 @@ export function toldApart(
   const truth = weighed.length - 1;
   const group = partition(knowledge.outcomes, weighed.length);
   const isSought = (candidate: number): boolean => group[candidate] === group[truth];
-  const { steps, seconds, certainty } = shortestRoute(knowledge, priors, truth, isSought);
+  const keys = weighed.map(({ candidate }) => keyOf(candidate.faults));
+  const count = (candidates: ReadonlySet<number>): number =>
+    new Set([...candidates].map((c) => keys[c])).size;
+  const route = shortestRoute(knowledge, priors, truth, isSought, count);
+  const { steps, seconds, certainty } = route;
   const alike = weighed.filter((_, c) => isSought(c)).map(({ candidate }) => candidate);
   return {
     alike: distinct(alike, faults),
     groups: new Set(group).size,
-    candidates: new Set(weighed.map(({ candidate }) => keyOf(candidate.faults))).size,
+    candidates: new Set(keys).size,
     makeSafeSeconds: MAKE_SAFE_SECONDS,
     route: steps.map(({ line, seconds: takes, left }) => ({
       label: knowledge.lines[line]!.label,

@@ -9,6 +9,7 @@ import { useOven } from '../../ovens/api/use-oven.ts';
 import { debriefQuery } from '../api/debrief-query.ts';
 import { useEvents } from '../api/use-events.ts';
 import { useMoment } from '../hooks/use-moment.ts';
+import { Narrowing } from './narrowing.tsx';
 import { Outcome } from './outcome.tsx';
 import { Skills } from './skills.tsx';
 
@@ -75,6 +76,14 @@ export const DebriefView = ({ attempt }: { attempt: Attempt }) => {
               replay={replay}
             />
           )}
+          {events.isSuccess ? (
+            <Narrowing
+              attempt={attempt}
+              definition={oven.data?.definition}
+              events={events.data}
+              goTo={jump}
+            />
+          ) : null}
           <TrueFaults faults={faults} definition={oven.data?.definition} />
           {events.isSuccess ? (
             <ReadingsTable

@@ -11,6 +11,7 @@ import { JobFields, type OvenChoice } from './job-fields.tsx';
 import { LeaveGuard } from './leave-guard.tsx';
 import { SaveState } from './save-state.tsx';
 import { TicketFields } from './ticket-fields.tsx';
+import { ToldApart } from './told-apart.tsx';
 
 interface Props {
   /** null: not saved yet */ scenario: Scenario | null;
@@ -36,6 +37,7 @@ export const Editor = ({ scenario, start, ovens, onCreated }: Props) => {
         <TicketFields />
         <FaultsField />
         <BenchFields />
+        <ToldApart />
         <div className="sticky bottom-0 z-10 -mx-4 flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-t border-edge bg-paper px-4 py-3">
           <SaveState editor={editor} scenario={scenario} />
           <div className="flex flex-wrap gap-2">
