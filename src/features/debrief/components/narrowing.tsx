@@ -21,7 +21,7 @@ export const Narrowing = ({ attempt, definition, events, goTo }: Props) => {
   const curve = useStepCurve(attempt, definition, events);
   if (!canReason()) return null;
   return (
-    <section aria-labelledby="narrowing" className="grid gap-3">
+    <section aria-labelledby="narrowing" className="grid min-w-0 grid-cols-1 gap-3">
       <h2 id="narrowing" className="text-xl font-bold">
         What your readings left
       </h2>

@@ -29,13 +29,15 @@ export const StepCurveChart = ({ curve }: { curve: StepCurve }) => {
     `M${x(0)} ${y(start)}`,
   );
   const last = steps.at(-1);
-  const isCrowded = steps.length > 10;
   const before = (at: number): number => steps[at - 1]?.left ?? start;
+  /** A fall that can be seen gets its number; the last one has it at the end of the line. */
+  const isMarked = (at: number): boolean =>
+    y(steps[at]!.left) - y(before(at)) > 16 && at < steps.length - 1;
   return (
     <svg
       aria-hidden
       viewBox={`0 0 ${WIDTH} ${HEIGHT}`}
-      className="h-auto w-full min-w-[560px] font-mono"
+      className="h-auto w-full max-w-[880px] min-w-[560px] font-mono"
     >
       <path d={`M${LEFT} ${HEIGHT - BOTTOM}H${WIDTH - RIGHT}`} className="stroke-edge" />
       <text x={x(0)} y={y(start) - 9} fontSize="15" className="fill-ink font-bold">
@@ -52,7 +54,7 @@ export const StepCurveChart = ({ curve }: { curve: StepCurve }) => {
       <path d={line} fill="none" strokeWidth="3" className="stroke-ink" />
       {steps.map(({ left }, at) => (
         <g key={at}>
-          {left < before(at) && !isCrowded ? (
+          {isMarked(at) ? (
             <text x={x(at + 1) + 7} y={y(left) - 7} fontSize="13.5" className="fill-ink">
               {left}
             </text>

@@ -45,7 +45,7 @@ export const ToldApart = () => {
   });
   if (!canReason() || !definition) return null;
   return (
-    <section aria-labelledby="told-apart" className="grid gap-4">
+    <section aria-labelledby="told-apart" className="grid min-w-0 grid-cols-1 gap-4">
       <h2 id="told-apart" className="text-xl font-bold">
         What can be found out
       </h2>
