@@ -67,6 +67,7 @@ export interface PartKind {
   /** what a hand can hold or turn on it, and in words how */ actuator?: {
     hold: string;
     letGo: string;
+    /** before its reference: "press S1" */ inShort: string;
   };
   running?: Running;
   /** new ones of other sizes lie in the drawer too */ spares?: Spares;

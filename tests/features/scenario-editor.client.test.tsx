@@ -171,6 +171,24 @@ describe('the scenario editor', () => {
     ]);
   });
 
+  it('lets a misplaced lead go to the nearest terminal, or to one that is chosen', async () => {
+    const api = instructor();
+    const { user } = await openEditor();
+    await user.selectOptions(inFault(1).getByLabelText('Part or lead'), 'W15');
+    await user.selectOptions(inFault(1).getByLabelText('What is wrong'), 'wrong-terminal-a');
+    await user.click(save());
+    await waitFor(() => expect(api.callsOf(saveScenario)).toHaveLength(1));
+    expect(api.callsOf(saveScenario)[0]?.body.draft.faults).toEqual([
+      { on: 'W15', fault: 'wrong-terminal-a' },
+    ]);
+    await user.selectOptions(await inFault(1).findByLabelText('Put on'), 'S1.NO');
+    await user.click(save());
+    await waitFor(() => expect(api.callsOf(saveScenario)).toHaveLength(2));
+    expect(api.callsOf(saveScenario)[1]?.body.draft.faults).toEqual([
+      { on: 'W15', fault: 'wrong-terminal-a', other: 'S1.NO' },
+    ]);
+  });
+
   it('shows what the server found wrong beside its field and loses nothing', async () => {
     instructor().on(saveScenario, {
       status: 400,

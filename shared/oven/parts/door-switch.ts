@@ -100,7 +100,11 @@ export const doorSwitch: PartKind = {
     },
   },
   faults,
-  actuator: { hold: 'Hold the actuator pressed', letGo: 'Let the actuator go' },
+  actuator: {
+    hold: 'Hold the actuator pressed',
+    letGo: 'Let the actuator go',
+    inShort: 'press',
+  },
   circuit: ({ node, inner, value, variant, faults: applied, isActuated, isPressed }) => {
     const fault = readFaults(faults, applied);
     const other = throwOf(variant);

@@ -154,7 +154,11 @@ export const mechanicalTimer: PartKind = {
     },
   },
   faults,
-  actuator: { hold: 'Turn the knob up', letGo: 'Turn the knob back to zero' },
+  actuator: {
+    hold: 'Turn the knob up',
+    letGo: 'Turn the knob back to zero',
+    inShort: 'turn up',
+  },
   running: {
     isSwitchedOn: true,
     turns: { winding: 'motor', stoppedBy: ['gear-stripped'] },

@@ -1,7 +1,15 @@
 import { settingOf } from '../../../shared/instruments/meters.ts';
+import type { OvenDefinition } from '../../../shared/oven/oven.ts';
+import { partKinds } from '../../../shared/oven/parts/catalogue.ts';
 import { useBench } from '../../simulation/bench-context.ts';
 import { expectedText } from './expected-text.ts';
 import { PanelSection } from './panel-section.tsx';
+
+/** What a hand does to this part for the measurement. */
+const handOn = ({ parts }: OvenDefinition, ref: string): string => {
+  const kind = parts.find((part) => part.ref === ref)?.kind;
+  return (kind && partKinds[kind].actuator?.inShort) ?? 'press';
+};
 
 /** The maker's figures: where to measure, and what a good part gives. */
 export const ServiceData = () => {
@@ -25,7 +33,7 @@ export const ServiceData = () => {
                   {one.between.join(' – ')}
                   {one.lift.length > 0 ? `, lift ${one.lift.join(' ')}` : ''}
                   {one.clean?.length ? `, clean ${one.clean.join(' ')}` : ''}
-                  {one.press?.length ? `, press ${one.press.join(' ')}` : ''}
+                  {(one.press ?? []).map((ref) => `, ${handOn(definition, ref)} ${ref}`).join('')}
                 </span>
               </th>
               <td className="py-1.5 text-right font-mono text-xs leading-5 font-semibold whitespace-nowrap">

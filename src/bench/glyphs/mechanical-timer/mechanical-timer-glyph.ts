@@ -45,7 +45,7 @@ export const mechanicalTimerGlyph: Glyph = (pen, part) => {
 
 /** The shaft through the front; a blue mark where the knob stands off zero. */
 const paintShaft = (pen: Pen, width: number, height: number, isTurned: boolean): void => {
-  const x = width * 0.67;
+  const x = width * 0.63;
   box(
     pen,
     [x - 5, height - 22, 10, 28],
