@@ -1,5 +1,10 @@
 import type { ProbeHold } from '../../../shared/bench/record.ts';
-import type { OvenLead, PartKindName, TargetRef } from '../../../shared/oven/oven.ts';
+import type {
+  OvenDefinition,
+  OvenLead,
+  PartKindName,
+  TargetRef,
+} from '../../../shared/oven/oven.ts';
 import type { BenchBox } from './bench-box.ts';
 import type { BenchPoint } from './bench-point.ts';
 
@@ -92,6 +97,7 @@ export interface SceneBattery {
 /** Everything the canvas draws. A value: the canvas keeps nothing of its own. */
 export interface BenchScene {
   chassis: BenchBox;
+  ovenType: OvenDefinition['type'];
   isCoverOn: boolean;
   isDoorOpen: boolean;
   isCordIn: boolean;

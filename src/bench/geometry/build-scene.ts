@@ -24,6 +24,7 @@ export const buildScene = (drawing: BenchDrawing, oven: OvenState, hand: BenchHa
     terminals.find((terminal) => terminal.target === target)?.at ?? null;
   return {
     chassis: drawing.layout.chassis,
+    ovenType: drawing.definition.type,
     isCoverOn: hand.isCoverOn,
     isDoorOpen: !oven.isDoorClosed,
     isCordIn: hand.isCordIn,

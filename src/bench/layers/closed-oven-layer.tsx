@@ -1,7 +1,7 @@
 import { memo, useCallback } from 'react';
 import type { Camera } from '../camera/camera.ts';
 import type { BenchScene, ScenePart } from '../geometry/bench-scene.ts';
-import { paintClosedOven } from '../glyphs/closed-oven/paint-closed-oven.ts';
+import { closedOvens } from '../glyphs/closed-oven/closed-ovens.ts';
 import { Painted } from '../glyphs/paint/painted.tsx';
 import type { Pen } from '../glyphs/paint/pen.ts';
 import { BenchLayer } from './bench-layer.tsx';
@@ -25,14 +25,21 @@ export const ClosedOvenLayer = memo(function ClosedOvenLayer({
     at: scene.chassis.at,
     size: scene.chassis.size,
     isDoorOpen: scene.isDoorOpen,
-    isLampLit: scene.parts.some(({ kind, isLit }) => kind === 'lamp' && isLit),
+    isLampLit: scene.parts.some(
+      ({ kind, variant, isLit }) => kind === 'lamp' && variant !== 'cooktop' && isLit,
+    ),
+    isHoodLit: scene.parts.some(({ variant, isLit }) => variant === 'cooktop' && isLit),
+    isVentTurning: scene.parts.some(
+      ({ variant, isTurning }) => variant === 'vent-fan' && isTurning,
+    ),
     isTurning: scene.parts.some(({ variant, isTurning }) => variant === 'turntable' && isTurning),
     display:
       scene.parts.find(({ kind, isLit }) => kind === 'control-board' && isLit)?.stamp[0] ?? null,
     atMinute: minuteOf(scene.parts.find(({ kind }) => kind === 'mechanical-timer')),
     isDisplayLit: scene.parts.some(({ kind, isLit }) => kind === 'control-board' && isLit),
   });
-  const paint = useCallback((pen: Pen) => paintClosedOven(pen, oven), [oven]);
+  const { ovenType } = scene;
+  const paint = useCallback((pen: Pen) => closedOvens[ovenType](pen, oven), [oven, ovenType]);
   return (
     <BenchLayer camera={camera}>
       <Painted paint={paint} />

@@ -4,24 +4,15 @@ import { material, shade } from '../../../styles/tokens.ts';
 import { brushed, louvres, screw } from '../paint/hardware.ts';
 import { box, chain, fill, rule, stroke, type Rect } from '../paint/outline.ts';
 import { linear, raised, type Pen } from '../paint/pen.ts';
+import type { PaintClosedOven } from './closed-oven.ts';
 import { paintDoor, paintInside, paintOpenDoor } from './paint-door.ts';
 import { paintKnobPanel } from './paint-knob-panel.ts';
 import { paintPanel } from './paint-panel.ts';
 
-export interface ClosedOven extends BenchBox {
-  isDoorOpen: boolean;
-  isLampLit: boolean;
-  isTurning: boolean;
-  isDisplayLit: boolean;
-  /** what the display shows; null: its own */ display: string | null;
-  /** where the timer's knob stands, minutes; null: the oven has keys and a display */
-  atMinute: number | null;
-}
-
 const rectOf = ({ at, size }: BenchBox): Rect => [at[0], at[1], size[0], size[1]];
 
 /** The oven with its cover on, seen from the front and a little from above. */
-export const paintClosedOven = (pen: Pen, oven: ClosedOven): void => {
+export const paintClosedOven: PaintClosedOven = (pen, oven) => {
   const shape = closedOvenShape(oven);
   paintFeet(pen, shape);
   paintTop(pen, shape);

@@ -27,7 +27,7 @@ export const doorSwitchGlyph: Glyph = (pen, part) => {
   rivet(pen, 20, height - 13, 3);
   rivet(pen, right - 8, 13, 3);
   contactSign(pen, right - 26, height / 2 + 5, isActuated !== 'NC' in terminals);
-  lever(pen, height, isActuated);
+  lever(pen, height, isActuated && (isPressed || !looks.includes('bent')));
   if (isPressed) {
     disc(pen, [4, height / 2, 8], palette.act, palette.sheet, 2);
     chain(pen, [

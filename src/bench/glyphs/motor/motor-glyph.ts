@@ -1,7 +1,12 @@
 import type { Glyph } from '../glyph.ts';
 import { paintFan } from './paint-fan.ts';
 import { paintTurntableMotor } from './paint-turntable-motor.ts';
+import { paintVentFan } from './paint-vent-fan.ts';
 
-/** A motor as what it turns: the fan in its shroud, or the geared motor under the turntable. */
-export const motorGlyph: Glyph = (pen, part) =>
-  part.variant === 'turntable' ? paintTurntableMotor(pen, part) : paintFan(pen, part);
+/** Motors by what they turn; one that names nothing is a fan in its shroud. */
+const motors: Readonly<Record<string, Glyph>> = {
+  turntable: paintTurntableMotor,
+  'vent-fan': paintVentFan,
+};
+
+export const motorGlyph: Glyph = (pen, part) => (motors[part.variant ?? ''] ?? paintFan)(pen, part);
