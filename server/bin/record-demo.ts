@@ -1,10 +1,11 @@
 import { readFile, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
-import { perform } from '../../shared/bench/perform.ts';
+import { perform, type Step } from '../../shared/bench/perform.ts';
 import { makeSetup } from '../../shared/bench/setup.ts';
 import { ovenDefinition } from '../../shared/oven/oven.ts';
 import { scenarioContent } from '../../shared/scenario/scenario.ts';
 import { demoAttempts } from '../demo/attempts.ts';
+import { experts } from '../demo/experts/experts.ts';
 import type { Recording } from '../demo/recording.ts';
 import { findProjectRoot } from '../project-root.ts';
 
@@ -13,14 +14,24 @@ const scenarios = join(findProjectRoot(), 'scenarios');
 const read = async (...path: string[]): Promise<unknown> =>
   JSON.parse(await readFile(join(scenarios, ...path), 'utf8'));
 
-for (const [index, { email, job, seed, steps }] of demoAttempts.entries()) {
+/** Does the steps and writes what happened; `file` below the scenarios' folder. */
+async function record(
+  work: Omit<Recording, 'schemaVersion' | 'events'>,
+  steps: readonly Step[],
+  ...file: string[]
+) {
+  const { job, seed } = work;
   const content = scenarioContent.parse(await read('jobs', `${job}.json`));
   const definition = ovenDefinition.parse(await read('ovens', `${content.oven}.json`));
   const setup = makeSetup({ ...content, definition, seed });
   const performed = perform(setup, steps);
   if (!performed.ok) throw new Error(`${job}, step ${performed.step}: ${performed.message}`);
-  const recording: Recording = { schemaVersion: 1, email, job, seed, events: performed.events };
-  const file = join(scenarios, 'recordings', `${index + 1}-${job}.json`);
-  await writeFile(file, `${JSON.stringify(recording, null, 1)}\n`);
+  const recording: Recording = { schemaVersion: 1, ...work, events: performed.events };
+  await writeFile(join(scenarios, ...file), `${JSON.stringify(recording, null, 1)}\n`);
   process.stdout.write(`${job}: ${performed.events.length} events\n`);
 }
+
+for (const [index, { steps, ...work }] of demoAttempts.entries())
+  await record(work, steps, 'recordings', `${index + 1}-${work.job}.json`);
+for (const { steps, ...work } of experts)
+  await record({ ...work, email: 'an expert' }, steps, 'expert-recordings', `${work.job}.json`);

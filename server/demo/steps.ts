@@ -3,10 +3,11 @@ import type { Step } from '../../shared/bench/perform.ts';
 
 type DataOf<T extends BenchCommand['type']> = Extract<BenchCommand, { type: T }>['data'];
 
-const step = <T extends BenchCommand['type']>(seconds: number, type: T, data: DataOf<T>): Step => [
-  seconds,
-  { type, data } as BenchCommand,
-];
+export const step = <T extends BenchCommand['type']>(
+  seconds: number,
+  type: T,
+  data: DataOf<T>,
+): Step => [seconds, { type, data } as BenchCommand];
 
 export const openUp: Step[] = [
   step(16, 'RunOven', { ordered: 10 }),
