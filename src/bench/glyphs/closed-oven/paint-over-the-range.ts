@@ -5,7 +5,7 @@ import { box, chain, fill, rule, stroke, type Rect } from '../paint/outline.ts';
 import { apart, linear, radial, raised, type Pen } from '../paint/pen.ts';
 import type { ClosedOven } from './closed-oven.ts';
 import { paintDoor, paintInside, paintOpenDoor } from './paint-door.ts';
-import { paintPanel } from './paint-panel.ts';
+import { paintKey, paintPanel } from './paint-panel.ts';
 
 /** An oven that hangs over a cooktop: cabinet above, vent grille over the front, hood with filters and lamp beneath. */
 export const paintOverTheRange = (pen: Pen, oven: ClosedOven): void => {
@@ -21,6 +21,26 @@ export const paintOverTheRange = (pen: Pen, oven: ClosedOven): void => {
     paintOpenDoor(pen, shape);
   } else paintDoor(pen, shape, oven.isLampLit, oven.isTurning);
   paintPanel(pen, shape, oven.isDisplayLit, oven.display);
+  paintHoodKeys(pen, shape);
+};
+
+/** The keys of vent and cooktop lamp, in the gap under the display. */
+const paintHoodKeys = (pen: Pen, { display, keys }: ClosedOvenShape): void => {
+  const [first] = keys;
+  if (!first) return;
+  const top = display.at[1] + display.size[1];
+  const height = Math.min(24, first.at[1] - top - 12);
+  const width = (display.size[0] - 10) / 2;
+  for (const [i, text] of ['Vent', 'Light'].entries())
+    paintKey(
+      pen,
+      {
+        at: [display.at[0] + i * (width + 10), (top + first.at[1] - height) / 2],
+        size: [width, height],
+      },
+      text,
+      13,
+    );
 };
 
 /** How far the grille's band reaches above the front, as a share of the rise. */

@@ -49,7 +49,13 @@ const paintDisplay = (pen: Pen, { at, size }: BenchBox, isLit: boolean, text: st
   });
 };
 
-const paintKey = (pen: Pen, { at, size }: BenchBox, text: string, lettering: number): void => {
+/** One key with its word. */
+export const paintKey = (
+  pen: Pen,
+  { at, size }: BenchBox,
+  text: string,
+  lettering: number,
+): void => {
   raised(pen, 2, shade.drop, () => box(pen, [...at, ...size], 7, material.plastic[1]));
   box(
     pen,
