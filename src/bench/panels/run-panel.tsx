@@ -12,6 +12,7 @@ const orders = [
   [30, '30 s'],
   [60, '1 min'],
   [120, '2 min'],
+  [300, '5 min'],
 ] as const;
 
 const checks: readonly { name: string; command: LastingCommand }[] = [
