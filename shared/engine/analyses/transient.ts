@@ -46,7 +46,7 @@ export interface Transient {
 
 /** Samples are compared one by one; means over many steps forgive more. */
 const SAMPLED_TOLERANCE = 1e-5;
-const SUMMARY_TOLERANCE = 3e-4;
+const SUMMARY_TOLERANCE = 6e-4;
 
 /**
  * The circuit through time from t = 0. Samples fall on steps' ends, never between them.
