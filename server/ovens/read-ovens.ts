@@ -1,4 +1,5 @@
 import { join } from 'node:path';
+import { checkDiagram } from '../../shared/oven/check-layout.ts';
 import { ovenLayout, type OvenLayout } from '../../shared/oven/layout.ts';
 import { parseOven } from '../../shared/oven/parse-oven.ts';
 import { OvenLibrary, type Oven } from './oven-library.ts';
@@ -31,6 +32,14 @@ function readOven(
   ];
   if (parsed.ok && parsed.oven.id !== file.name) {
     mistakes.push({ path: 'id', message: `${parsed.oven.id} must be the name of the file` });
+  }
+  if (parsed.ok && 'layout' in layout) {
+    mistakes.push(
+      ...checkDiagram(parsed.oven, layout.layout).map(({ path, message }) => ({
+        path: `layout: ${path}`,
+        message,
+      })),
+    );
   }
   if (parsed.ok && 'layout' in layout && mistakes.length === 0) {
     return { definition: parsed.oven, layout: layout.layout };

@@ -3,6 +3,10 @@ import { leadRef, partRef, terminalRef } from './oven.ts';
 
 const point = z.tuple([z.number(), z.number()]);
 
+/** Units of the wiring diagram from one line of its grid to the next. */
+export const diagramGrid = 10;
+const onGrid = z.number().nonnegative().multipleOf(diagramGrid, 'a multiple of 10');
+
 /** Where everything lies on the bench seen from above, in bench units (1 unit = 1 px at zoom 1). Drawing only: no electrical meaning. */
 export const ovenLayout = z.strictObject({
   schemaVersion: z.literal(1),
@@ -24,6 +28,17 @@ export const ovenLayout = z.strictObject({
     leadRef,
     z.strictObject({ via: z.array(point), hangs: z.tuple([point, point]).optional() }),
   ),
+  diagram: z.strictObject({
+    size: z.tuple([onGrid, onGrid]),
+    /** upper left corner of each part's symbol; it is turned clockwise within its box */
+    parts: z.record(
+      partRef,
+      z.strictObject({
+        at: z.tuple([onGrid, onGrid]),
+        turn: z.union([z.literal(0), z.literal(90), z.literal(180), z.literal(270)]).optional(),
+      }),
+    ),
+  }),
 });
 
 export type OvenLayout = z.infer<typeof ovenLayout>;
