@@ -81,14 +81,14 @@ function around(
   return [0, 8, 16, 26].flatMap((more) => [
     ...columns.map((at, i) => ({ at: [at, y - lh / 2 - 3 - more] as const, cost: i + more / 2 })),
     ...rows.map((at, i) => ({
-      at: [x + w + lw / 2 + 5 + more, at] as const,
+      at: [x + w + lw / 2 + 14 + more, at] as const,
       cost: 2 + i + more / 2,
     })),
     ...columns.map((at, i) => ({
       at: [at, y + h + lh / 2 + 3 + more] as const,
       cost: 3 + i + more / 2,
     })),
-    ...rows.map((at, i) => ({ at: [x - lw / 2 - 5 - more, at] as const, cost: 4 + i + more / 2 })),
+    ...rows.map((at, i) => ({ at: [x - lw / 2 - 14 - more, at] as const, cost: 4 + i + more / 2 })),
   ]);
 }
 

@@ -12,10 +12,13 @@ interface Props {
   onRun: () => void;
   isListOpen: boolean;
   onList: () => void;
+  isDiagramOpen: boolean;
+  onDiagram: () => void;
 }
 
 /** What can be done with the oven as a whole, and with time. */
-export const ActionBar = ({ isRunOpen, onRun, isListOpen, onList }: Props) => {
+export const ActionBar = (props: Props) => {
+  const { isRunOpen, onRun, isListOpen, onList, isDiagramOpen, onDiagram } = props;
   const isCordIn = useBench(({ state }) => state.isCordIn);
   const isCoverOn = useBench(({ state }) => state.isCoverOn);
   const isDoorClosed = useBench(({ state }) => state.oven.isDoorClosed);
@@ -25,7 +28,7 @@ export const ActionBar = ({ isRunOpen, onRun, isListOpen, onList }: Props) => {
     <div
       role="toolbar"
       aria-label="Oven and time"
-      className="flex items-center gap-1.5 overflow-x-auto border-t border-bench-line bg-mat-deep px-3 py-1.5"
+      className="flex items-center gap-1 overflow-x-auto border-t border-bench-line bg-mat-deep px-2 py-1.5"
     >
       <BenchButton onClick={() => run({ type: isCordIn ? 'PullCord' : 'PlugCord', data: {} })}>
         {isCordIn ? 'Pull the cord' : 'Put the cord in'}
@@ -39,8 +42,8 @@ export const ActionBar = ({ isRunOpen, onRun, isListOpen, onList }: Props) => {
       <BenchButton aria-expanded={isRunOpen} onClick={onRun}>
         Run the oven
       </BenchButton>
-      <span className="ml-auto flex items-center gap-1.5" role="group" aria-label="Wait">
-        <span aria-hidden className="pl-2 text-sm text-bench-ink-2">
+      <span className="ml-auto flex items-center gap-1" role="group" aria-label="Wait">
+        <span aria-hidden className="pl-1 text-sm text-bench-ink-2">
           Wait
         </span>
         {waits.map(([ms, name]) => (
@@ -49,6 +52,9 @@ export const ActionBar = ({ isRunOpen, onRun, isListOpen, onList }: Props) => {
           </BenchButton>
         ))}
       </span>
+      <BenchButton data-opens="diagram" aria-expanded={isDiagramOpen} onClick={onDiagram}>
+        Diagram
+      </BenchButton>
       <BenchButton aria-expanded={isListOpen} onClick={onList}>
         Terminals
       </BenchButton>

@@ -1,5 +1,5 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { useEffect, useRef, useState } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { BenchContext, useBench } from '../../simulation/bench-context.ts';
 import type { OpenedBench } from '../../simulation/open-bench.ts';
@@ -22,6 +22,11 @@ import { useAwayPause } from './use-away-pause.ts';
 import { useShortcuts } from './use-shortcuts.ts';
 import { useWide } from './use-wide.ts';
 
+const DiagramPanel = lazy(async () => {
+  const { DiagramPanel: panel } = await import('../diagram/diagram-panel.tsx');
+  return { default: panel };
+});
+
 interface Props {
   opened: OpenedBench;
   again: (how: { steal: boolean }) => void;
@@ -36,6 +41,7 @@ const Workplace = ({ opened }: { opened: OpenedBench }) => {
   const [openedWithCord, setOpenedWithCord] = useState<'in' | 'out' | null>(null);
   const isRunOpen = openedWithCord === (isCordIn ? 'in' : 'out');
   const [isListOpen, setIsListOpen] = useState(false);
+  const [isDiagramOpen, setIsDiagramOpen] = useState(false);
   const [isHelpOpen, setIsHelpOpen] = useState(false);
   const place = useRef<HTMLElement>(null);
   const [mat] = useState(matLink);
@@ -57,19 +63,36 @@ const Workplace = ({ opened }: { opened: OpenedBench }) => {
         onKeyDown={onKeyDown}
         className="grid min-h-0 min-w-0 grid-rows-[1fr_auto_auto] bg-mat text-bench-ink"
       >
-        <Mat
-          layout={opened.layout}
-          isRunOpen={isRunOpen}
-          onRunClose={() => setOpenedWithCord(null)}
-          isListOpen={isListOpen}
-          onListClose={() => setIsListOpen(false)}
-          onLeave={() => focusIn('[role="toolbar"] button')}
-        />
+        <div className="relative flex min-h-0 min-w-0">
+          <div className="grid min-h-0 min-w-0 flex-1">
+            <Mat
+              layout={opened.layout}
+              isRunOpen={isRunOpen}
+              onRunClose={() => setOpenedWithCord(null)}
+              isListOpen={isListOpen}
+              onListClose={() => setIsListOpen(false)}
+              onLeave={() => focusIn('[role="toolbar"] button')}
+            />
+          </div>
+          {isDiagramOpen ? (
+            <Suspense>
+              <DiagramPanel
+                layout={opened.layout}
+                onClose={() => {
+                  setIsDiagramOpen(false);
+                  focusIn('[role="toolbar"] [data-opens="diagram"]');
+                }}
+              />
+            </Suspense>
+          ) : null}
+        </div>
         <ActionBar
           isRunOpen={isRunOpen}
           onRun={() => setOpenedWithCord(isRunOpen ? null : isCordIn ? 'in' : 'out')}
           isListOpen={isListOpen}
           onList={() => setIsListOpen(!isListOpen)}
+          isDiagramOpen={isDiagramOpen}
+          onDiagram={() => setIsDiagramOpen(!isDiagramOpen)}
         />
         {isWide ? <Dock /> : <CompactDock />}
       </main>

@@ -20,6 +20,7 @@ export const HoverName = ({
     <div
       ref={place}
       aria-hidden
+      data-off="true"
       className="pointer-events-none absolute top-0 left-0 z-[2] max-w-[240px] rounded-[7px] bg-mat-deep px-2.5 py-1 shadow-lg data-[off=true]:hidden"
       hidden={words === null || isHidden}
     >

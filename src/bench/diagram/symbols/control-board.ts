@@ -28,9 +28,9 @@ export const controlBoard: SymbolOf = (variant) => {
       ...(used === 6 ? [{ d: 'M12 130H40V150H12', kind: 'fine' as const }] : []),
     ],
     letters: [
-      { text: 'keys, relays', at: [78, 54], size: 9 },
-      { text: 'display', at: [66, 90], size: 9 },
-      ...(used === 6 ? [{ text: 'door line', at: [70, 140] as const, size: 9 }] : []),
+      { text: 'supply', at: [84, 30], size: 9 },
+      { text: 'display', at: [70, 90], size: 9 },
+      ...(used === 6 ? [{ text: 'door line', at: [74, 140] as const, size: 9 }] : []),
     ],
   };
 };
