@@ -33,6 +33,7 @@ HTMLDialogElement.prototype.showModal ??= function show(this: HTMLDialogElement)
 HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
   this.open = false;
 };
+Element.prototype.scrollIntoView ??= () => undefined;
 Element.prototype.setPointerCapture ??= () => undefined;
 Element.prototype.releasePointerCapture ??= () => undefined;
 

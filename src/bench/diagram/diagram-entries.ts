@@ -1,5 +1,5 @@
 import type { BenchState } from '../../../shared/bench/bench-state.ts';
-import type { OvenDefinition, OvenPart } from '../../../shared/oven/oven.ts';
+import type { OvenDefinition, OvenLead, OvenPart } from '../../../shared/oven/oven.ts';
 import { describeTarget } from '../../../shared/oven/targets.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
 import { boxCentre } from '../geometry/bench-box.ts';
@@ -65,11 +65,11 @@ const contactWords = (part: OvenPart, { oven }: BenchState): string[] =>
       `${name === 'contact' ? name : `${name} contact`} ${isClosed ? 'closed' : 'open'}`,
   );
 
-/** "W7, lead, line to primary door switch, black, F2.2 to S1.COM" */
-export function leadWords(lead: OvenDefinition['leads'][number], { oven }: BenchState): string {
-  const [a, b] = (['a', 'b'] as const).map((side, i) => {
-    const seat = oven.leadEnds[`${lead.ref}/${side}`];
-    return seat ?? `lifted from ${lead.ends[i]}`;
-  });
-  return `${lead.ref}, lead, ${lead.name}, ${lead.insulation}, ${a} to ${b}`;
+/** "W7, lead, line to primary door switch, black, F2.2 to S1.COM", or "on F2.2, lifted from S1.COM". */
+function leadWords({ ref, name, insulation, ends }: OvenLead, { oven }: BenchState): string {
+  const seats = [oven.leadEnds[`${ref}/a`] ?? null, oven.leadEnds[`${ref}/b`] ?? null];
+  const where = seats.includes(null)
+    ? seats.map((seat, i) => (seat === null ? `lifted from ${ends[i]}` : `on ${seat}`)).join(', ')
+    : seats.join(' to ');
+  return `${ref}, lead, ${name}, ${insulation}, ${where}`;
 }
