@@ -9,11 +9,10 @@ export const step = <T extends BenchCommand['type']>(
   data: DataOf<T>,
 ): Step => [seconds, { type, data } as BenchCommand];
 
-export const openUp: Step[] = [
-  step(16, 'RunOven', { ordered: 10 }),
-  step(5, 'PullCord', {}),
-  step(14, 'RemoveCover', {}),
-];
+export const runCold: Step = step(16, 'RunOven', { ordered: 10 });
+export const pullCord: Step = step(5, 'PullCord', {});
+export const removeCover: Step = step(14, 'RemoveCover', {});
+export const openUp: Step[] = [runCold, pullCord, removeCover];
 
 /** Each capacitor terminal to chassis through 20 kOhm, then terminal to terminal. */
 export const discharge: Step[] = [
@@ -79,25 +78,24 @@ export const report = (repair: string, customer: string): Step =>
 
 export const inspect = (part: string): Step => step(5, 'InspectPart', { part });
 export const replace = (part: string): Step => step(60, 'ReplacePart', { part });
+export const repairLead = (lead: string): Step => step(240, 'RepairLead', { lead });
+export const repairDoor: Step = step(900, 'RepairDoor', {});
 export const probesOff: Step[] = [
   step(2, 'RemoveProbe', { probe: 'red' }),
   step(1, 'RemoveProbe', { probe: 'black' }),
 ];
-export const closeUp: Step[] = [
-  step(12, 'FitCover', {}),
-  step(4, 'PlugCord', {}),
-  step(65, 'RunOven', { ordered: 60 }),
-];
+export const runMinute: Step = step(65, 'RunOven', { ordered: 60 });
+export const closeUp: Step[] = [step(12, 'FitCover', {}), step(4, 'PlugCord', {}), runMinute];
+export const survey: Step = step(50, 'SurveyLeakage', {});
 /** What belongs to every repair before the oven goes back: door surveyed, opened slowly, earth and insulation. */
 export const finalChecks: Step[] = [
-  step(50, 'SurveyLeakage', {}),
+  survey,
   step(12, 'CheckInterlocks', {}),
   step(3, 'CloseDoor', {}),
   step(4, 'PullCord', {}),
   step(20, 'TestFromPlug', {}),
 ];
 export const handIn: Step = step(10, 'HandIn', {});
-export const runCold: Step = step(16, 'RunOven', { ordered: 10 });
 export const openDoor: Step = step(4, 'OpenDoor', {});
 export const closeDoor: Step = step(3, 'CloseDoor', {});
 export const press = (part: string): Step => step(3, 'PressSwitch', { part });
