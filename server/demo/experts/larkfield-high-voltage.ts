@@ -50,8 +50,6 @@ const bothWays: Step[] = [
 const goodDiode: Step[] = [...lift('W27/b', 'D1.a'), ...bothWays, verdict('D1', 'good')];
 const shortedDiode: Step[] = [
   ...lift('W27/b', 'D1.a'),
-  setting('ohms-20M'),
-  ...measure('D1.a', 'D1.k', 4),
   ...zero('ohms-200'),
   ...measure('D1.a', 'D1.k', 3),
   ...measure('D1.k', 'D1.a', 3),
@@ -251,7 +249,7 @@ const growl: Step[] = [
   ...lift('W23/a', 'T1.HV'),
   clean('T1.core'),
   ...zero('ohms-200'),
-  ...measure('T1.HV', 'T1.core', 10),
+  ...measure('T1.HV', 'T1.core', 8),
   ...lift('W11/b', 'T1.1'),
   ...measure('T1.1', 'T1.2', 3),
   verdict('T1', 'faulty'),
@@ -294,7 +292,7 @@ const thirdDiode: Step[] = [
   ...lift('W23/a', 'T1.HV'),
   clean('T1.core'),
   ...zero('ohms-200'),
-  ...measure('T1.HV', 'T1.core', 4),
+  ...measure('T1.HV', 'T1.core', 6),
   verdict('T1', 'good'),
   cause({ on: 'D1', fault: 'shorted' }, { on: 'V1', fault: 'heater-shorted-to-body' }),
   ...probesOff,
