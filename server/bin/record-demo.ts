@@ -9,7 +9,8 @@ import { experts } from '../demo/experts/experts.ts';
 import type { Recording } from '../demo/recording.ts';
 import { findProjectRoot } from '../project-root.ts';
 
-// npm run record-demo: does the demo's written-down attempts on the bench and keeps what the circuit gave.
+// npm run record-demo [-- JOB...]: does the written-down attempts of the demo and of the experts on the
+// bench, all or those on some jobs, and keeps what the circuit gave.
 const scenarios = join(findProjectRoot(), 'scenarios');
 const read = async (...path: string[]): Promise<unknown> =>
   JSON.parse(await readFile(join(scenarios, ...path), 'utf8'));
@@ -31,7 +32,11 @@ async function record(
   process.stdout.write(`${job}: ${performed.events.length} events\n`);
 }
 
+const asked = process.argv.slice(2);
+const isAsked = (job: string): boolean => asked.length === 0 || asked.includes(job);
+
 for (const [index, { steps, ...work }] of demoAttempts.entries())
-  await record(work, steps, 'recordings', `${index + 1}-${work.job}.json`);
+  if (isAsked(work.job)) await record(work, steps, 'recordings', `${index + 1}-${work.job}.json`);
 for (const { steps, ...work } of experts)
-  await record({ ...work, email: 'an expert' }, steps, 'expert-recordings', `${work.job}.json`);
+  if (isAsked(work.job))
+    await record({ ...work, email: 'an expert' }, steps, 'expert-recordings', `${work.job}.json`);

@@ -18,7 +18,6 @@ import {
   verdict,
   zero,
 } from './steps.ts';
-import { timerAttempts } from './timer-attempts.ts';
 
 const carefulDiode: Step[] = [
   ...openUp,
@@ -92,7 +91,7 @@ const shockedHeater: Step[] = [
   handIn,
 ];
 
-/** One careful, one hurried, one who forgot the capacitor; then expert work on the oven with a timer. */
+/** One careful, one hurried, one who forgot the capacitor. Few: the first start puts each into the database. */
 export const demoAttempts: readonly DemoAttempt[] = [
   { email: 'tom@northgate.example', job: 'loud-hum-no-heat', seed: 417, steps: carefulDiode },
   { email: 'mina@northgate.example', job: 'dead-no-display', seed: 2208, steps: hurriedBoard },
@@ -102,5 +101,4 @@ export const demoAttempts: readonly DemoAttempt[] = [
     seed: 91,
     steps: shockedHeater,
   },
-  ...timerAttempts,
 ];

@@ -1,20 +1,28 @@
 import type { Step } from '../../../shared/bench/perform.ts';
 import {
   cause,
+  closeDoor,
   closeUp,
   discharge,
+  finalChecks,
   handIn,
   inspect,
+  letGo,
   lift,
   measure,
+  openDoor,
   openUp,
+  press,
   probesOff,
   proveDead,
+  pullCord,
   refit,
+  removeCover,
   replace,
   report,
   setting,
   step,
+  survey,
   verdict,
   zero,
 } from '../steps.ts';
@@ -24,8 +32,6 @@ import type { Expert } from './expert.ts';
 
 const run = (seconds: number): Step => step(seconds + 6, 'RunOven', { ordered: seconds });
 const wait = (minutes: number): Step => step(minutes * 60, 'Wait', { ms: minutes * 60_000 });
-const hold = (part: string): Step => step(3, 'PressSwitch', { part });
-const letGo = (part: string): Step => step(2, 'ReleaseSwitch', { part });
 
 const makeSafe: Step[] = [...discharge, ...proveDead];
 
@@ -35,11 +41,7 @@ const finish = (refits: readonly Step[], ...longRun: Step[]): Step[] => [
   ...refits,
   ...closeUp,
   ...longRun,
-  step(45, 'SurveyLeakage', {}),
-  step(20, 'CheckInterlocks', {}),
-  step(4, 'CloseDoor', {}),
-  step(5, 'PullCord', {}),
-  step(20, 'TestFromPlug', {}),
+  ...finalChecks,
 ];
 
 const ventOnHighOnly: Step[] = [
@@ -79,7 +81,7 @@ const startDoesNothing: Step[] = [
   inspect('S4'),
   ...lift('W41/a', '1'),
   setting('beep'),
-  hold('S4'),
+  press('S4'),
   ...measure('S4.COM', 'S4.NO', 2),
   setting('ohms-200k'),
   ...measure('S4.COM', 'S4.NO', 3),
@@ -89,7 +91,7 @@ const startDoesNothing: Step[] = [
   verdict('S4', 'faulty'),
   setting('beep'),
   ...lift('W6/b', '2'),
-  hold('S1'),
+  press('S1'),
   ...measure('S1.COM', 'S1.NO', 2),
   letGo('S1'),
   verdict('S1', 'good'),
@@ -106,8 +108,8 @@ const startDoesNothing: Step[] = [
 
 const fanStandsStill: Step[] = [
   run(240),
-  step(5, 'PullCord', {}),
-  step(14, 'RemoveCover', {}),
+  pullCord,
+  removeCover,
   ...makeSafe,
   inspect('M1'),
   ...lift('W14/b', '1'),
@@ -183,20 +185,20 @@ const fuseAtTheDoor: Step[] = [
   ...measure('F1.1', 'F1.2', 2),
   verdict('F1', 'faulty'),
   ...lift('W6/b', '1'),
-  step(4, 'OpenDoor', {}),
+  openDoor,
   ...measure('S1.COM', 'S1.NO', 2),
   verdict('S1', 'faulty'),
   ...lift('W17/a', '2'),
   ...lift('W19/b', '3'),
   ...lift('W23/b', '4'),
   ...measure('S2.COM', 'S2.NO', 2),
-  hold('S2'),
+  press('S2'),
   ...measure('S2.COM', 'S2.NO', 2),
   letGo('S2'),
   verdict('S2', 'good'),
   ...lift('W18/b', '5'),
   ...measure('S3.COM', 'S3.NC', 2),
-  hold('S3'),
+  press('S3'),
   ...measure('S3.COM', 'S3.NC', 2),
   letGo('S3'),
   verdict('S3', 'good'),
@@ -205,7 +207,7 @@ const fuseAtTheDoor: Step[] = [
   ...lift('W18/a', '7'),
   replace('S1'),
   replace('F1'),
-  step(4, 'CloseDoor', {}),
+  closeDoor,
   ...finish([
     refit('W18/a', 'S1.NO'),
     refit('W13/a', 'S1.NO'),
@@ -225,17 +227,17 @@ const fuseAtTheDoor: Step[] = [
 const beforeLetting: Step[] = [
   run(30),
   step(20, 'CheckInterlocks', {}),
-  step(4, 'CloseDoor', {}),
-  step(5, 'PullCord', {}),
-  step(14, 'RemoveCover', {}),
+  closeDoor,
+  pullCord,
+  removeCover,
   ...makeSafe,
   ...lift('W6/b', '1'),
   setting('beep'),
-  hold('S1'),
+  press('S1'),
   ...measure('S1.COM', 'S1.NO', 2),
   letGo('S1'),
   verdict('S1', 'good'),
-  step(4, 'OpenDoor', {}),
+  openDoor,
   ...lift('W18/b', '2'),
   ...measure('S3.COM', 'S3.NC', 2),
   setting('ohms-20M'),
@@ -246,7 +248,7 @@ const beforeLetting: Step[] = [
   replace('S3'),
   setting('beep'),
   ...measure('S3.COM', 'S3.NC', 2),
-  step(4, 'CloseDoor', {}),
+  closeDoor,
   ...finish([refit('W19/a', 'S3.NC'), refit('W18/b', 'S3.COM'), refit('W6/b', 'S1.COM')]),
   report(
     'Monitor switch S3 does not close with the door open: no protection should S1 weld. Replaced. Interlocks, leakage and earth checked.',
@@ -257,9 +259,9 @@ const beforeLetting: Step[] = [
 
 const lukewarm: Step[] = [
   run(60),
-  step(45, 'SurveyLeakage', {}),
+  survey,
   step(20, 'CheckInterlocks', {}),
-  step(4, 'CloseDoor', {}),
+  closeDoor,
   verdict('V1', 'good'),
   verdict('T1', 'good'),
   verdict('M3', 'good'),
@@ -272,8 +274,8 @@ const lukewarm: Step[] = [
 
 const fanTurns: Step[] = [
   run(240),
-  step(5, 'PullCord', {}),
-  step(14, 'RemoveCover', {}),
+  pullCord,
+  removeCover,
   ...makeSafe,
   inspect('M1'),
   inspect('V1'),

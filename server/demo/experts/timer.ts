@@ -1,5 +1,4 @@
-import type { Step } from '../../shared/bench/perform.ts';
-import type { DemoAttempt } from './demo-attempt.ts';
+import type { Step } from '../../../shared/bench/perform.ts';
 import {
   cause,
   closeDoor,
@@ -23,8 +22,11 @@ import {
   setting,
   verdict,
   zero,
-} from './steps.ts';
-import { growls, secondFuse } from './timer-high-voltage-steps.ts';
+} from '../steps.ts';
+import type { Expert } from './expert.ts';
+import { growls, secondFuse } from './timer-high-voltage.ts';
+
+// Jobs on the Tarnwick TK-23.
 
 const madeSafe: Step[] = [...openUp, ...discharge, ...proveDead];
 
@@ -289,25 +291,14 @@ const knob: Step[] = [
   handIn,
 ];
 
-/** Expert work on the 230 V oven with a timer: each finishes its job safely. */
-export const timerAttempts: readonly DemoAttempt[] = [
-  { email: 'mina@northgate.example', job: 'timer-dead-after-popcorn', seed: 5, steps: popcorn },
-  { email: 'tom@northgate.example', job: 'timer-silent-no-heat', seed: 18, steps: silent },
-  { email: 'jonas@northgate.example', job: 'timer-takes-for-ever', seed: 33, steps: forEver },
-  {
-    email: 'tom@northgate.example',
-    job: 'timer-second-high-voltage-fuse',
-    seed: 71,
-    steps: secondFuse,
-  },
-  { email: 'mina@northgate.example', job: 'timer-bang-at-the-door', seed: 112, steps: bang },
-  { email: 'tom@northgate.example', job: 'timer-yearly-check', seed: 140, steps: yearly },
-  {
-    email: 'mina@northgate.example',
-    job: 'timer-fuse-after-neighbour',
-    seed: 256,
-    steps: neighbour,
-  },
-  { email: 'tom@northgate.example', job: 'timer-growls-and-smells', seed: 381, steps: growls },
-  { email: 'mina@northgate.example', job: 'timer-knob-stays', seed: 402, steps: knob },
+export const timer: readonly Expert[] = [
+  { job: 'timer-dead-after-popcorn', seed: 5, steps: popcorn },
+  { job: 'timer-silent-no-heat', seed: 18, steps: silent },
+  { job: 'timer-takes-for-ever', seed: 33, steps: forEver },
+  { job: 'timer-second-high-voltage-fuse', seed: 71, steps: secondFuse },
+  { job: 'timer-bang-at-the-door', seed: 112, steps: bang },
+  { job: 'timer-yearly-check', seed: 140, steps: yearly },
+  { job: 'timer-fuse-after-neighbour', seed: 256, steps: neighbour },
+  { job: 'timer-growls-and-smells', seed: 381, steps: growls },
+  { job: 'timer-knob-stays', seed: 402, steps: knob },
 ];

@@ -1,4 +1,4 @@
-import type { Step } from '../../shared/bench/perform.ts';
+import type { Step } from '../../../shared/bench/perform.ts';
 import {
   cause,
   clean,
@@ -19,7 +19,7 @@ import {
   setting,
   verdict,
   zero,
-} from './steps.ts';
+} from '../steps.ts';
 
 /** A blown high-voltage fuse and what blew it. */
 export const secondFuse: Step[] = [
