@@ -1,31 +1,15 @@
-import { readFileSync, readdirSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { assess } from '../../shared/assessment/assess.ts';
 import { begin } from '../../shared/bench/begin.ts';
 import { poweredRun, standing } from '../../shared/bench/powered-run/powered-run.ts';
 import type { RunOutcome } from '../../shared/bench/record.ts';
-import { makeSetup } from '../../shared/bench/setup.ts';
 import { checkFaults } from '../../shared/oven/check-faults.ts';
 import { asFitted } from '../../shared/oven/initial-state.ts';
-import { scenarioContent } from '../../shared/scenario/scenario.ts';
 import { loadOven } from '../oven/oven-on-bench.ts';
-import { recorded } from '../support/bench.ts';
-import { recordings } from '../support/recordings.ts';
+import { jobs as allJobs, jobSetup } from '../support/jobs.ts';
 
 const tk23 = loadOven('tarnwick-tk-23');
-const folder = 'scenarios/jobs';
-const jobs = readdirSync(folder)
-  .map((file) => ({
-    job: file.replace('.json', ''),
-    content: scenarioContent.parse(JSON.parse(readFileSync(`${folder}/${file}`, 'utf8'))),
-  }))
-  .filter(({ content }) => content.oven === tk23.id);
-
-const setupOf = (job: string, seed: number) => {
-  const found = jobs.find((one) => one.job === job);
-  if (!found) throw new Error(`no job ${job}`);
-  return makeSetup({ ...found.content, definition: tk23, seed });
-};
+const jobs = allJobs.filter(({ content }) => content.oven === tk23.id);
+const setupOf = (job: string, seed: number) => jobSetup(job, tk23, seed);
 
 const healthy = {
   isTimerRunning: true,
@@ -112,21 +96,5 @@ describe('the jobs on the TK-23', () => {
     expect(outcome).toMatchObject({ hum: 'quiet', opened: ['F4'] });
     expect(outcome.atFirst?.hum).toBe('loud');
     expect(outcome.atFirst?.seconds).toBeLessThan(3);
-  });
-});
-
-describe('experts on the TK-23', () => {
-  const mine = recordings.filter(({ job }) => job in claims);
-
-  it('have finished every job', () => {
-    expect(mine.map(({ job }) => job).sort()).toEqual(Object.keys(claims).sort());
-  });
-
-  it.each(mine)('$job: cause found, nobody at risk, repaired and run again', (played) => {
-    const debrief = assess(played.setup, recorded(played.events));
-    expect(debrief).toMatchObject({ isCauseFound: true, isSafe: true });
-    expect(debrief.score).toBeGreaterThanOrEqual(95);
-    const last = played.events.findLast(({ type }) => type === 'OvenRun')?.data;
-    expect(last).toMatchObject({ ...healthy, hum: 'normal', opened: [] });
   });
 });

@@ -259,9 +259,7 @@ const beforeLetting: Step[] = [
 
 const lukewarm: Step[] = [
   run(60),
-  survey,
-  step(20, 'CheckInterlocks', {}),
-  closeDoor,
+  ...finalChecks,
   verdict('V1', 'good'),
   verdict('T1', 'good'),
   verdict('M3', 'good'),
