@@ -22,7 +22,6 @@ import {
   report,
   setting,
   step,
-  survey,
   verdict,
   zero,
 } from '../steps.ts';
