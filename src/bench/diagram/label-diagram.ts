@@ -1,5 +1,5 @@
 import type { OvenDefinition, OvenLead } from '../../../shared/oven/oven.ts';
-import type { BenchBox } from '../geometry/bench-box.ts';
+import { boxAround, type BenchBox } from '../geometry/bench-box.ts';
 import type { BenchPoint } from '../geometry/bench-point.ts';
 import { mapLeads } from '../geometry/lead-map.ts';
 import { placeLabels, type LabelWish, type PlacedLabel } from '../geometry/place-labels.ts';
@@ -30,7 +30,10 @@ export function labelDiagram(
     within: { at: [2, 2] as const, size: [size[0] - 4, size[1] - 4] as const },
   };
   const first = placeLabels(
-    symbols.flatMap((one) => [partWish(one), ...Object.entries(one.terminals).map(terminalWish)]),
+    symbols.flatMap((one) => [
+      partWish(one, symbols),
+      ...Object.entries(one.terminals).map(terminalWish),
+    ]),
     obstacles,
   );
   const leads = placeLabels(
@@ -63,14 +66,28 @@ function partTexts(ref: string, name: string): { text: string; size: BenchPoint;
   ];
 }
 
-function partWish({ part, body }: PlacedSymbol): LabelWish {
-  return {
-    id: part.ref,
-    choices: partTexts(part.ref, part.name).flatMap(({ text, size, dear }) =>
-      around(body, size).map(({ at, cost }) => ({ text, size, at, cost: cost + dear })),
-    ),
-  };
+/** What a name costs that stands nearer to another part than to its own. */
+const strayCost = 12;
+
+function partWish({ part, body }: PlacedSymbol, all: readonly PlacedSymbol[]): LabelWish {
+  const others = all.filter((one) => one.part !== part && one.part.kind !== 'chassis');
+  const choices = partTexts(part.ref, part.name).flatMap(({ text, size, dear }) =>
+    around(body, size).map(({ at, cost }) => {
+      const box = boxAround(at, size);
+      const near = gapBetween(box, body);
+      const isStray = others.some((one) => gapBetween(box, one.body) <= near);
+      return { text, size, at, cost: cost + dear + (isStray ? strayCost : 0) };
+    }),
+  );
+  return { id: part.ref, choices };
 }
+
+/** Units between two boxes, 0 where they meet. */
+const gapBetween = (a: BenchBox, b: BenchBox): number =>
+  Math.hypot(
+    Math.max(a.at[0] - b.at[0] - b.size[0], b.at[0] - a.at[0] - a.size[0], 0),
+    Math.max(a.at[1] - b.at[1] - b.size[1], b.at[1] - a.at[1] - a.size[1], 0),
+  );
 
 function around(
   { at: [x, y], size: [w, h] }: BenchBox,
@@ -78,17 +95,17 @@ function around(
 ): { at: BenchPoint; cost: number }[] {
   const columns = [x + w / 2, x + lw / 2, x + w - lw / 2];
   const rows = [y + h / 2, y + lh / 2, y + h - lh / 2];
-  return [0, 8, 16, 26].flatMap((more) => [
+  return [0, 6, 12, 20].flatMap((more) => [
     ...columns.map((at, i) => ({ at: [at, y - lh / 2 - 3 - more] as const, cost: i + more / 2 })),
     ...rows.map((at, i) => ({
-      at: [x + w + lw / 2 + 14 + more, at] as const,
+      at: [x + w + lw / 2 + 8 + more, at] as const,
       cost: 2 + i + more / 2,
     })),
     ...columns.map((at, i) => ({
       at: [at, y + h + lh / 2 + 3 + more] as const,
       cost: 3 + i + more / 2,
     })),
-    ...rows.map((at, i) => ({ at: [x - lw / 2 - 14 - more, at] as const, cost: 4 + i + more / 2 })),
+    ...rows.map((at, i) => ({ at: [x - lw / 2 - 8 - more, at] as const, cost: 4 + i + more / 2 })),
   ]);
 }
 
