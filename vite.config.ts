@@ -15,6 +15,8 @@ export default defineConfig({
   worker: { format: 'es' },
   ssr: { external: true },
   test: {
+    // Vitest leaves one core to its watcher; here each waits for a test.
+    maxWorkers: '100%',
     projects: [
       project('unit', 'unit.test.ts', { testTimeout: 60_000 }),
       {
