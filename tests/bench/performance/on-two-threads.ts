@@ -2,13 +2,17 @@ import { once } from 'node:events';
 import { Worker } from 'node:worker_threads';
 import { drawnSeeds } from './whole-fault-table.ts';
 
-const file = new URL('./fault-table-thread.ts', import.meta.url);
+// A thread does not inherit the loader of TypeScript (Node 20): it registers its own.
+const script = `import('tsx/esm/api').then(({ register }) => {
+  register();
+  return import(${JSON.stringify(new URL('./fault-table-thread.ts', import.meta.url).href)});
+});`;
 
 /** The whole fault table, the drawn ovens shared out between two threads: its readings, and ms of `count` runs after as many that are not counted. */
 export async function onTwoThreads(
   count: number,
 ): Promise<{ readings: number; median: number; fastest: number }> {
-  const threads = [0, 1].map(() => new Worker(file, { execArgv: ['--import', 'tsx'] }));
+  const threads = [0, 1].map(() => new Worker(script, { eval: true }));
   const shares = [0, 1].map((share) => drawnSeeds.filter((_, at) => at % 2 === share));
   const run = async (): Promise<number> => {
     const answers = threads.map((thread) => once(thread, 'message') as Promise<[number]>);
