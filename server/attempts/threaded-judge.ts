@@ -1,15 +1,12 @@
+import { actionByEvent } from '../../shared/bench/catalogue.ts';
 import type { WireEvent } from '../../shared/bench/event.ts';
 import { pinnedOf } from './judge-task.ts';
 import type { Judge } from './judge.ts';
 import type { JudgingThread } from './judging-thread.ts';
 
-/**
- * Events that make the circuit run on mains: a powered run, and what the cord does. Measured on
- * the LC-28, they take a hundred to a thousand times as long as any other.
- */
-const long = new Set(['OvenRun', 'CordPulled', 'CordPlugged']);
-
-const isLong = (events: readonly WireEvent[]): boolean => events.some(({ type }) => long.has(type));
+/** Some of them make the circuit run on mains. */
+const isLong = (events: readonly WireEvent[]): boolean =>
+  events.some(({ type }) => actionByEvent.get(type)?.runsMains === true);
 
 /**
  * Judges what is quick here and what is long in other threads, so that nobody's next step waits

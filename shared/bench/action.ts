@@ -37,6 +37,8 @@ export interface Action<
   decide: (bench: Bench, input: z.infer<I>) => Decision<z.infer<D>>;
   evolve: (state: BenchState, data: z.infer<D>, setup: Setup) => BenchState;
   /** It brings back a bench that was: what the tips meet, they had met before. */ isReturning?: true;
+  /** It runs the circuit on mains, which takes a hundred to a thousand times as long as anything else. */
+  runsMains?: true;
   /** for the bench log and the replay */ describe: (data: z.infer<D>) => string;
 }
 

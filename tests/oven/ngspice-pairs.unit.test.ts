@@ -1,40 +1,15 @@
-import { beforeAll, describe, expect, it } from 'vitest';
-import { writeDeck } from '../../shared/engine/deck/write-deck.ts';
-import { exactMeter } from '../../shared/instruments/draw-meter.ts';
-import { manual2000 } from '../../shared/instruments/manual-2000.ts';
-import { meterBranch } from '../../shared/instruments/meter-branch.ts';
-import type { Reading } from '../../shared/instruments/meter.ts';
-import { read } from '../../shared/instruments/read.ts';
-import { assemble, nodeOf } from '../../shared/oven/assemble.ts';
-import { drawOven } from '../../shared/oven/draw.ts';
-import type { AppliedFault } from '../../shared/oven/fault.ts';
-import type { OvenState } from '../../shared/oven/oven-state.ts';
-import { runNgspice } from '../support/ngspice.ts';
-import { cold, lc28, settled } from './lc-28.ts';
+import { describe } from 'vitest';
+import { agreesWithNgspice, pairOn } from './beside-ngspice.ts';
+import { loadOven, onBench } from './oven-on-bench.ts';
 
-// The same assembled circuit, drawn from a seed, solved by ngspice 39: what the meter then shows.
-
-interface Pair {
-  red: string;
-  black: string;
-  setting: string;
-  state: OvenState;
-}
-
-const pair = (
-  red: string,
-  black: string,
-  setting: string,
-  lift: readonly string[] = [],
-  faults: readonly AppliedFault[] = [],
-  change: Partial<OvenState> = {},
-): Pair => ({ red, black, setting, state: cold({ lift, ...change }, faults) });
+const bench = onBench(loadOven('larkfield-lc-28'));
+const pair = pairOn(bench);
 
 const capacitorApart = ['W23/b', 'W24/a', 'W27/a'];
 const heaterApart = ['W24/b', 'W25/b', 'W26/b'];
 const clean = { cleaned: ['T1.core', 'T2.core'] };
 
-const pairs: Pair[] = [
+const pairs = [
   pair('P1.L', 'P1.N', 'ohms-2k'),
   pair('P1.E', 'CH.1', 'ohms-200'),
   pair('F1.1', 'F1.2', 'ohms-200'),
@@ -82,65 +57,5 @@ const pairs: Pair[] = [
   pair('BAT.1k', 'BAT.neg', 'dc-20'),
 ];
 
-const seedOf = (index: number) => 100 + index;
-
-function ngspiceJob({ red, black, setting, state }: Pair, index: number) {
-  const branch = meterBranch(manual2000, setting, red, black);
-  const circuit = assemble(drawOven(lc28, seedOf(index)), state, branch ? [branch] : []);
-  const deck = writeDeck(circuit);
-  // ngspice puts no conductance from a node to ground: ours is 1e-12 S. With tolerances far below a
-  // count it does not settle on the bridge of the board, so here they are near its own.
-  const options = { reltol: '1e-4', abstol: '1e-12', vntol: '1e-7' };
-  const held = [...deck.nodes.values()]
-    .filter((node) => node !== '0')
-    .map((node, place) => `rhold${place} ${node} 0 1e12`);
-  const at = (target: string) => deck.nodes.get(nodeOf(state, target)) ?? 'missing';
-  return {
-    lines: [...deck.lines, ...held],
-    options,
-    commands: ['op'],
-    red: at(red),
-    black: at(black),
-  };
-}
-
-function shownFor(setting: string, volts: number): Reading {
-  return read({
-    meter: manual2000,
-    unit: exactMeter(),
-    settingId: setting,
-    trace: { time: [0, 1], volts: [volts, volts] },
-    lagState: null,
-    relative: null,
-    readingNumber: 0,
-  }).reading;
-}
-
-describe('readings beside ngspice', () => {
-  let theirs: Reading[] = [];
-  beforeAll(() => {
-    const jobs = pairs.map(ngspiceJob);
-    theirs = runNgspice(jobs).map(({ op = {} }, index) => {
-      const { red, black } = jobs[index]!;
-      const at = (node: string) => (node === '0' ? 0 : (op[`v(${node})`] ?? Number.NaN));
-      const volts = at(red) - at(black);
-      return shownFor(pairs[index]!.setting, volts);
-    });
-  }, 120_000);
-
-  it('compares at least 20 pairs, most of them with digits', () => {
-    expect(pairs.length).toBeGreaterThanOrEqual(20);
-    expect(theirs.filter(({ counts }) => counts !== null).length).toBeGreaterThanOrEqual(30);
-  });
-
-  it.each(pairs.map((entry, index) => [entry.red, entry.black, entry.setting, index] as const))(
-    '%s to %s on %s shows the same to one count',
-    (red, black, setting, index) => {
-      const oven = drawOven(lc28, seedOf(index));
-      const ours = settled({ state: pairs[index]!.state, red, black, setting, oven });
-      const other = theirs[index]!;
-      expect(ours.isOverRange).toBe(other.isOverRange);
-      expect(Math.abs((ours.counts ?? 0) - (other.counts ?? 0))).toBeLessThanOrEqual(1);
-    },
-  );
-});
+describe('readings of the LC-28 beside ngspice', () =>
+  agreesWithNgspice(bench, pairs, { pairs: 20, withDigits: 30, firstSeed: 100 }));

@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { faultsOf } from '../../shared/oven/check-faults.ts';
 import { solve } from './lc-28.ts';
-import { or16, or16Cold, or16Nominal } from './or-16.ts';
+import { or16, or16OnBench } from './or-16.ts';
+
+const { cold: or16Cold, nominal: or16Nominal } = or16OnBench;
 
 const refs = [...or16.parts, ...or16.leads].map(({ ref }) => ref);
 const singles = refs.flatMap((ref) =>

@@ -41,7 +41,7 @@ export function onBench(definition: OvenDefinition) {
     faults: readonly AppliedFault[] = [],
   ): OvenState => {
     const fitted = asFitted(definition, faults);
-    const leadEnds = { ...fitted.leadEnds };
+    const leadEnds = { ...fitted.leadEnds, ...change.leadEnds };
     for (const end of lift) leadEnds[end] = null;
     return { ...fitted, isDoorClosed: false, ...change, leadEnds };
   };
@@ -52,18 +52,28 @@ export function onBench(definition: OvenDefinition) {
     if (!solved.ok) throw new Error(solved.failure.message);
     const at = (target: string) => solved.value.voltages[nodeOf(state, target)] ?? Number.NaN;
     const volts = at(red) - at(black);
-    return read({
-      meter: manual2000,
-      unit: probed.unit ?? exactMeter(),
-      settingId: setting,
-      trace: { time: [0, 1], volts: [volts, volts] },
-      lagState: null,
-      relative: null,
-      readingNumber: probed.readingNumber ?? 0,
-    }).reading;
+    return shownFor(setting, volts, probed);
   };
   return { definition, nominal, cold, settled };
 }
+
+export type OnBench = ReturnType<typeof onBench>;
+
+/** What the manual meter shows of a voltage that stands between its tips. */
+export const shownFor = (
+  settingId: string,
+  volts: number,
+  { unit = exactMeter(), readingNumber = 0 }: Pick<Probed, 'unit' | 'readingNumber'> = {},
+): Reading =>
+  read({
+    meter: manual2000,
+    unit,
+    settingId,
+    trace: { time: [0, 1], volts: [volts, volts] },
+    lagState: null,
+    relative: null,
+    readingNumber,
+  }).reading;
 
 const display = { Ω: 1, kΩ: 1e3, MΩ: 1e6 } as const;
 

@@ -1,67 +1,11 @@
-import { describe, expect, it } from 'vitest';
-import { drawMeter } from '../../shared/instruments/draw-meter.ts';
-import { manual2000 } from '../../shared/instruments/manual-2000.ts';
-import type { Reading } from '../../shared/instruments/meter.ts';
-import { settingOf } from '../../shared/instruments/meters.ts';
+import { describe } from 'vitest';
 import type { AppliedFault } from '../../shared/oven/fault.ts';
-import { drawOven } from '../../shared/oven/draw.ts';
-import type { ServiceMeasurement } from '../../shared/oven/oven.ts';
-import { cold, lc28, settled } from './lc-28.ts';
+import { holdsItsServiceData } from './holds-its-service-data.ts';
+import { loadOven, onBench } from './oven-on-bench.ts';
 
-// FACTS 13, a healthy oven on the bench: common practice, no source.
-
-const display = { Ω: 1, kΩ: 1e3, MΩ: 1e6 } as const;
-
-function isGood(line: ServiceMeasurement, reading: Reading): boolean {
-  switch (line.expect) {
-    case 'open':
-      return reading.isOverRange;
-    case 'beep':
-      return reading.isBeeping;
-    case 'range': {
-      if (reading.value === null) return false;
-      const shown = reading.value / display[line.unit as keyof typeof display];
-      return shown >= (line.low ?? -Infinity) && shown <= (line.high ?? Infinity);
-    }
-  }
-}
-
-function measure(line: ServiceMeasurement, faults: readonly AppliedFault[], seed: number): Reading {
-  const { lift, press, clean, between, setting } = line;
-  return settled({
-    state: cold({ lift, pressed: press ?? [], cleaned: clean ?? [] }, faults),
-    red: between[0],
-    black: between[1],
-    setting,
-    oven: drawOven(lc28, seed),
-    unit: drawMeter(manual2000, seed),
-    readingNumber: seed,
-  });
-}
-
-const line = (id: string): ServiceMeasurement => {
-  const found = lc28.serviceData.find((candidate) => candidate.id === id);
-  if (!found) throw new Error(`no measurement ${id}`);
-  return found;
-};
+const bench = onBench(loadOven('larkfield-lc-28'));
 
 describe('service data of the LC-28', () => {
-  it('names settings of the manual meter, in the unit that setting shows', () => {
-    for (const { setting, unit } of lc28.serviceData) {
-      const found = settingOf(manual2000, setting);
-      expect(found && 'scale' in found ? found.scale.unit : null).toBe(unit);
-    }
-  });
-
-  it.each(lc28.serviceData.map((entry) => [entry.id, entry] as const))(
-    '%s is good on ten drawn ovens with ten drawn meters',
-    (_, entry) => {
-      for (let seed = 1; seed <= 10; seed += 1)
-        expect(isGood(entry, measure(entry, [], seed)), `seed ${seed}`).toBe(true);
-    },
-    60_000,
-  );
-
   const bad: [string, AppliedFault][] = [
     ['fuse', { on: 'F1', fault: 'open' }],
     ['magnetron-cut-out', { on: 'F2', fault: 'open' }],
@@ -107,11 +51,6 @@ describe('service data of the LC-28', () => {
     ['magnetron-body-1', { on: 'V1', fault: 'leaky' }],
     ['magnetron-body-2', { on: 'V1', fault: 'heater-shorted-to-body' }],
   ];
-  it.each(bad)('%s finds %o', (id, fault) => {
-    for (const seed of [1, 2, 3])
-      expect(isGood(line(id), measure(line(id), [fault], seed))).toBe(false);
-  });
-
   // FACTS 6.3: cold ohms stay normal with shorted turns; the fault must be found by a run.
   const unseen: AppliedFault[] = [
     { on: 'T1', fault: 'shorted-turns' },
@@ -127,12 +66,5 @@ describe('service data of the LC-28', () => {
     { on: 'M1', fault: 'seized' },
     { on: 'A1', fault: 'dead' },
   ];
-  it.each(unseen)(
-    'no settled line sees %o',
-    (fault) => {
-      for (const entry of lc28.serviceData)
-        expect(isGood(entry, measure(entry, [fault], 4)), entry.id).toBe(true);
-    },
-    60_000,
-  );
+  holdsItsServiceData(bench, { seeds: 10, bad, unseen });
 });

@@ -1,41 +1,13 @@
-import { beforeAll, describe, expect, it } from 'vitest';
-import { writeDeck } from '../../shared/engine/deck/write-deck.ts';
-import { exactMeter } from '../../shared/instruments/draw-meter.ts';
-import { manual2000 } from '../../shared/instruments/manual-2000.ts';
-import { meterBranch } from '../../shared/instruments/meter-branch.ts';
-import type { Reading } from '../../shared/instruments/meter.ts';
-import { read } from '../../shared/instruments/read.ts';
-import { assemble, nodeOf } from '../../shared/oven/assemble.ts';
-import { drawOven } from '../../shared/oven/draw.ts';
-import type { AppliedFault } from '../../shared/oven/fault.ts';
-import type { OvenState } from '../../shared/oven/oven-state.ts';
-import { runNgspice } from '../support/ngspice.ts';
+import { describe } from 'vitest';
+import { agreesWithNgspice, pairOn } from './beside-ngspice.ts';
 import { loadOven, onBench } from './oven-on-bench.ts';
 
-// The TK-23 as assembled, drawn from a seed, solved by ngspice 39: what the meter then shows.
-
-const tk23 = loadOven('tarnwick-tk-23');
-const { cold, settled } = onBench(tk23);
-
-interface Pair {
-  red: string;
-  black: string;
-  setting: string;
-  state: OvenState;
-}
-
-const pair = (
-  red: string,
-  black: string,
-  setting: string,
-  lift: readonly string[] = [],
-  faults: readonly AppliedFault[] = [],
-  change: Partial<OvenState> = {},
-): Pair => ({ red, black, setting, state: cold({ lift, ...change }, faults) });
+const bench = onBench(loadOven('tarnwick-tk-23'));
+const pair = pairOn(bench);
 
 const apart = ['W24/b', 'W25/a', 'W28/a'];
 
-const pairs: Pair[] = [
+const pairs = [
   pair('P1.L', 'P1.N', 'ohms-20k', [], [], { isDoorClosed: true, pressed: ['K1'] }),
   pair('P1.L', 'P1.N', 'ohms-2M'),
   pair('F1.1', 'F1.2', 'ohms-200'),
@@ -63,57 +35,5 @@ const pairs: Pair[] = [
   pair('S1.NO', 'Z1.4', 'ohms-200', [], [{ on: 'W10', fault: 'wrong-terminal-a' }]),
 ];
 
-const seedOf = (index: number) => 300 + index;
-
-function ngspiceJob({ red, black, setting, state }: Pair, index: number) {
-  const branch = meterBranch(manual2000, setting, red, black);
-  const circuit = assemble(drawOven(tk23, seedOf(index)), state, branch ? [branch] : []);
-  const deck = writeDeck(circuit);
-  const options = { reltol: '1e-4', abstol: '1e-12', vntol: '1e-7' };
-  // ngspice puts no conductance from a node to ground: ours is 1e-12 S.
-  const held = [...deck.nodes.values()]
-    .filter((node) => node !== '0')
-    .map((node, place) => `rhold${place} ${node} 0 1e12`);
-  const at = (target: string) => deck.nodes.get(nodeOf(state, target)) ?? 'missing';
-  const lines = [...deck.lines, ...held];
-  return { lines, options, commands: ['op'], red: at(red), black: at(black) };
-}
-
-const shownFor = (setting: string, volts: number): Reading =>
-  read({
-    meter: manual2000,
-    unit: exactMeter(),
-    settingId: setting,
-    trace: { time: [0, 1], volts: [volts, volts] },
-    lagState: null,
-    relative: null,
-    readingNumber: 0,
-  }).reading;
-
-describe('readings on the TK-23 beside ngspice', () => {
-  let theirs: Reading[] = [];
-  beforeAll(() => {
-    const jobs = pairs.map(ngspiceJob);
-    theirs = runNgspice(jobs).map(({ op = {} }, index) => {
-      const { red, black } = jobs[index]!;
-      const at = (node: string) => (node === '0' ? 0 : (op[`v(${node})`] ?? Number.NaN));
-      return shownFor(pairs[index]!.setting, at(red) - at(black));
-    });
-  }, 120_000);
-
-  it('compares at least 12 pairs, most of them with digits', () => {
-    expect(pairs.length).toBeGreaterThanOrEqual(12);
-    expect(theirs.filter(({ counts }) => counts !== null).length).toBeGreaterThanOrEqual(18);
-  });
-
-  it.each(pairs.map((entry, index) => [entry.red, entry.black, entry.setting, index] as const))(
-    '%s to %s on %s shows the same to one count',
-    (red, black, setting, index) => {
-      const oven = drawOven(tk23, seedOf(index));
-      const ours = settled(pairs[index]!.state, { red, black, setting, oven });
-      const other = theirs[index]!;
-      expect(ours.isOverRange).toBe(other.isOverRange);
-      expect(Math.abs((ours.counts ?? 0) - (other.counts ?? 0))).toBeLessThanOrEqual(1);
-    },
-  );
-});
+describe('readings of the TK-23 beside ngspice', () =>
+  agreesWithNgspice(bench, pairs, { pairs: 12, withDigits: 18, firstSeed: 300 }));

@@ -16,6 +16,7 @@ const asked = z.strictObject({ ordered: z.number().min(1).max(300) });
 export const runOven = action({
   command: 'RunOven',
   event: 'OvenRun',
+  runsMains: true,
   input: asked,
   data: runOutcome,
   decide: ({ setup, state, before }, { ordered }) => {

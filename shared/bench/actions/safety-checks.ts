@@ -32,6 +32,7 @@ const surveyed = z.strictObject({
 export const surveyLeakage = action({
   command: 'SurveyLeakage',
   event: 'LeakageSurveyed',
+  runsMains: true,
   input: nothing,
   data: surveyed,
   decide: (bench) => {
@@ -62,6 +63,7 @@ const interlocksChecked = z.strictObject({
 export const checkInterlocks = action({
   command: 'CheckInterlocks',
   event: 'InterlocksChecked',
+  runsMains: true,
   input: nothing,
   data: interlocksChecked,
   decide: (bench) => {

@@ -21,6 +21,7 @@ const swung = z.strictObject({
 export const pullCord = action({
   command: 'PullCord',
   event: 'CordPulled',
+  runsMains: true,
   input: nothing,
   data: nothing,
   decide: ({ state }) =>
@@ -38,6 +39,7 @@ export const pullCord = action({
 export const plugCord = action({
   command: 'PlugCord',
   event: 'CordPlugged',
+  runsMains: true,
   input: nothing,
   data: seen,
   decide: ({ setup, state }) => {
@@ -130,6 +132,7 @@ const setDoor = (isDoorClosed: boolean) =>
   ({
     input: nothing,
     data: swung,
+    runsMains: true,
     decide: ({ setup, state }: Bench) => {
       if (state.oven.isDoorClosed === isDoorClosed)
         return refuse('door-is-so', `The door is ${isDoorClosed ? 'closed' : 'open'} already.`);

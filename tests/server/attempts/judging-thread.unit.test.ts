@@ -66,10 +66,12 @@ test('what is quick is judged here, without the thread', async () => {
   });
   const hands = handsAtHum(417);
   const before = hands.state();
-  const events = hands.does('OpenDoor', {});
-  expect(await threadedJudge(here, [idle]).verify(bench, before, events)).toMatchObject({
-    ok: true,
-  });
+  const events = hands.does('SetMeter', { setting: 'beep' });
+  const judging = threadedJudge(here, [idle]);
+  expect(await judging.verify(bench, before, events)).toMatchObject({ ok: true });
+  // With the cord in, a door that moves runs the circuit on mains.
+  const opening = hands.does('OpenDoor', {});
+  await expect(async () => judging.verify(bench, before, opening)).rejects.toThrow('was started');
 });
 
 test(
